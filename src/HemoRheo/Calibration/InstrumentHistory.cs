@@ -1,0 +1,8 @@
+namespace HemoRheo;
+
+/// <summary>The checks of one instrument in order of time, and the periods they make. Asked for a status by <c>At</c>.</summary>
+/// <param name="Instrument">The instrument.</param>
+/// <param name="Checks">All its checks, failed ones included.</param>
+/// <param name="Periods">Its periods.</param>
+/// <param name="Findings">Findings about the history as a whole.</param>
+public sealed record InstrumentHistory(Instrument Instrument, Items<InstrumentCheck> Checks, Items<InstrumentPeriod> Periods, Items<Finding> Findings);

@@ -1,0 +1,11 @@
+namespace HemoRheo;
+
+/// <summary>What was in the gap.</summary>
+public enum RecordingKind
+{
+    /// <summary>Blood of a sample.</summary>
+    Blood,
+
+    /// <summary>A calibration fluid.</summary>
+    Check,
+}
