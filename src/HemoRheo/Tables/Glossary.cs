@@ -1,0 +1,185 @@
+namespace HemoRheo;
+
+/// <summary>Every column that a table of this library may have, with its meaning and unit. One name means one thing everywhere.</summary>
+public static class Glossary
+{
+    private static readonly Unit Rate = ShownUnits.PerSecond;
+    private static readonly Unit Stress = ShownUnits.Millipascal;
+    private static readonly Unit Thickness = ShownUnits.MillipascalSecond;
+    private static readonly Unit Warmth = ShownUnits.DegreeCelsius;
+    private static readonly Unit Share = ShownUnits.LiterPerLiter;
+    private static readonly Unit Grams = new(Quantity.Concentration, "g/L", "g/L", 1);
+    private static readonly Unit Hours = new(Quantity.Time, "h", "h", 3600);
+    private static readonly Unit Seconds = new(Quantity.Time, "s", "s", 1);
+    private static readonly Unit Percent = new(Quantity.Fraction, "%", "%", 0.01);
+
+    /// <summary>All columns, by subject.</summary>
+    public static Items<Column> All { get; } =
+    [
+        // Lineage: where a thing was read.
+        new("file", "Path of the file below the study's folder."),
+        new("sheet", "Sheet of a workbook."),
+        new("line", "Line of the file, counted from 1."),
+        new("column", "Column of the line, counted from 1."),
+        new("layout", "Declared layout that the file was read by."),
+        new("digest", "SHA-256 of the bytes, hexadecimal."),
+        new("bytes", "Size of the file in bytes."),
+        new("readings", "How many readings."),
+        new("recordings", "How many recordings: fillings of the gap, of blood or of a calibration fluid."),
+        new("where", "Where it is: file and line, or sample, loading and point."),
+
+        // Findings.
+        new("code", "Stable code of the finding."),
+        new("severity", "How much the finding matters: note, warning or fault."),
+        new("finding", "What was found, with numbers and units."),
+        new("findings", "How many findings, or their codes."),
+        new("usual cause", "What usually causes such a finding in the laboratory."),
+        new("what to do", "What a person should do about it."),
+        new("observed", "What was observed, in the unit that the finding names."),
+        new("limit", "The limit it was held against, in the unit that the finding names."),
+
+        // Who and when. Identifiers are pseudonyms.
+        new("sample", "Pseudonym of the sample, or name of the check."),
+        new("person", "Pseudonym of the person."),
+        new("visit", "Number of the visit."),
+        new("group", "Label of the group."),
+        new("loading", "Number of the filling of the gap, counted from 1."),
+        new("loadings", "How many fillings of the gap."),
+        new("started at", "Date and time of the recording's start with offset, ISO 8601."),
+        new("drawn at", "Date and time the blood was drawn with offset, ISO 8601."),
+        new("since draw", "Time from the draw to the measurement.", Hours),
+        new("day", "Local date, ISO 8601."),
+
+        // Readings and curves.
+        new("point", "Number of the reading in its recording, counted from 1."),
+        new("ramp", "Direction of the ramp of shear rates: up, down or unstated."),
+        new("kept", "Whether the point takes part in fits."),
+        new("set aside because", "Codes of the findings that keep the point out of fits."),
+        new("shear rate", "Shear rate at the inner wall.", Rate),
+        new("shear stress", "Shear stress at the inner wall, as read.", Stress),
+        new("viscosity", "Apparent viscosity: shear stress over shear rate.", Thickness),
+        new("fitted stress", "Shear stress that the fitted law gives at this shear rate.", Stress),
+        new("residual", "Reading less fitted law, over the standard deviation of the error model."),
+        new("elapsed", "Time since the recording's start.", Seconds),
+        new("temperature", "Temperature of the sample as read.", Warmth),
+
+        // Laws and fits.
+        new("law", "Flow law the number comes from."),
+        new("decides", "Whether values of this law are decided on."),
+        new("parameter", "Parameter of the flow law."),
+        new("symbol", "Symbol in the formula."),
+        new("estimate", "Best estimate, in the unit beside it."),
+        new("standard error", "Standard error of the estimate from its fit alone, in the unit beside it."),
+        new("why no error", "Why there is no standard error."),
+        new("at bound", "Whether the estimate lies at a bound of its range."),
+        new("stop reason", "Why the fit ended."),
+        new("chi-square", "Weighted sum of squared residuals."),
+        new("probability", "Probability of a result as extreme or more if nothing but chance is at work."),
+        new("usable", "Whether values may be taken from the fit."),
+        new("curves", "How many curves."),
+        new("fits", "Whether the pooled evidence of the study lets the law be decided by."),
+        new("pattern probability", "Probability of mean residuals as large at the same places along the curves if the law is right, whatever the size of the errors."),
+        new("source", "Where the number, rule or contribution comes from."),
+
+        // Values and their budget.
+        new("measurand", "The quantity that is reported."),
+        new("basis", "The hematocrit the value speaks of: native, or the study's standard by the plasma rule or by the study's slope."),
+        new("value", "Best estimate, in the unit beside it."),
+        new("unit", "Unit of the numbers in this row, as shown."),
+        new("UCUM code", "Unit of the numbers in this row as its UCUM code."),
+        new("lower", "Lower end of the 95 % interval with the whole budget, in the unit beside it."),
+        new("upper", "Upper end of the 95 % interval with the whole budget, in the unit beside it."),
+        new("standard uncertainty", "Combined standard uncertainty, in the unit beside it."),
+        new("relative uncertainty", "Combined standard uncertainty relative to the value.", Percent),
+        new("degrees of freedom", "Effective degrees of freedom; Inf where every variance is known."),
+        new("interpolated", "The same quantity read off between the readings without a law, in the unit beside it."),
+        new("decidable", "Whether the value may be decided on and summarized."),
+        new("contribution", "Change of the value when this input is raised by one standard uncertainty, in the unit beside it."),
+        new("relative contribution", "Change of the value, relative to it, when this input is raised by one standard uncertainty.", Percent),
+        new("share", "Part of the variance that comes from this source.", Percent),
+        new("shared", "Whether many samples share this source, so that a mean does not average it away."),
+
+        // Blood.
+        new("hematocrit", "Volume fraction of red cells.", Share),
+        new("counter", "Method or counter that measured the hematocrit."),
+        new("plasma viscosity", "Viscosity of the sample's plasma.", Thickness),
+        new("plasma temperature", "Temperature at which the plasma was measured.", Warmth),
+        new("fibrinogen", "Fibrinogen concentration of the plasma.", Grams),
+
+        // Instruments and checks.
+        new("instrument", "Name of the rheometer."),
+        new("geometry", "Name of the measuring geometry."),
+        new("check", "Name of the instrument check."),
+        new("fluid", "Name of the calibration fluid."),
+        new("lot", "Lot of the fluid's certificate."),
+        new("measured", "Viscosity measured in the check.", Thickness),
+        new("expected", "Certified viscosity, moved to the temperature of the check.", Thickness),
+        new("relative error", "Measured over expected viscosity, less one.", Percent),
+        new("relative limit", "Largest relative error that a check may show.", Percent),
+        new("check outcome", "What the check says: passes, fails, or cannot tell."),
+        new("probability within", "Probability that the error lies within the limit."),
+        new("period", "Number of the instrument's period between calibrations, counted from 1."),
+        new("from", "Start of the period with offset, ISO 8601."),
+        new("until", "End of the period with offset, ISO 8601; empty while it lasts."),
+        new("checks", "How many checks."),
+        new("correction", "Mean of the period's checks, measured over expected less one, that values are divided by.", Percent),
+        new("status", "Instrument status: in order, in doubt, failed or unknown."),
+        new("reason", "The reason, in one sentence."),
+
+        // Limits and verdicts.
+        new("outcome", "Verdict: below, within, above or undecided; empty where the value was not judged."),
+        new("p below", "Probability that the quantity lies below the lower limit."),
+        new("p within", "Probability that the quantity lies between the limits."),
+        new("p above", "Probability that the quantity lies above the upper limit."),
+        new("level", "Probability that an outcome must reach to decide."),
+        new("why not judged", "Why there is no verdict."),
+        new("marked", "Measured while the instrument was not in order: judged, but never counted silently."),
+        new("changes with limits", "Whether the verdict would change if the limits moved within their own intervals."),
+        new("lower limit", "Lower reference limit, in the unit beside it."),
+        new("upper limit", "Upper reference limit, in the unit beside it."),
+        new("lower limit from", "Lower end of the lower limit's own 90 % interval, in the unit beside it."),
+        new("lower limit to", "Upper end of the lower limit's own 90 % interval, in the unit beside it."),
+        new("upper limit from", "Lower end of the upper limit's own 90 % interval, in the unit beside it."),
+        new("upper limit to", "Upper end of the upper limit's own 90 % interval, in the unit beside it."),
+        new("method", "How the number was obtained."),
+
+        // Groups.
+        new("samples", "How many samples were measured."),
+        new("n", "How many people are counted."),
+        new("set aside", "How many samples are left out."),
+        new("reasons", "Why they are left out: codes of findings with how many of each."),
+        new("mean", "Geometric mean for viscosities, arithmetic mean for indices, in the unit beside it."),
+        new("spread", "Standard deviation among people on the working scale: for viscosities, of the natural logarithm."),
+        new("ratio", "Second group over first group."),
+        new("ratio lower", "Lower end of the ratio's 95 % interval."),
+        new("ratio upper", "Upper end of the ratio's 95 % interval."),
+        new("question", "Which question the comparison answers: total, or adjusted for hematocrit."),
+        new("first group", "Label of the first group, the controls."),
+        new("second group", "Label of the second group."),
+        new("below", "How many lie below the lower limit."),
+        new("within", "How many lie between the limits."),
+        new("above", "How many lie above the upper limit."),
+        new("undecided", "How many are undecided."),
+        new("not judged", "How many could not be judged."),
+
+        // Runs.
+        new("what", "What the row is about."),
+        new("name", "Its name."),
+        new("before", "Before; empty where it was not there."),
+        new("after", "After; empty where it is not there."),
+        new("nearest cause", "For a changed result, the nearest input, setting or version that changed."),
+        new("count", "How many."),
+        new("meaning", "What a cell of the column says."),
+    ];
+
+    /// <summary>The column of this name.</summary>
+    /// <param name="name">Its name, exactly.</param>
+    /// <exception cref="ArgumentException">There is no such column; the message names the nearest one.</exception>
+    public static Column Column(string name) => All.FirstOrDefault(column => column.Name == name)
+        ?? throw new ArgumentException($"No column \"{name}\" in the glossary; the nearest one is \"{Spelling.Nearest(name, All.Select(column => column.Name))}\". A new column is added in Tables/Glossary.cs, with its meaning and unit.", nameof(name));
+
+    /// <summary>The data dictionary of these columns: name, meaning, unit and UCUM code.</summary>
+    /// <param name="columns">The columns, in order.</param>
+    public static Table Describe(IEnumerable<Column> columns) => Table.Of("name", "meaning", "unit", "UCUM code")
+        .WithRows(columns, column => [column.Header, column.Meaning, column.Unit?.Symbol, column.Unit?.Ucum]);
+}
