@@ -6,7 +6,7 @@ namespace HemoRheo;
 public readonly record struct Source(SourceKind Kind, string Of)
 {
     /// <summary>Whether many samples share this source, so that a mean does not average it away.</summary>
-    public bool Shared => Kind is not (SourceKind.Fit or SourceKind.Loading or SourceKind.Hematocrit or SourceKind.Plasma);
+    public bool Shared => Kind is not (SourceKind.Fit or SourceKind.Loading or SourceKind.Hematocrit or SourceKind.Plasma or SourceKind.People);
 
     /// <inheritdoc/>
     public override string ToString() => Of.Length == 0 ? Kind.Words() : $"{Kind.Words()} of {Of}";

@@ -44,4 +44,7 @@ public enum SourceKind
 
     /// <summary>A known bias of the instrument that the study chose not to correct.</summary>
     Bias,
+
+    /// <summary>The scatter of a quantity among the people of a group, which already holds what is individual in each of their values.</summary>
+    People,
 }

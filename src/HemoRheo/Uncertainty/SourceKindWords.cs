@@ -20,6 +20,7 @@ public static class SourceKindWords
         SourceKind.TorqueZero => "torque zero",
         SourceKind.Slope => "slope",
         SourceKind.Bias => "bias",
+        SourceKind.People => "people",
         _ => throw new ArgumentOutOfRangeException(nameof(kind)),
     };
 }
