@@ -1,0 +1,43 @@
+using static System.FormattableString;
+
+namespace HemoRheo;
+
+/// <summary>Holds the torque of every kept point against the instrument's floor. Used for blood and for checks alike.</summary>
+internal static class TorqueFloor
+{
+    /// <summary>Faults at points below the floor; a note where no floor is declared; a warning where torques are not known.</summary>
+    internal static IEnumerable<Finding> Judge(FlowCurve curve, Study study)
+    {
+        var instrument = study.Instruments.FirstOrDefault(known => known.Name == curve.Label.Recording?.Instrument);
+        if (instrument?.TorqueFloor is not { } floor)
+        {
+            var whose = curve.Label.Recording is { } recording ? $"instrument '{recording.Instrument}'" : "a curve made from numbers";
+            return [RheometryFindings.NoTorqueFloor.At(curve.Label.Where, $"No torque floor declared for {whose}.")];
+        }
+
+        return Judge(curve, instrument, floor);
+    }
+
+    private static IEnumerable<Finding> Judge(FlowCurve curve, Instrument instrument, double floor)
+    {
+        var unknown = 0;
+        foreach (var point in curve.Points)
+        {
+            var torque = point.Reading?.Torque ?? point.Stress.Pascals / curve.StressPerTorque;
+            if (torque is null)
+            {
+                unknown++;
+            }
+            else if (torque < floor)
+            {
+                yield return RheometryFindings.TorqueBelowFloor.At(
+                    curve.PlaceOf(point), Invariant($"Reading {point.Number} has a torque of {1e6 * torque:G4} uN.m, below the floor of {1e6 * floor:G4} uN.m of '{instrument.Name}'."), torque, floor);
+            }
+        }
+
+        if (unknown > 0)
+        {
+            yield return RheometryFindings.TorqueNotKnown.At(curve.Label.Where, $"The torque of {unknown} of {curve.Points.Count} readings is not known.");
+        }
+    }
+}
