@@ -53,4 +53,7 @@ public enum FieldMeaning
 
     /// <summary>Shear stress as exported.</summary>
     ShearStress,
+
+    /// <summary>Number of readings that a block announces.</summary>
+    ReadingCount,
 }

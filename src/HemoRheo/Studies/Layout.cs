@@ -25,4 +25,8 @@ public sealed record Layout(
     string KeySeparator,
     Items<LayoutField> Fields,
     Items<string> UpWords,
-    Items<string> DownWords);
+    Items<string> DownWords)
+{
+    /// <summary>Whether the last line of a whole file ends with a line end; if so, a file whose last line has none was cut.</summary>
+    public bool LastLineEnds { get; init; } = true;
+}

@@ -1,0 +1,37 @@
+namespace HemoRheo;
+
+/// <content>Instruments, geometries, calibration fluids, hematocrit counters.</content>
+public static partial class StudyFileKeys
+{
+    private static StudyFileKey[] Apparatus =>
+    [
+        Text("[[instruments]]", "name", "Name that exports and tables use.", "R1"),
+        Optional(Amount("[[instruments]]", "torque_floor", Quantity.Torque, KeyBounds.Positive, "Torque below which readings are set aside; without it every reading is marked.", "0.1 µN.m")),
+        Amount("[[instruments]]", "torque_zero", Quantity.Torque, KeyBounds.NotNegative, "Standard uncertainty of the day's torque zero.", "0.005 µN.m"),
+        Amount("[[instruments]]", "thermometer", Quantity.TemperatureDifference, KeyBounds.NotNegative, "Standard uncertainty of the thermometer.", "0.1 K"),
+        Amount("[[instruments]]", "check_every", Quantity.Time, KeyBounds.Positive, "How long a passed check vouches for the instrument.", "8 d"),
+        Amount("[[instruments]]", "check_limit", Quantity.Fraction, KeyBounds.BetweenZeroAndOne, "Largest relative error a check may show.", "3 %"),
+        Optional(Amount("[[instruments]]", "check_scatter", Quantity.Fraction, KeyBounds.Positive, "Standard deviation of one check's relative error, used while there are too few checks to estimate it.", "1 %")),
+        Default("[]", new("[[instruments]]", "adjusted", StudyFileKeyKind.Moments, "When the instrument was adjusted or repaired; each starts a new period.", "[2026-03-02T09:00:00+01:00]")),
+
+        Text("[[geometries]]", "name", "Name that exports and tables use. A geometry is concentric cylinders, the inner one driven.", "CYL-1"),
+        Amount("[[geometries]]", "inner_radius", Quantity.Length, KeyBounds.Positive, "Radius of the inner cylinder.", "12.5 mm"),
+        Amount("[[geometries]]", "outer_radius", Quantity.Length, KeyBounds.Positive, "Radius of the outer cylinder.", "13.56 mm"),
+        Amount("[[geometries]]", "length", Quantity.Length, KeyBounds.Positive, "Length of the inner cylinder.", "37.5 mm"),
+        Number("[[geometries]]", "end_factor", KeyBounds.Positive, "Factor on the torque for the cylinder's ends; 1.10 for the standard shape of ISO 3219.", "1.10"),
+
+        Text("[[fluids]]", "name", "Name that check exports use.", "oil-5"),
+        Word("[[fluids]]", "kind", "certified: by its certificate. water: by the IAPWS formulation (SR6-08).", "certified", "water"),
+        Text("[[fluids]]", "lot", "Lot of the certificate; for water, how it was made pure.", "24-117"),
+        Optional(Amount("[[fluids]]", "viscosity", Quantity.Viscosity, KeyBounds.Positive, "Certified viscosity. Not for water.", "4.85 mPa.s")),
+        Optional(Amount("[[fluids]]", "at", Quantity.Temperature, KeyBounds.BodyOrRoom, "Temperature of the certified viscosity. Not for water.", "37 °C")),
+        Amount("[[fluids]]", "expanded_uncertainty", Quantity.Fraction, KeyBounds.Positive, "Relative expanded uncertainty of the viscosity.", "0.4 %"),
+        Number("[[fluids]]", "coverage_factor", KeyBounds.Positive, "Coverage factor k of the expanded uncertainty, as the certificate states it.", "2"),
+        Optional(Amount("[[fluids]]", "per_kelvin", Quantity.PerKelvin, KeyBounds.Positive, "Relative fall of its viscosity per kelvin. Not for water.", "2.2 %/K")),
+        Optional(Amount("[[fluids]]", "per_kelvin_uncertainty", Quantity.PerKelvin, KeyBounds.NotNegative, "Standard uncertainty of that. Not for water.", "0.03 %/K")),
+
+        Text("[[counters]]", "name", "Name that the samples table uses.", "centrifuge"),
+        Amount("[[counters]]", "uncertainty", Quantity.Fraction, KeyBounds.NotNegative, "Standard uncertainty of one sample's hematocrit, without the shared part.", "0.006 L/L"),
+        Amount("[[counters]]", "shared_uncertainty", Quantity.Fraction, KeyBounds.NotNegative, "Standard uncertainty of the bias that all its samples share.", "0.003 L/L"),
+    ];
+}

@@ -1,0 +1,78 @@
+namespace HemoRheo;
+
+/// <content>Instruments, geometries, fluids, counters, and what is assumed of blood and readings.</content>
+internal sealed partial class StudyFileReader
+{
+    private static Instrument Instrument(SectionReader section) => new(
+        section.Text("name"),
+        section.OptionalAmount("torque_floor"),
+        section.Amount("torque_zero"),
+        section.Amount("thermometer"),
+        section.Span("check_every"),
+        section.Amount("check_limit"),
+        section.OptionalAmount("check_scatter"),
+        section.Moments("adjusted"));
+
+    private static Geometry Geometry(SectionReader section)
+    {
+        var geometry = new Geometry(section.Text("name"), section.Amount("inner_radius"), section.Amount("outer_radius"), section.Amount("length"), section.Number("end_factor"));
+        if (geometry.OuterRadius <= geometry.InnerRadius)
+            section.Refuse("outer_radius", "an outer radius that is not larger than the inner one", "outer_radius > inner_radius", "correct one of the two");
+        return geometry;
+    }
+
+    private static CalibrationFluid Fluid(SectionReader section)
+    {
+        var (name, lot, expanded, coverage) = (section.Text("name"), section.Text("lot"), section.Amount("expanded_uncertainty"), section.Number("coverage_factor"));
+        if (section.Text("kind") == "water")
+        {
+            foreach (var key in CertificateKeys.Where(section.Has)) section.Refuse(key, $"\"{key}\" for water", "none: water is taken from IAPWS SR6-08", $"remove {key}");
+            return Water.Fluid(name, lot, expanded, coverage);
+        }
+
+        foreach (var key in CertificateKeys.Where(key => !section.Has(key)))
+            section.Refuse(key, $"no \"{key}\" for the certified fluid", $"{key} as its certificate states it", $"add {key}");
+        return new(
+            name,
+            lot,
+            Temperature.FromDegreesCelsius(section.OptionalAmount("at") ?? double.NaN),
+            Viscosity.FromPascalSeconds(section.OptionalAmount("viscosity") ?? double.NaN),
+            expanded,
+            coverage,
+            section.OptionalAmount("per_kelvin") ?? double.NaN,
+            section.OptionalAmount("per_kelvin_uncertainty") ?? double.NaN,
+            IsWater: false);
+    }
+
+    private static string[] CertificateKeys => ["viscosity", "at", "per_kelvin", "per_kelvin_uncertainty"];
+
+    private static Counter Counter(SectionReader section) => new(section.Text("name"), section.Amount("uncertainty"), section.Amount("shared_uncertainty"));
+
+    private static Blood Blood(SectionReader section) => new(
+        section.Amount("per_kelvin"),
+        section.Amount("per_kelvin_uncertainty"),
+        section.Amount("plasma_per_kelvin"),
+        section.Amount("plasma_uncertainty"));
+
+    private static ReadingErrors Errors(SectionReader section)
+    {
+        var errors = new ReadingErrors(section.Amount("relative"), section.Amount("floor"), section.Truth("known"), section.OptionalAmount("loading"));
+        if (errors is { Relative: 0, Floor: 0 }) section.Refuse("relative", "readings without any error", "relative or floor greater than 0", "give the size of at least one");
+        return errors;
+    }
+
+    private static ScreeningLimits Screening(SectionReader section)
+    {
+        var limits = new ScreeningLimits(
+            Temperature.FromDegreesCelsius(section.Amount("temperature")),
+            section.Amount("temperature_tolerance"),
+            section.Amount("speed_tolerance"),
+            section.Span("longest_since_draw"),
+            section.Amount("duplicate_tolerance"),
+            section.Amount("lowest_hematocrit"),
+            section.Amount("highest_hematocrit"));
+        if (limits.HighestHematocrit <= limits.LowestHematocrit)
+            section.Refuse("highest_hematocrit", "a highest hematocrit that is not above the lowest", "highest_hematocrit > lowest_hematocrit", "correct one of the two");
+        return limits;
+    }
+}

@@ -1,0 +1,171 @@
+namespace HemoRheo;
+
+/// <summary>The commented study file to start from.</summary>
+internal static class StudyTemplate
+{
+    public const string Text = """
+# A study for HemoRheo. Research use only. Text after # is for people.
+# A value with a unit is a text, "12.5 mm", with a decimal point. Nothing is guessed: replace every value by your own.
+# Lines that begin with "# key =" show a key that may be left out; the value shown is an example or the default.
+
+name = "My study"
+seed = 1                                  # of every random stream; any whole number
+
+[files]                                   # paths below the folder of this file
+exports = ["exports"]                     # files or folders with exports of blood
+checks = ["checks"]                       # exports of instrument checks
+samples = "samples.csv"                   # comma, decimal point, UTF-8; units in the header: hematocrit [L/L], plasma_viscosity [mPa.s]
+people = "people.csv"                     # person,group; leave out where no groups are compared
+# check_table = "checks.csv"              # what check exports do not say: check,fluid,instrument,started_at,geometry
+# allowed_columns = ["collection_name"]   # columns that look like direct identifiers; allowed to stand there, never read
+
+# One section a kind of export. Headers are the exact texts of the export.
+[[layouts]]
+name = "rows"                             # a header row, then one row a reading
+shape = "rows"
+files = ["*.csv"]
+encoding = "utf-8"                        # default utf-8
+separator = ";"
+decimal_sign = ","
+time_format = "yyyy-MM-dd HH:mm:ss zzz"   # zzz, the offset, is part of it
+up_words = ["up"]
+down_words = ["down"]
+# last_line_ends = false                  # where whole files end without a line end
+
+[layouts.columns]
+sample = { header = "sample" }
+loading = { header = "loading" }
+instrument = { header = "instrument" }
+geometry = { header = "geometry" }
+fluid = { header = "fluid" }              # filled in checks
+started_at = { header = "started at" }
+ramp = { header = "ramp" }
+temperature = { header = "temperature [°C]", unit = "°C" }
+elapsed = { header = "time [s]", unit = "s" }
+set_speed = { header = "speed asked [rpm]", unit = "rpm" }
+speed = { header = "speed [rpm]", unit = "rpm" }
+torque = { header = "torque [µN.m]", unit = "µN.m" }
+
+[[layouts]]
+name = "blocks"                           # one block a recording: lines "key: value", a header row, readings
+shape = "blocks"
+files = ["*.txt"]
+separator = ","
+decimal_sign = "."
+time_format = "yyyy-MM-ddTHH:mm:sszzz"
+block_start = "Sample"                    # the key whose line starts a block
+key_separator = ":"                       # default :
+up_words = ["up"]
+down_words = ["down"]
+
+[layouts.keys]
+sample = { header = "Sample" }
+person = { header = "Person" }
+visit = { header = "Visit" }
+loading = { header = "Loading" }
+instrument = { header = "Instrument" }
+started_at = { header = "Start" }
+reading_count = { header = "Readings" }
+
+[layouts.columns]
+ramp = { header = "Ramp" }
+temperature = { header = "Temperature [°C]", unit = "°C" }
+set_shear_rate = { header = "Rate asked [1/s]", unit = "1/s" }
+shear_rate = { header = "Rate [1/s]", unit = "1/s" }
+shear_stress = { header = "Stress [mPa]", unit = "mPa" }
+
+[[instruments]]
+name = "R1"
+torque_floor = "0.1 µN.m"                 # readings below it are set aside
+torque_zero = "0.005 µN.m"                # standard uncertainty of the day's torque zero
+thermometer = "0.1 K"                     # standard uncertainty
+check_every = "8 d"                       # how long a passed check vouches for the instrument
+check_limit = "3 %"                       # largest error a check may show
+# check_scatter = "1 %"                   # scatter of one check, used while there are too few to estimate it
+# adjusted = [2026-03-02T09:00:00+01:00]  # adjusted or repaired: each starts a new period
+
+[[geometries]]                            # concentric cylinders, the inner one driven
+name = "CYL-1"
+inner_radius = "12.5 mm"
+outer_radius = "13.56 mm"
+length = "37.5 mm"
+end_factor = 1.10                         # 1.10 for the standard shape of ISO 3219
+
+[[fluids]]
+name = "oil-5"
+kind = "certified"
+lot = "lot of the certificate"
+viscosity = "4.85 mPa.s"
+at = "37 °C"
+expanded_uncertainty = "0.4 %"
+coverage_factor = 2                       # as the certificate states it
+per_kelvin = "2.2 %/K"
+per_kelvin_uncertainty = "0.03 %/K"
+
+[[fluids]]
+name = "water"
+kind = "water"                            # viscosity from IAPWS SR6-08
+lot = "how it was made pure"
+expanded_uncertainty = "1 %"
+coverage_factor = 2
+
+[[counters]]                              # of hematocrit
+name = "centrifuge"
+uncertainty = "0.006 L/L"                 # of one sample, without the shared part
+shared_uncertainty = "0.003 L/L"          # of the bias all its samples share
+
+[blood]
+per_kelvin = "2.6 %/K"                    # fall of viscosity per kelvin
+per_kelvin_uncertainty = "0.4 %/K"
+plasma_per_kelvin = "2.0 %/K"
+plasma_uncertainty = "1 %"                # of one plasma viscosity
+
+[errors]                                  # of one reading: (relative stress)^2 + floor^2
+relative = "1 %"
+floor = "0.3 mPa"
+known = true                              # false: known up to a factor that each fit estimates
+loading = "2 %"                           # between loadings; used when no sample is loaded twice
+
+[screening]                               # every key may be left out; these are the defaults
+temperature = "37 °C"
+temperature_tolerance = "0.5 K"
+speed_tolerance = "5 %"
+longest_since_draw = "4 h"
+duplicate_tolerance = "0.1 %"
+lowest_hematocrit = "0.20 L/L"
+highest_hematocrit = "0.70 L/L"
+
+[analysis]
+laws = ["Newtonian", "Casson", "Quemada"]
+decide_by = "Quemada"                     # the law whose values are decided on
+standard_rates = ["1 1/s", "10 1/s", "100 1/s"]
+ramp = "down"                             # default down; the other ramp serves hysteresis
+correct_bias = true                       # default true: by the mean of the period's checks
+level = 0.95                              # default 0.95: probability that decides a verdict
+
+[standard_hematocrit]
+hematocrit = "0.45 L/L"
+decide_by = "plasma-power"                # or "study-slope"
+
+[reference]
+from_controls = true                      # from the control group where it is large enough
+
+# [[reference.declared]]                  # limits with their source, where the controls are too few
+# rate = "100 1/s"
+# at_standard_hematocrit = true
+# lower = "3.9 mPa.s"
+# upper = "5.3 mPa.s"
+# source = "where they come from"
+
+[[groups]]
+code = "A"
+label = "controls"
+controls = true
+
+[[groups]]
+code = "B"
+label = "patients"
+controls = false
+
+""";
+}

@@ -1,0 +1,29 @@
+namespace HemoRheo.Tests.Studies;
+
+public sealed class StudyTemplateTests
+{
+    [Fact]
+    public void Opens_once_the_files_it_names_are_there()
+    {
+        using var folder = StudyFolder.Empty();
+        folder.Write("study.toml", Study.Template());
+        folder.Write("samples.csv", "sample,person\n");
+        folder.Write("people.csv", "person,group\n");
+        folder.Write("exports/.keep", "");
+        folder.Write("checks/.keep", "");
+
+        var study = Study.Open(folder.PathOf("study.toml"));
+
+        Assert.Equal("My study", study.Name);
+        Assert.Equal(2, study.Layouts.Count);
+        Assert.Equal(0.0125, study.Geometries[0].InnerRadius, 1e-15);
+        Assert.Equal(TimeSpan.FromDays(8), study.Instruments[0].CheckEvery);
+    }
+
+    [Fact]
+    public void Shows_every_key_a_study_file_may_have()
+    {
+        foreach (var key in StudyFileKeys.All.Where(key => key.Kind != StudyFileKeyKind.Field))
+            Assert.Matches($@"(?m)^(# )?{key.Name} = ", Study.Template());
+    }
+}
