@@ -1,1 +1,3 @@
-return 0;
+using HemoRheo.App;
+
+return await new CommandLine(Environment.CurrentDirectory, Console.Out, Console.Error).RunAsync(args, CancellationToken.None);
