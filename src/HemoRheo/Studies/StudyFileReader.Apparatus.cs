@@ -27,7 +27,7 @@ internal sealed partial class StudyFileReader
         if (section.Text("kind") == "water")
         {
             foreach (var key in CertificateKeys.Where(section.Has)) section.Refuse(key, $"\"{key}\" for water", "none: water is taken from IAPWS SR6-08", $"remove {key}");
-            return Water.Fluid(name, lot, expanded, coverage);
+            return WaterFluid.Of(name, lot, expanded, coverage);
         }
 
         foreach (var key in CertificateKeys.Where(key => !section.Has(key)))

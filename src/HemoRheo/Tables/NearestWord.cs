@@ -1,10 +1,10 @@
 namespace HemoRheo;
 
 /// <summary>Finds the known word nearest to one that is not known, for messages.</summary>
-internal static class Spelling
+internal static class NearestWord
 {
     /// <summary>The known word with the fewest single-letter changes (letters inserted, removed or replaced; case ignored); null where there is none.</summary>
-    public static string? Nearest(string word, IEnumerable<string> known) => known.MinBy(candidate => Distance(word.ToUpperInvariant(), candidate.ToUpperInvariant()));
+    public static string? To(string word, IEnumerable<string> known) => known.MinBy(candidate => Distance(word.ToUpperInvariant(), candidate.ToUpperInvariant()));
 
     private static int Distance(string a, string b)
     {
