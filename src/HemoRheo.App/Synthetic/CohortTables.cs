@@ -14,7 +14,7 @@ internal sealed class CohortTables(long seed, TrueInstrument instrument)
 
     /// <summary>The samples table.</summary>
     public string Samples(IEnumerable<PlannedSample> samples, IReadOnlyDictionary<string, TrueBlood> truth) =>
-        "sample,person,visit,drawn_at,hematocrit,counter,plasma_viscosity,plasma_temperature,plasma_instrument,fibrinogen\n"
+        "sample,person,visit,drawn_at,hematocrit [L/L],counter,plasma_viscosity [mPa.s],plasma_temperature [°C],plasma_instrument,fibrinogen [g/L]\n"
         + string.Concat(samples.Select(sample => Row(sample, truth[sample.Sample]) + "\n"));
 
     private string Row(PlannedSample sample, TrueBlood blood)
