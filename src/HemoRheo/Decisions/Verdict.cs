@@ -13,12 +13,16 @@ public sealed record Verdict(Outcome Outcome, double Below, double Within, doubl
     /// <param name="value">The value, with the contributions it shares with the limits already taken out.</param>
     /// <param name="limits">Limits on the value's working scale, taken as exact; an end may be infinite.</param>
     /// <param name="level">Probability that decides, above 0.5 and below 1.</param>
+    /// <exception cref="ArgumentException">The value is not a finite number, or the limits are not in order.</exception>
+    /// <exception cref="ArgumentOutOfRangeException">The level does not lie above 0.5 and below 1.</exception>
     public static Verdict Of(Value value, Interval limits, double level = 0.95)
     {
         if (level is not (> 0.5 and < 1)) throw new ArgumentOutOfRangeException(nameof(level), level, "The level of a verdict lies above 0.5 and below 1.");
+        if (!double.IsFinite(value.X) || !double.IsFinite(value.Variance)) throw new ArgumentException($"A value of {value.X} with variance {value.Variance} cannot be judged: both must be finite numbers.", nameof(value));
+        if (!(limits.Lower <= limits.Upper)) throw new ArgumentException($"The limits {limits} are not in order: the lower one may not lie above the upper one.", nameof(limits));
         var below = value.ProbabilityBelow(limits.Lower);
         var above = value.ProbabilityAbove(limits.Upper);
-        var within = 1 - below - above;
+        var within = Math.Max(0, 1 - below - above);
         var best = Math.Max(within, Math.Max(below, above));
         var outcome = best < level ? Outcome.Undecided : best == within ? Outcome.Within : best == below ? Outcome.Below : Outcome.Above;
         return new(outcome, below, within, above, level);
