@@ -99,6 +99,30 @@ public static class Glossary
         new("share", "Part of the variance that comes from this source.", Percent),
         new("shared", "Whether many samples share this source, so that a mean does not average it away."),
 
+        // Budgets on the working scale: the natural logarithm of the SI number for viscosities and stresses, the SI number itself for other quantities.
+        new("working value", "Best estimate on the working scale: natural logarithm of the SI number for viscosities, the SI number itself for quantities that may be negative."),
+        new("working uncertainty", "Combined standard uncertainty on the working scale."),
+        new("working contribution", "Signed change of the working value when this source is raised by one standard uncertainty."),
+        new("kind", "Kind of the source of a contribution."),
+        new("belongs to", "What the source belongs to; values that name the same one share its error."),
+        new("variance estimate", "Variance estimate the contribution comes from; contributions of one estimate are right or wrong together. Empty where the variance is taken as known."),
+        new("c fit", "Contribution of the fits of its loadings to the working value: signed where it is one source, else the root of the sum of squares; empty where it does not enter."),
+        new("c loading", "Contribution of the scatter between loadings to the working value: signed where it is one source, else the root of the sum of squares; empty where it does not enter."),
+        new("c calibration", "Contribution of the instrument's correction in its period to the working value: signed where it is one source, else the root of the sum of squares; empty where it does not enter."),
+        new("c day", "Contribution of the instrument's day-to-day scatter to the working value: signed where it is one source, else the root of the sum of squares; empty where it does not enter."),
+        new("c certificate", "Contribution of the calibration fluid's certificate to the working value: signed where it is one source, else the root of the sum of squares; empty where it does not enter."),
+        new("c fluid beta", "Contribution of the calibration fluid's temperature coefficient to the working value: signed where it is one source, else the root of the sum of squares; empty where it does not enter."),
+        new("c thermometer", "Contribution of the instrument's thermometer to the working value: signed where it is one source, else the root of the sum of squares; empty where it does not enter."),
+        new("c blood beta", "Contribution of the temperature coefficient of blood to the working value: signed where it is one source, else the root of the sum of squares; empty where it does not enter."),
+        new("c hematocrit", "Contribution of the sample's hematocrit to the working value: signed where it is one source, else the root of the sum of squares; empty where it does not enter."),
+        new("c counter", "Contribution of the bias that all samples of the hematocrit counter share to the working value: signed where it is one source, else the root of the sum of squares; empty where it does not enter."),
+        new("c plasma", "Contribution of the sample's plasma viscosity to the working value: signed where it is one source, else the root of the sum of squares; empty where it does not enter."),
+        new("c torque zero", "Contribution of the torque zero of the day to the working value: signed where it is one source, else the root of the sum of squares; empty where it does not enter."),
+        new("c slope", "Contribution of the study's slope against hematocrit to the working value: signed where it is one source, else the root of the sum of squares; empty where it does not enter."),
+        new("c bias", "Contribution of a known bias of the instrument that the study chose not to correct to the working value: signed where it is one source, else the root of the sum of squares; empty where it does not enter."),
+        new("c people", "Contribution of the scatter among people to the working value: signed where it is one source, else the root of the sum of squares; empty where it does not enter."),
+        new("why not decidable", "Codes of the findings that keep the value from being decided on."),
+
         // Blood.
         new("hematocrit", "Volume fraction of red cells.", Share),
         new("counter", "Method or counter that measured the hematocrit."),
@@ -115,6 +139,8 @@ public static class Glossary
         new("measured", "Viscosity measured in the check.", Thickness),
         new("expected", "Certified viscosity, moved to the temperature of the check.", Thickness),
         new("relative error", "Measured over expected viscosity, less one.", Percent),
+        new("error lower", "Lower end of the relative error's 95 % interval.", Percent),
+        new("error upper", "Upper end of the relative error's 95 % interval.", Percent),
         new("relative limit", "Largest relative error that a check may show.", Percent),
         new("check outcome", "What the check says: passes, fails, or cannot tell."),
         new("probability within", "Probability that the error lies within the limit."),
@@ -170,6 +196,7 @@ public static class Glossary
         new("nearest cause", "For a changed result, the nearest input, setting or version that changed."),
         new("count", "How many."),
         new("meaning", "What a cell of the column says."),
+        new("table", "File that the column stands in."),
     ];
 
     /// <summary>The column of this name.</summary>
