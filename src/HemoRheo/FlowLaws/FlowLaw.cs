@@ -3,10 +3,102 @@ namespace HemoRheo;
 /// <summary>A steady-shear flow law: what a user holds. Lists of unlike laws are lists of this.</summary>
 /// <param name="Name">Name from the literature.</param>
 /// <param name="Source">Where it was published.</param>
-/// <param name="Parameters">Its parameters, in the order its formula takes them.</param>
+/// <param name="Parameters">Its parameters, in the order its formula takes them; at most five.</param>
 /// <param name="ValidRates">Shear rates for which the literature uses it with blood, 1/s.</param>
 public abstract record FlowLaw(string Name, Citation Source, Items<LawParameter> Parameters, Interval ValidRates)
 {
+    /// <summary>Constant viscosity.</summary>
+    public static FlowLaw<Newtonian> Newtonian => HemoRheo.Newtonian.Law;
+
+    /// <summary>Casson's law: a yield stress and a Casson viscosity.</summary>
+    public static FlowLaw<Casson> Casson => HemoRheo.Casson.Law;
+
+    /// <summary>Quemada's law in its three identifiable numbers.</summary>
+    public static FlowLaw<Quemada> Quemada => HemoRheo.Quemada.Law;
+
+    /// <summary>Every built-in law, from few parameters to many.</summary>
+    public static Items<FlowLaw> All => [Newtonian, Casson, Quemada];
+
+    /// <summary>A limiting case of this law that a fit may end in; null where there is none.</summary>
+    internal abstract LawBoundary? Boundary { get; }
+
+    /// <summary>A built-in law by its name.</summary>
+    /// <param name="name">Its name; upper and lower case are the same.</param>
+    /// <exception cref="ArgumentException">No built-in law has this name.</exception>
+    public static FlowLaw Named(string name)
+    {
+        ArgumentNullException.ThrowIfNull(name);
+        return All.FirstOrDefault(law => law.Name.Equals(name, StringComparison.OrdinalIgnoreCase))
+            ?? throw new ArgumentException($"There is no flow law named '{name}'; the laws are {string.Join(", ", All.Select(law => law.Name))}.", nameof(name));
+    }
+
+    /// <summary>Shear stress at a shear rate.</summary>
+    /// <param name="rate">Shear rate, not below zero.</param>
+    /// <param name="parameters">Parameters on their natural scale, SI, in the order of <see cref="Parameters"/>.</param>
+    /// <exception cref="ArgumentException">There are too few or too many parameters.</exception>
+    /// <exception cref="ArgumentOutOfRangeException">The rate is below zero or not a number.</exception>
+    public ShearStress Stress(ShearRate rate, params ReadOnlySpan<double> parameters)
+    {
+        CheckCount(parameters.Length);
+        if (!(rate.ReciprocalSeconds >= 0))
+        {
+            throw new ArgumentOutOfRangeException(nameof(rate), $"A shear rate is zero or above; this one is {rate}.");
+        }
+
+        Span<Lane> natural = stackalloc Lane[LaneDual.Slopes];
+        for (var k = 0; k < parameters.Length; k++) natural[k] = new(parameters[k]);
+        return new(StressOf(new(rate.ReciprocalSeconds), natural[..parameters.Length])[0]);
+    }
+
     /// <inheritdoc/>
-    public override string ToString() => Name;
+    public sealed override string ToString() => Name;
+
+    /// <summary>Stress, Pa, and its slopes with respect to the parameters on the fitting scale.</summary>
+    internal double StressAt(double rate, ReadOnlySpan<double> scaled, Span<double> slopes)
+    {
+        CheckCount(scaled.Length);
+        Span<Lane> at = stackalloc Lane[LaneDual.Slopes];
+        Span<Lane> stress = stackalloc Lane[1];
+        Span<Lane> lanes = stackalloc Lane[LaneDual.Slopes];
+        for (var k = 0; k < scaled.Length; k++) at[k] = new(scaled[k]);
+        StressesAndSlopes([new(rate)], at[..scaled.Length], stress, lanes[..scaled.Length]);
+        for (var k = 0; k < scaled.Length; k++) slopes[k] = lanes[k][0];
+        return stress[0][0];
+    }
+
+    /// <summary>From the fitting scale to the natural one.</summary>
+    internal double[] ToNatural(ReadOnlySpan<double> scaled)
+    {
+        var natural = new double[scaled.Length];
+        for (var k = 0; k < natural.Length; k++) natural[k] = Parameters[k].ToNatural(scaled[k]);
+        return natural;
+    }
+
+    /// <summary>From the natural scale to the fitting one.</summary>
+    internal double[] ToScaled(ReadOnlySpan<double> natural)
+    {
+        var scaled = new double[natural.Length];
+        for (var k = 0; k < scaled.Length; k++) scaled[k] = Parameters[k].ToScaled(natural[k]);
+        return scaled;
+    }
+
+    /// <summary>Where a fit starts: a deterministic guess from a linearised form, inside the bounds, natural scale.</summary>
+    /// <param name="perSecond">Shear rates, above zero, 1/s.</param>
+    /// <param name="pascals">Shear stresses, above zero, Pa.</param>
+    /// <param name="guess">Receives the guess.</param>
+    internal abstract void FirstGuess(ReadOnlySpan<double> perSecond, ReadOnlySpan<double> pascals, Span<double> guess);
+
+    /// <summary>Stress from natural parameters in four lanes.</summary>
+    internal abstract Lane StressOf(Lane rate, ReadOnlySpan<Lane> natural);
+
+    /// <summary>Stresses and slopes with respect to the scaled parameters, one curve a lane: slope k of point i at k * rates.Length + i.</summary>
+    internal abstract void StressesAndSlopes(ReadOnlySpan<Lane> rates, ReadOnlySpan<Lane> scaled, Span<Lane> stresses, Span<Lane> slopes);
+
+    private void CheckCount(int count)
+    {
+        if (count != Parameters.Count)
+        {
+            throw new ArgumentException($"{Name} takes {Parameters.Count} parameters ({string.Join(", ", Parameters.Select(p => $"{p.Name} in {p.Unit}"))}); {count} were given.");
+        }
+    }
 }

@@ -1,0 +1,83 @@
+namespace HemoRheo;
+
+/// <summary>What happens to a curve that its lane did not settle, judged on that curve alone: its boundary case, the general path, other starts.</summary>
+internal static class Rescue
+{
+    private const double OtherStart = 1.5;
+
+    public static CurveSolution Of(FlowLaw law, CurveData curve, double[] start, ErrorModel errors, LaneOutcome outcome)
+    {
+        if (outcome.AtWall)
+        {
+            return AtBoundary(law, curve, outcome.Solution.Scaled, errors);
+        }
+
+        var first = General(law, curve, start, errors);
+        if (Settled(first)) return IsBeyondWall(law, curve, first) ? AtBoundary(law, curve, first.Scaled, errors) : first;
+        CurveSolution? best = null;
+        foreach (var other in OtherStarts(start))
+        {
+            var solution = General(law, curve, other, errors);
+            if (Settled(solution) && !(solution.ChiSquare >= best?.ChiSquare)) best = solution;
+        }
+
+        return best is null ? first : IsBeyondWall(law, curve, best) ? AtBoundary(law, curve, best.Scaled, errors) : best;
+    }
+
+    /// <summary>The law with one parameter at its bound; back inside if the sum of squares falls that way.</summary>
+    private static CurveSolution AtBoundary(FlowLaw law, CurveData curve, double[] near, ErrorModel errors)
+    {
+        var boundary = law.Boundary!;
+        var parameter = boundary.Parameter;
+        var start = near.ToArray();
+        start[parameter] = law.Parameters[parameter].ToScaled(law.Parameters[parameter].Lower);
+        var held = LaneGroup.Solve(law, [curve], [start], errors, parameter)[0];
+        if (!FallsInward(law, curve, held.Solution, errors)) return held.Solution;
+        var inside = held.Solution.Scaled.ToArray();
+        inside[parameter] = law.Parameters[parameter].ToScaled(boundary.Inside(curve.LowestStress));
+        var again = LaneGroup.Solve(law, [curve], [inside], errors)[0];
+        return again.Good ? again.Solution : held.Solution;
+    }
+
+    /// <summary>Whether the sum of squares falls when the held parameter leaves its bound.</summary>
+    private static bool FallsInward(FlowLaw law, CurveData curve, CurveSolution held, ErrorModel errors)
+    {
+        var parameter = law.Boundary!.Parameter;
+        var wall = held.Scaled.ToArray();
+        wall[parameter] = LaneGroup.WallOf(law, curve);
+        var slopes = new double[wall.Length];
+        double score = 0;
+        for (var i = 0; i < curve.Rates.Length; i++)
+        {
+            var stress = law.StressAt(curve.Rates[i], wall, slopes);
+            var (relative, floor) = (errors.Relative * stress, errors.Floor.Pascals);
+            score += slopes[parameter] * (curve.Stresses[i] - stress) / (relative * relative + floor * floor);
+        }
+
+        return score > 0;
+    }
+
+    private static CurveSolution General(FlowLaw law, CurveData curve, double[] start, ErrorModel errors)
+    {
+        var s = LeastSquares.Solve(new LawOnPoints(law, curve.Rates).Evaluate, curve.Stresses, start, errors.Relative, errors.Floor.Pascals);
+        return new(s.Parameters, s.Inverse, s.Response, s.Residuals, s.ChiSquare, s.End, null);
+    }
+
+    private static bool Settled(CurveSolution solution) => solution.End.Converged;
+
+    private static bool IsBeyondWall(FlowLaw law, CurveData curve, CurveSolution solution) =>
+        law.Boundary is { } boundary && solution.Scaled[boundary.Parameter] < LaneGroup.WallOf(law, curve);
+
+    private static IEnumerable<double[]> OtherStarts(double[] start)
+    {
+        for (var k = 0; k < start.Length; k++)
+        {
+            foreach (var shift in (double[])[-OtherStart, OtherStart])
+            {
+                var other = start.ToArray();
+                other[k] += shift;
+                yield return other;
+            }
+        }
+    }
+}

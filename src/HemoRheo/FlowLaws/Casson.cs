@@ -1,0 +1,58 @@
+using System.Runtime.CompilerServices;
+
+namespace HemoRheo;
+
+/// <summary>The numbers of Casson's law: stress = (sqrt(yield stress) + sqrt(Casson viscosity x rate))^2.</summary>
+/// <param name="YieldStress">Yield stress: an extrapolation to a rate of zero, not a measured stress.</param>
+/// <param name="CassonViscosity">Casson viscosity: the viscosity that the law approaches at high rates.</param>
+/// <remarks>Source: Casson 1959, in Mill (ed.), Rheology of Disperse Systems, 84-104. For whole blood from about 0.1 to 1000 1/s.</remarks>
+public sealed record Casson(ShearStress YieldStress, Viscosity CassonViscosity)
+{
+    internal static FlowLaw<Casson> Law { get; } = new FormulaLaw<Formula, Casson>(
+        "Casson",
+        new("Casson", 1959, "in Mill (ed.), Rheology of Disperse Systems, Pergamon, 84-104"),
+        [new("yield stress", "τ_y", "Pa"), new("Casson viscosity", "η_C", "Pa.s")],
+        new(0.1, 1000),
+        default,
+        Guess,
+        p => new(ShearStress.FromPascals(p[0]), Viscosity.FromPascalSeconds(p[1])),
+        new(0, lowest => 1e-8 * lowest, lowest => 1e-2 * lowest, "Newtonian"));
+
+    /// <inheritdoc/>
+    public override string ToString() => $"yield stress {YieldStress}, Casson viscosity {CassonViscosity}";
+
+    /// <summary>Square root of stress against square root of rate is a straight line.</summary>
+    internal static void Guess(ReadOnlySpan<double> perSecond, ReadOnlySpan<double> pascals, Span<double> guess)
+    {
+        double w = 0, x = 0, y = 0, xx = 0, xy = 0, lowest = double.PositiveInfinity;
+        for (var i = 0; i < perSecond.Length; i++)
+        {
+            var weight = 1 / pascals[i];
+            var (a, b) = (Math.Sqrt(perSecond[i]), Math.Sqrt(pascals[i]));
+            w += weight;
+            x += weight * a;
+            y += weight * b;
+            xx += weight * a * a;
+            xy += weight * a * b;
+            lowest = Math.Min(lowest, pascals[i]);
+        }
+
+        var slope = (w * xy - x * y) / (w * xx - x * x);
+        var intercept = (y - slope * x) / w;
+        var least = 0.1 * Math.Sqrt(lowest);
+        if (!(slope > 0) || !(intercept > least))
+        {
+            intercept = least;
+            slope = Math.Max((y - intercept * w) / x, 0.1 * y / x);
+        }
+
+        guess[0] = intercept * intercept;
+        guess[1] = slope * slope;
+    }
+
+    private readonly struct Formula : IFormula
+    {
+        [MethodImpl(MethodImplOptions.AggressiveInlining)]
+        public T Stress<T>(T rate, ReadOnlySpan<T> p) where T : struct, ILawNumber<T> => T.Square(T.Sqrt(p[0]) + T.Sqrt(p[1] * rate));
+    }
+}
