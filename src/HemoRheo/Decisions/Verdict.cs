@@ -18,7 +18,7 @@ public sealed record Verdict(Outcome Outcome, double Below, double Within, doubl
     public static Verdict Of(Value value, Interval limits, double level = 0.95)
     {
         if (level is not (> 0.5 and < 1)) throw new ArgumentOutOfRangeException(nameof(level), level, "The level of a verdict lies above 0.5 and below 1.");
-        if (!double.IsFinite(value.X) || !double.IsFinite(value.Variance)) throw new ArgumentException($"A value of {value.X} with variance {value.Variance} cannot be judged: both must be finite numbers.", nameof(value));
+        if (!double.IsFinite(value.X) || !double.IsFinite(value.Variance)) throw new ArgumentException(FormattableString.Invariant($"A value of {value.X} with variance {value.Variance} cannot be judged: both must be finite numbers."), nameof(value));
         if (!(limits.Lower <= limits.Upper)) throw new ArgumentException($"The limits {limits} are not in order: the lower one may not lie above the upper one.", nameof(limits));
         var below = value.ProbabilityBelow(limits.Lower);
         var above = value.ProbabilityAbove(limits.Upper);

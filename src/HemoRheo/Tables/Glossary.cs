@@ -203,10 +203,12 @@ public static class Glossary
     /// <param name="name">Its name, exactly.</param>
     /// <exception cref="ArgumentException">There is no such column; the message names the nearest one.</exception>
     public static Column Column(string name) => All.FirstOrDefault(column => column.Name == name)
-        ?? throw new ArgumentException($"No column \"{name}\" in the glossary; the nearest one is \"{NearestWord.To(name, All.Select(column => column.Name))}\". A new column is added in Tables/Glossary.cs, with its meaning and unit.", nameof(name));
+        ?? throw new ArgumentException($"No column \"{name}\" in the glossary{Suggestion(name)}. A new column is added in Tables/Glossary.cs, with its meaning and unit.", nameof(name));
 
     /// <summary>The data dictionary of these columns: name, meaning, unit and UCUM code.</summary>
     /// <param name="columns">The columns, in order.</param>
     public static Table Describe(IEnumerable<Column> columns) => Table.Of("name", "meaning", "unit", "UCUM code")
         .WithRows(columns, column => [column.Header, column.Meaning, column.Unit?.Symbol, column.Unit?.Ucum]);
+
+    private static string Suggestion(string name) => Spelling.Nearest(name, All.Select(column => column.Name)) is { } nearest ? $"; the nearest one is \"{nearest}\"" : "";
 }

@@ -8,7 +8,7 @@ namespace HemoRheo.Tests.Architecture;
 public sealed class CultureTests
 {
     [Fact]
-    public void No_number_or_moment_is_written_by_the_culture_of_the_machine() => Assert.Empty(Sources.Files.SelectMany(tree => Wrong(tree, Sources.Compilation)));
+    public void No_number_or_moment_is_written_by_the_culture_of_the_machine() => Faults.None(Sources.Files.SelectMany(tree => Wrong(tree, Sources.Compilation)));
 
     [Theory]
     [InlineData("$\"{1.5}\"", true)]

@@ -26,7 +26,7 @@ internal static class Rooms
         new("Samples", [.. Floor, "Studies", "Exports", "Rheometry", "FlowLaws", "Fitting", "Calibration", "Screening", "Derived", "Pooling", "Hematocrit"], "statistics across samples"),
         new("ReferenceRanges", [.. Floor, "Studies", "Exports", "Calibration", "Derived", "Pooling", "Samples"], "drawing"),
         new("Cohorts", [.. Floor, "Studies", "Exports", "Calibration", "Derived", "Pooling", "Samples", "ReferenceRanges"], "drawing"),
-        new("Ledger", [.. Floor, "Studies", "Exports", "Calibration", "Derived", "Pooling", "Samples", "ReferenceRanges", "Cohorts"], "changing a result"),
+        new("Ledger", [.. Floor, "Studies", "Exports", "Rheometry", "FlowLaws", "Fitting", "Calibration", "Derived", "Pooling", "Samples", "ReferenceRanges", "Cohorts"], "changing a result"),
     ];
 
     /// <summary>The table as DEVELOPERS.md prints it.</summary>
