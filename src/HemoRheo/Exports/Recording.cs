@@ -21,6 +21,9 @@ public sealed record Recording(
     Items<Reading> Readings,
     Where Where)
 {
+    /// <summary>What is wrong with it or with single readings of it. A fault here sets the recording aside from decisions until a person has acted; its readings stay.</summary>
+    public Items<Finding> Findings { get; init; } = Items<Finding>.None;
+
     /// <summary>The local date of the recording.</summary>
     public DateOnly Day => DateOnly.FromDateTime(StartedAt.DateTime);
 }

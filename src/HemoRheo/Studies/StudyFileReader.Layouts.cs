@@ -48,6 +48,8 @@ internal sealed partial class StudyFileReader
             section.Refuse("time_format", layout.TimeFormat.Length == 0 ? "started_at without \"time_format\"" : $"a time format without offset, \"{layout.TimeFormat}\"", "a format with zzz", "times without an offset are refused: the hour when clocks go back happens twice; have the instrument export the offset, or give started_at in the samples table");
         if (Has(FieldMeaning.Ramp) && layout.UpWords.Count + layout.DownWords.Count == 0)
             section.Refuse("columns", "a ramp field without words for it", "up_words and down_words", "add the words that the export uses");
+        foreach (var twice in fields.GroupBy(field => field.Meaning).Where(same => same.Count() > 1))
+            section.Refuse("keys", $"{twice.Key.Word()} as a column and as a key", "one of the two", "remove one");
         if (Has(FieldMeaning.ReadingCount) && !blocks) section.Refuse("columns", "reading_count in rows", "only as a key of blocks", "remove it");
     }
 

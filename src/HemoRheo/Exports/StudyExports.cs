@@ -1,0 +1,61 @@
+namespace HemoRheo;
+
+/// <summary>Reading what a study names.</summary>
+public static class StudyExports
+{
+    /// <summary>
+    /// Reads every export and table of a study. Nothing is guessed, repaired or dropped: what cannot be used is a finding with file, line and column,
+    /// and a file that cannot be read is one too.
+    /// </summary>
+    /// <param name="study">An opened study.</param>
+    public static StudyReadings ReadExports(this Study study)
+    {
+        var loose = new List<Finding>();
+        var tables = StudyTables.Read(study);
+        var blood = ExportFolder.Find(study, study.Files.Exports, loose);
+        var checks = ExportFolder.Find(study, study.Files.Checks, loose);
+        var both = blood.Intersect(checks).ToHashSet();
+        List<FileReading> files =
+        [
+            .. blood.Except(both).Select(path => FileReader.Read(study, path, RecordingKind.Blood)),
+            .. checks.Except(both).Select(path => FileReader.Read(study, path, RecordingKind.Check)),
+            .. both.Select(path => InBoth(study, path)),
+        ];
+        var recordings = new RecordingJoin(study, tables).Complete(files);
+        loose.AddRange(Unmatched(study, tables, files));
+        var shown = files.Concat(tables.Files).Select(file => file.AsFile()).OrderBy(file => file.Path, StringComparer.Ordinal).ToItems();
+        return new(
+            study,
+            shown,
+            recordings.Where(recording => recording.Kind == RecordingKind.Blood).OrderBy(recording => recording.Sample, StringComparer.Ordinal).ThenBy(recording => recording.Loading).ToItems(),
+            recordings.Where(recording => recording.Kind == RecordingKind.Check).OrderBy(recording => recording.StartedAt).ThenBy(recording => recording.Sample, StringComparer.Ordinal).ToItems(),
+            tables.Samples.Select(row => row.Record).OrderBy(record => record.Sample, StringComparer.Ordinal).ToItems(),
+            tables.People.OrderBy(person => person.Id, StringComparer.Ordinal).ToItems(),
+            shown.SelectMany(file => file.Findings).Concat(loose).ToItems());
+    }
+
+    private static FileReading InBoth(Study study, string path)
+    {
+        var findings = new FileFindings(FolderPath.Shown(study.Folder, path));
+        findings.Refuse(ExportFindings.FileInBothLists, null, null, "Found this file among the exports of blood and among the checks, expected it in one of the two.");
+        return FileReader.Opened(path, findings.File, "utf-8", null, findings, _ => []);
+    }
+
+    private static IEnumerable<Finding> Unmatched(Study study, StudyTables tables, List<FileReading> files)
+    {
+        var drafts = files.SelectMany(file => file.Drafts).ToList();
+        var blood = drafts.Where(draft => draft.Kind == RecordingKind.Blood).Select(draft => draft.Sample).ToHashSet();
+        var checks = drafts.Where(draft => draft.Kind == RecordingKind.Check).Select(draft => draft.Sample).ToHashSet();
+        var people = tables.People.Select(person => person.Id).ToHashSet();
+        var measured = tables.Samples.Select(row => row.Record.Person).ToHashSet();
+        foreach (var row in tables.Samples.Where(row => !blood.Contains(row.Record.Sample)))
+            yield return ExportFindings.SampleWithoutRecording.At(row.Record.Where, "Found no recording of this sample in the exports.");
+        foreach (var row in tables.Checks.Where(row => !checks.Contains(row.Check)))
+            yield return ExportFindings.CheckWithoutRecording.At(row.Where, "Found no recording of this check in the exports.");
+        if (study.Files.People is null) yield break;
+        foreach (var row in tables.Samples.Where(row => !people.Contains(row.Record.Person)))
+            yield return ExportFindings.PersonNotInTable.At(row.Record.Where, $"Found no usable row of the people table {study.Files.People} for this sample's person.");
+        foreach (var person in tables.People.Where(person => !measured.Contains(person.Id)))
+            yield return ExportFindings.PersonWithoutSample.At(person.Where, "Found no sample of this person.");
+    }
+}
