@@ -62,7 +62,7 @@ internal sealed class SectionReader
     {
         var key = Key(name);
         if (Table.Find(name) is { } entry) return entry.Node;
-        if (key.Default is not null) return TomlTree.Read($"default = {key.Default}", _faults)!.Find("default")!.Node;
+        if (key.Default is not null) return TomlTree.Read($"default = {key.Default}", new StudyFileFaults("default"))!.Find("default")!.Node;
         if (key.Required) _faults.Add(Table, $"no \"{name}\"{(Section.Length == 0 ? "" : $" in {Section}")}", $"{name} = {key.Example}", $"add it: {key.Meaning}");
         return null;
     }

@@ -21,6 +21,18 @@ public sealed class StudyTemplateTests
     }
 
     [Fact]
+    public void Tells_which_files_are_missing_before_they_are_there()
+    {
+        using var folder = StudyFolder.Empty();
+        folder.Write("study.toml", Study.Template());
+
+        var refusal = Assert.Throws<StudyFileException>(() => Study.Open(folder.PathOf("study.toml")));
+
+        Assert.All(refusal.Faults, fault => Assert.Equal("study.toml", fault.File));
+        Assert.Contains(refusal.Faults, fault => fault.Found.Contains("exports", StringComparison.Ordinal));
+    }
+
+    [Fact]
     public void Shows_every_key_a_study_file_may_have()
     {
         foreach (var key in StudyFileKeys.All.Where(key => key.Kind != StudyFileKeyKind.Field))
