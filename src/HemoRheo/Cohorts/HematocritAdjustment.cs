@@ -32,10 +32,11 @@ internal static class HematocritAdjustment
         var groups = $"{second.Group.Label} and {first.Group.Label}";
         var estimate = $"people of {groups}, adjusted, {question.Name}";
         var shared = (Value.Mean(second.People.Values) - Value.Mean(first.People.Values)).Only(source => source.Shared).Parts;
-        var counters = first.People.CounterShares.Keys.Union(second.People.CounterShares.Keys)
-            .Select(counter => (counter, Distance: second.People.CounterShares.GetValueOrDefault(counter) - first.People.CounterShares.GetValueOrDefault(counter)))
-            .Where(one => Math.Abs(one.Distance) > 1e-12)
-            .Select(one => new Contribution(new(SourceKind.Counter, one.counter.Name), -adjusted.Slope * one.Distance * one.counter.SharedUncertainty));
+        var counters = second.People.CounterShares
+            .Concat(first.People.CounterShares.Select(share => share with { Share = -share.Share }))
+            .GroupBy(share => share.Counter, share => share.Share)
+            .Where(counter => Math.Abs(counter.Sum()) > 1e-12)
+            .Select(counter => new Contribution(new(SourceKind.Counter, counter.Key.Name), -adjusted.Slope * counter.Sum() * counter.Key.SharedUncertainty));
         return new(adjusted.Difference,
         [
             .. shared,

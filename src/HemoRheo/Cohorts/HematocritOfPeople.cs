@@ -6,7 +6,7 @@ namespace HemoRheo;
 /// <param name="Variance">Mean variance of a person's hematocrit, shared parts left out.</param>
 /// <param name="CounterShares">By counter, the share of the group's mean hematocrit that it measured.</param>
 /// <param name="Without">People with a value whose hematocrit or its error is not known.</param>
-internal sealed record HematocritOfPeople(Items<Value> Values, Items<double> Hematocrits, double Variance, IReadOnlyDictionary<Counter, double> CounterShares, int Without)
+internal sealed record HematocritOfPeople(Items<Value> Values, Items<double> Hematocrits, double Variance, Items<CounterShare> CounterShares, int Without)
 {
     internal static HematocritOfPeople Of(Study study, Question question, GroupValues group)
     {
@@ -28,7 +28,7 @@ internal sealed record HematocritOfPeople(Items<Value> Values, Items<double> Hem
             values.ToItems(),
             hematocrits.ToItems(),
             variances.DefaultIfEmpty(0).Average(),
-            shares.ToDictionary(share => share.Key, share => share.Value / values.Count),
+            shares.Select(share => new CounterShare(share.Key, share.Value / values.Count)).ToItems(),
             group.People.Count - values.Count);
     }
 

@@ -1,0 +1,7 @@
+namespace HemoRheo.Tests;
+
+/// <summary>A measurand that only one law has, on its own scale.</summary>
+internal sealed record InventedIndex() : Measurand("invented index", "I", ShownUnits.One, false)
+{
+    public override string ToString() => Name;
+}
