@@ -39,6 +39,8 @@ internal static class BuiltCohort
         Readings = analyzed.Readings with { People = analyzed.Readings.People.With([Person(sample.Record!.Person, group)]) },
     };
 
+    internal static StudyResult Judged(this AnalyzedStudy analyzed) => analyzed.Judge(null, TestContext.Current.CancellationToken);
+
     /// <summary>This many logs of viscosities, evenly spread over a normal distribution about ln(6 mPa.s) with standard deviation 0.1.</summary>
     internal static IEnumerable<double> Spread(int count) =>
         Enumerable.Range(0, count).Select(i => -5.1 + 0.1 * MathNet.Numerics.Distributions.Normal.InvCDF(0, 1, (i + 0.5) / count));

@@ -80,7 +80,7 @@ public sealed class JudgedValueTests
     public void A_sample_of_an_instrument_in_doubt_is_judged_but_marked()
     {
         var analyzed = BuiltCohort.Controls(BuiltCohort.Spread(20)).With(BuiltCohort.Sample("S-p", "p1", BuiltCohort.Value(-4)) with { Status = InstrumentStatus.Failed });
-        var judged = analyzed.Judge()["S-p"].Values[0];
+        var judged = analyzed.Judged()["S-p"].Values[0];
         Assert.True(judged.Marked);
         Assert.Equal(Outcome.Above, judged.Verdict!.Outcome);
     }
@@ -90,7 +90,7 @@ public sealed class JudgedValueTests
     {
         var analyzed = BuiltCohort.Controls(BuiltCohort.Spread(20));
         var strict = analyzed with { Study = analyzed.Study with { Analysis = analyzed.Study.Analysis with { Level = 0.999 } } };
-        Assert.All(strict.Judge().Samples, sample => Assert.Equal(0.999, sample.Values[0].Verdict!.Level));
+        Assert.All(strict.Judged().Samples, sample => Assert.Equal(0.999, sample.Values[0].Verdict!.Level));
     }
 
     [Fact]
@@ -104,7 +104,7 @@ public sealed class JudgedValueTests
             Pool = analyzed.Pool with { Findings = [Named("pool")], Scatter = [new("Casson", [], [], 3, [Named("scatter"), Named("pool")])] },
             Samples = analyzed.Samples.Select((sample, i) => i == 0 ? sample with { Findings = [Named("sample")] } : sample).ToItems(),
         };
-        Assert.Equal(["files", "pool", "scatter", "sample"], analyzed.Judge().Findings.SkipLast(1).Select(finding => finding.Message));
-        Assert.Equal(RangeFindings.TooFewControls, analyzed.Judge().Findings[^1].Kind);
+        Assert.Equal(["files", "pool", "scatter", "sample"], analyzed.Judged().Findings.SkipLast(1).Select(finding => finding.Message));
+        Assert.Equal(RangeFindings.TooFewControls, analyzed.Judged().Findings[^1].Kind);
     }
 }

@@ -7,7 +7,7 @@ public sealed class ReferenceRangeTests
     public void Twenty_controls_make_a_range_on_the_logarithm_with_percentiles_said()
     {
         var logs = BuiltCohort.Spread(20).ToArray();
-        var range = Assert.Single(BuiltCohort.Controls(logs).Judge().Ranges);
+        var range = Assert.Single(BuiltCohort.Controls(logs).Judged().Ranges);
         Assert.Equal(RobustLimits.Of(logs).Limits, range.Limits);
         Assert.Equal(BuiltCohort.At10, range.Measurand);
         Assert.Equal("Casson", range.Law);
@@ -21,7 +21,7 @@ public sealed class ReferenceRangeTests
     [Fact]
     public void Nineteen_controls_are_refused_with_a_reason_and_nothing_is_judged()
     {
-        var result = BuiltCohort.Controls(BuiltCohort.Spread(19)).Judge();
+        var result = BuiltCohort.Controls(BuiltCohort.Spread(19)).Judged();
         Assert.Empty(result.Ranges);
         var finding = Assert.Single(result.Findings, finding => finding.Kind == RangeFindings.TooFewControls);
         Assert.Equal((19, 20), (finding.Observed, finding.Limit));
@@ -37,7 +37,7 @@ public sealed class ReferenceRangeTests
     {
         var declared = new DeclaredLimits(new(10), false, Viscosity.FromMillipascalSeconds(5), Viscosity.FromMillipascalSeconds(7), "an invented paper");
         var analyzed = BuiltCohort.Controls(BuiltCohort.Spread(19));
-        var result = (analyzed with { Study = analyzed.Study with { Reference = new(true, [declared]) } }).Judge();
+        var result = (analyzed with { Study = analyzed.Study with { Reference = new(true, [declared]) } }).Judged();
         var range = Assert.Single(result.Ranges);
         Assert.Equal("an invented paper", range.Source);
         Assert.Equal(0, range.Used);
@@ -53,7 +53,7 @@ public sealed class ReferenceRangeTests
         var declared = new DeclaredLimits(new(10), false, Viscosity.FromMillipascalSeconds(5), Viscosity.FromMillipascalSeconds(7), "an invented paper");
         var unused = declared with { Rate = new(3) };
         var analyzed = BuiltCohort.Controls(BuiltCohort.Spread(30));
-        var result = (analyzed with { Study = analyzed.Study with { Reference = new(false, [declared, unused]) } }).Judge();
+        var result = (analyzed with { Study = analyzed.Study with { Reference = new(false, [declared, unused]) } }).Judged();
         Assert.Null(Assert.Single(result.Ranges).Law);
         Assert.Contains("3 1/s", Assert.Single(result.Findings).Message, StringComparison.Ordinal);
     }
@@ -64,7 +64,7 @@ public sealed class ReferenceRangeTests
         var logs = BuiltCohort.Spread(20).ToArray();
         var again = BuiltCohort.Sample("S-again", "c1", BuiltCohort.Value(logs[0] + 0.2));
         var analyzed = BuiltCohort.Controls(logs);
-        var range = Assert.Single((analyzed with { Samples = analyzed.Samples.With([again]) }).Judge().Ranges);
+        var range = Assert.Single((analyzed with { Samples = analyzed.Samples.With([again]) }).Judged().Ranges);
         Assert.Equal(20, range.Used);
         logs[0] += 0.1;
         Assert.Equal(RobustLimits.Of(logs).Limits.Lower, range.Limits.Lower, 1e-12);
@@ -81,7 +81,7 @@ public sealed class ReferenceRangeTests
             .With(BuiltCohort.Sample("S-e", "e"), "c")
             .With(BuiltCohort.Sample("S-p", "p1", BuiltCohort.Value(-3)), "p");
         analyzed = analyzed with { Readings = analyzed.Readings with { People = analyzed.Readings.People.With([BuiltCohort.Person("nobody", "c")]) } };
-        var range = Assert.Single(analyzed.Judge().Ranges);
+        var range = Assert.Single(analyzed.Judged().Ranges);
         Assert.Equal(20, range.Used);
         Assert.Equal(
             [new("instrument-not-in-order", 2), new("person-without-sample", 1), new("value-missing", 1), new CountedReason("value-not-decidable", 1)],
@@ -93,7 +93,7 @@ public sealed class ReferenceRangeTests
     {
         var analyzed = BuiltCohort.Controls(BuiltCohort.Spread(20));
         var later = analyzed.Samples.Select((sample, i) => i < 5 ? sample with { Values = [BuiltCohort.Value(sample.Values[0].Value.X, BuiltCohort.Calibration(-0.02, "R1/2"), BuiltCohort.Fit(0.02, sample.Sample))] } : sample);
-        var range = Assert.Single((analyzed with { Samples = later.ToItems() }).Judge().Ranges);
+        var range = Assert.Single((analyzed with { Samples = later.ToItems() }).Judged().Ranges);
         Assert.Equal(2, range.Shared.Count);
         Assert.Equal(-0.01 * 15 / 20, range.Shared.Single(part => part.Source.Of == "R1/1").Amount, 1e-15);
         Assert.Equal(-0.02 * 5 / 20, range.Shared.Single(part => part.Source.Of == "R1/2").Amount, 1e-15);
@@ -107,7 +107,7 @@ public sealed class ReferenceRangeTests
         {
             Values = sample.Values.With([new(new InventedIndex(), "Quemada", HematocritBasis.Native, new(Math.Sin(i), []), null, true, []), sample.Values[0] with { Law = "Quemada" }]),
         });
-        var result = (analyzed with { Samples = index.ToItems() }).Judge();
+        var result = (analyzed with { Samples = index.ToItems() }).Judged();
         Assert.Equal([("viscosity at 10 1/s", "Casson"), ("invented index", "Quemada")], result.Ranges.Select(range => (range.Measurand.Name, range.Law!)));
         Assert.DoesNotContain("logarithm", result.Ranges[1].Method, StringComparison.Ordinal);
         Assert.Contains("decides by Casson", result.Samples[0].Values[2].WhyNotJudged!, StringComparison.Ordinal);
@@ -121,7 +121,7 @@ public sealed class ReferenceRangeTests
         {
             Values = sample.Values.With([sample.Values[0] with { Basis = HematocritBasis.StandardByPlasma }, sample.Values[0] with { Basis = HematocritBasis.StandardBySlope }]),
         });
-        var result = (analyzed with { Samples = both.ToItems() }).Judge();
+        var result = (analyzed with { Samples = both.ToItems() }).Judged();
         Assert.Equal([HematocritBasis.Native, HematocritBasis.StandardByPlasma], result.Ranges.Select(range => range.Basis));
         Assert.Contains("PlasmaPower", result.Samples[0].Values[2].WhyNotJudged!, StringComparison.Ordinal);
     }
@@ -129,7 +129,7 @@ public sealed class ReferenceRangeTests
     [Fact]
     public void Controls_of_one_and_the_same_value_are_refused()
     {
-        var result = BuiltCohort.Controls(Enumerable.Repeat(-5.0, 30)).Judge();
+        var result = BuiltCohort.Controls(Enumerable.Repeat(-5.0, 30)).Judged();
         Assert.Empty(result.Ranges);
         Assert.Contains(result.Findings, finding => finding.Kind == RangeFindings.ControlsWithoutSpread);
     }
@@ -138,6 +138,6 @@ public sealed class ReferenceRangeTests
     public void Two_runs_give_the_same_bits()
     {
         var analyzed = BuiltCohort.Controls(BuiltCohort.Spread(25));
-        Assert.Equal(analyzed.Judge(), analyzed.Judge());
+        Assert.Equal(analyzed.Judged(), analyzed.Judged());
     }
 }

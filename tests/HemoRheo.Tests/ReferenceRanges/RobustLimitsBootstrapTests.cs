@@ -34,7 +34,6 @@ public sealed class RobustLimitsBootstrapTests
     [Theory]
     [InlineData(20)]
     [InlineData(48)]
-    [InlineData(120)]
     public void The_90_percent_intervals_hold_the_true_limits(int people)
     {
         const int sets = 200;
