@@ -1,0 +1,34 @@
+using static System.FormattableString;
+
+namespace HemoRheo;
+
+/// <summary>
+/// Signed contributions to a check's ln(measured/expected), each the change when its input is raised by one standard uncertainty:
+/// certified value -U/k; the fluid's temperature coefficient +(T - certificate's) u; thermometer +coefficient u; torque zero; fit.
+/// </summary>
+internal static class CheckBudget
+{
+    internal static IEnumerable<Contribution> Of(Instrument instrument, Recording recording, CalibrationFluid fluid, Temperature temperature, FittedLaw fit)
+    {
+        yield return new(new(SourceKind.Certificate, fluid.Lot), -fluid.RelativeExpandedUncertainty / fluid.CoverageFactor);
+        if (!fluid.IsWater)
+        {
+            yield return new(new(SourceKind.FluidBeta, fluid.Name), (temperature.DegreesCelsius - fluid.At.DegreesCelsius) * fluid.PerKelvinUncertainty);
+        }
+
+        yield return new(new(SourceKind.Thermometer, instrument.Name), fluid.PerKelvinAt(temperature) * instrument.Thermometer);
+        if (fit.Curve.StressPerTorque is { } stressPerTorque && instrument.TorqueZero > 0)
+        {
+            yield return new(new(SourceKind.TorqueZero, DayOf(instrument, recording.Day)), fit.StressResponse[0] * stressPerTorque * instrument.TorqueZero);
+        }
+
+        var filling = Invariant($"{recording.Sample}/{recording.Loading}");
+        var size = Math.Sqrt(fit.Covariance[0]);
+        yield return fit.Errors.ScaleKnown
+            ? new(new(SourceKind.Fit, filling + "/0"), size)
+            : new(new(SourceKind.Fit, filling + "/0"), size, "fit of " + filling, fit.Fit.DegreesOfFreedom);
+    }
+
+    /// <summary>An instrument's day as sources name it.</summary>
+    internal static string DayOf(Instrument instrument, DateOnly day) => Invariant($"{instrument.Name}/{day:yyyy-MM-dd}");
+}

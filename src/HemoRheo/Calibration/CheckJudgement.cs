@@ -1,0 +1,41 @@
+using static System.FormattableString;
+
+namespace HemoRheo;
+
+/// <summary>Holds a check's error against its limit.</summary>
+internal static class CheckJudgement
+{
+    /// <summary>The check with its outcome: it passes or fails where that is at least as probable as the level, else it cannot tell.</summary>
+    internal static InstrumentCheck Judged(this InstrumentCheck check, double level)
+    {
+        var verdict = Verdict.Of(check.Error, new(Math.Log(1 - check.Limit), Math.Log(1 + check.Limit)), level);
+        var outcome = verdict.Outcome switch
+        {
+            Outcome.Within => CheckOutcome.Passes,
+            Outcome.Below or Outcome.Above => CheckOutcome.Fails,
+            _ => CheckOutcome.CannotTell,
+        };
+        return check with { Outcome = outcome, ProbabilityWithin = verdict.Within };
+    }
+
+    /// <summary>The check judged again with the scatter of checks in its budget, and the finding of its outcome.</summary>
+    internal static InstrumentCheck Settled(this InstrumentCheck check, Instrument instrument, CheckScatter? scatter, double level)
+    {
+        var error = scatter is null ? check.Error : check.Error.With(scatter.As(SourceKind.Day, CheckBudget.DayOf(instrument, check.Day)));
+        var settled = (check with { Error = error }).Judged(level);
+        return settled with { Findings = settled.Findings.With(settled.OutcomeFindings()) };
+    }
+
+    private static IEnumerable<Finding> OutcomeFindings(this InstrumentCheck check)
+    {
+        if (check.Outcome == CheckOutcome.Passes) yield break;
+        var kind = check.Outcome == CheckOutcome.Fails ? CalibrationFindings.CheckFailed : CalibrationFindings.CheckCannotTell;
+        var interval = check.Error.Interval().Select(Math.Exp);
+        var percent = 100 * (Math.Exp(check.Error.X) - 1);
+        yield return kind.At(
+            check.Fit.Curve.Label.Where,
+            Invariant($"Check '{check.Name}' of {check.Day:yyyy-MM-dd} is off by {percent:+0.00;-0.00} % (95 % interval {100 * (interval.Lower - 1):+0.00;-0.00} to {100 * (interval.Upper - 1):+0.00;-0.00} %); {100 * check.Limit:G3} % is allowed, probability within {check.ProbabilityWithin:F3}."),
+            percent,
+            100 * check.Limit);
+    }
+}
