@@ -53,7 +53,7 @@ public sealed partial class FindingKindTests
         from tree in Sources.Files
         from made in tree.GetRoot().DescendantNodes().OfType<BaseObjectCreationExpressionSyntax>()
         let type = Sources.Compilation.GetSemanticModel(tree).GetTypeInfo((ExpressionSyntax)made).Type
-        where type?.Name == nameof(FindingKind) && !made.Ancestors().OfType<PropertyDeclarationSyntax>().Any()
+        where type?.Name == nameof(FindingKind) && !made.Ancestors().OfType<ClassDeclarationSyntax>().Any(home => home.Identifier.Text.EndsWith("Findings", StringComparison.Ordinal))
         select Sources.Place(made));
 
     private static FindingKind Kind(PropertyInfo property) => (FindingKind)property.GetValue(null)!;
