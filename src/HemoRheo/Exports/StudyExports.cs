@@ -56,6 +56,6 @@ public static class StudyExports
         foreach (var row in tables.Samples.Where(row => !people.Contains(row.Record.Person)))
             yield return ExportFindings.PersonNotInTable.At(row.Record.Where, $"Found no usable row of the people table {study.Files.People} for this sample's person.");
         foreach (var person in tables.People.Where(person => !measured.Contains(person.Id)))
-            yield return ExportFindings.PersonWithoutSample.At(person.Where, "Found no sample of this person.");
+            yield return ExportFindings.PersonNotMeasured.At(person.Where, "Found no sample of this person.");
     }
 }
