@@ -31,7 +31,7 @@ internal static class FitReport
 
         if (solution.Held is { } held)
         {
-            findings.Add(FittingFindings.Boundary.At(where, $"{law.Name} at its boundary, {law.Parameters[held].Name} = {law.Parameters[held].Lower}: {law.Boundary!.Law} describes this curve."));
+            findings.Add(FittingFindings.Boundary.At(where, FormattableString.Invariant($"{law.Name} at its boundary, {law.Parameters[held].Name} = {law.Parameters[held].Lower}: {law.Boundary!.Law} describes this curve.")));
         }
 
         if (!errors.ScaleKnown && degrees == 0)

@@ -24,13 +24,6 @@ public static class RangeFindings
         "A failed or overdue check.",
         "Check the instrument, then measure again where blood is left.");
 
-    /// <summary>The person has no sample.</summary>
-    public static FindingKind PersonWithoutSample { get; } = new(
-        "person-without-sample", Severity.Note,
-        "The person stands in the people table, but no sample of that person was measured.",
-        "The sample was lost, or its export file could not be read.",
-        "See the findings of the files.");
-
     /// <summary>There are too few controls for reference limits.</summary>
     public static FindingKind TooFewControls { get; } = new(
         "too-few-controls", Severity.Warning,

@@ -33,9 +33,9 @@ public sealed class FileTests
         foreach (var path in Files.Where(path => Path.GetFileName(path) is not ("Program.cs" or "AssemblyAttributes.cs" or "GlobalUsings.cs")))
         {
             var types = Declared(path).Select(Name).ToArray();
-            var file = Path.GetFileNameWithoutExtension(path).Split('.')[0];
-            // The words that make or show a generic type may have its name: Items and Items<T>. The file of one of them is named <Name>Words or <Name>Of.
-            var fits = types.Length == 1 && (types[0] == file || types[0] + "Words" == file || types[0] + "Of" == file);
+            var file = Path.GetFileNameWithoutExtension(path).Split('.', '{')[0];
+            // Items and Items<T> have one name and two files: the words that make an Items<T> lie in ItemsWords.cs.
+            var fits = types.Length == 1 && (types[0] == file || types[0] + "Words" == file);
             if (!fits) wrong.Add($"{Sources.Short(path)} declares {(types.Length == 0 ? "no type" : string.Join(", ", types))}");
         }
 
