@@ -1,1 +1,20 @@
-return 0;
+using HemoRheo.Benchmarks;
+
+return args switch
+{
+    ["coverage", var studies] => Coverage(int.Parse(studies, System.Globalization.CultureInfo.InvariantCulture)),
+    _ => Usage(),
+};
+
+static int Coverage(int studies)
+{
+    Console.WriteLine($"{studies} simulated studies; per cent of 95 % intervals that hold the truth, by what is left out of the budget");
+    Console.WriteLine(CoverageRun.Run(studies).ToText());
+    return 0;
+}
+
+static int Usage()
+{
+    Console.WriteLine("coverage N   coverage of 95 % intervals over N simulated studies, written, read and analyzed through the public API");
+    return 2;
+}

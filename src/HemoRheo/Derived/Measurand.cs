@@ -7,6 +7,18 @@ namespace HemoRheo;
 /// <param name="Logarithmic">Whether its working scale is the natural logarithm of its SI number, or the SI number itself.</param>
 public abstract record Measurand(string Name, string Symbol, Unit Shown, bool Logarithmic)
 {
+    /// <summary>The Casson yield stress: an extrapolation to zero rate.</summary>
+    public static Measurand CassonYieldStress { get; } = new LawNumber("Casson yield stress", "τ_y", ShownUnits.Millipascal, "Casson", 0);
+
+    /// <summary>The Casson viscosity: the limit at high rates.</summary>
+    public static Measurand CassonViscosity { get; } = new LawNumber("Casson viscosity", "η_c", ShownUnits.MillipascalSecond, "Casson", 1);
+
+    /// <summary>Apparent viscosity at a shear rate.</summary>
+    public static Measurand Viscosity(ShearRate at) => new ViscosityAtRate(at);
+
+    /// <summary>Viscosity at a shear rate relative to the plasma of the same sample.</summary>
+    public static Measurand RelativeViscosity(ShearRate at) => new RelativeViscosityAtRate(at);
+
     /// <summary>From the working scale to the SI number.</summary>
     public double ToSi(double working) => Logarithmic ? Math.Exp(working) : working;
 
@@ -15,6 +27,9 @@ public abstract record Measurand(string Name, string Symbol, Unit Shown, bool Lo
 
     /// <summary>From the working scale to the number in the shown unit.</summary>
     public double ToShown(double working) => Shown.FromSi(ToSi(working));
+
+    /// <summary>The measurand of one fit, with its gradient; null where it does not come from a fit of this law alone.</summary>
+    internal abstract FitValue? From(FittedLaw fit);
 
     /// <inheritdoc/>
     public override string ToString() => Name;

@@ -8,6 +8,16 @@ public sealed record ViscosityAtRate(ShearRate Rate) : Measurand(
     ShownUnits.MillipascalSecond,
     true)
 {
+    internal override FitValue? From(FittedLaw fit)
+    {
+        Span<double> slopes = stackalloc double[fit.Scaled.Count];
+        var rate = Rate.ReciprocalSeconds;
+        var stress = fit.Law.StressAt(rate, fit.Scaled.Span, slopes);
+        var gradient = new double[slopes.Length];
+        for (var i = 0; i < gradient.Length; i++) gradient[i] = slopes[i] / stress;
+        return new(Math.Log(stress / rate), gradient);
+    }
+
     /// <inheritdoc/>
     public override string ToString() => Name;
 }

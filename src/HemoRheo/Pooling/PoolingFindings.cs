@@ -1,0 +1,43 @@
+namespace HemoRheo;
+
+/// <summary>Findings about what the whole study tells.</summary>
+public static class PoolingFindings
+{
+    /// <summary>No sample has two loadings, so the declared scatter is used.</summary>
+    public static FindingKind LoadingDeclared { get; } = new(
+        "loading-scatter-declared", Severity.Warning,
+        "No sample was loaded twice; the scatter between loadings is the one the study file declares.",
+        "Every sample was measured once.",
+        "Load a tenth of the samples twice, at least ten of them.");
+
+    /// <summary>No sample has two loadings and nothing is declared.</summary>
+    public static FindingKind LoadingUnknown { get; } = new(
+        "loading-scatter-unknown", Severity.Fault,
+        "No sample was loaded twice and the study file declares no scatter between loadings, so the largest part of most budgets is missing.",
+        "Every sample was measured once.",
+        "Load some samples twice, or declare the scatter in the study file with its basis.");
+
+    /// <summary>The estimate of loading scatter is held at its floor.</summary>
+    public static FindingKind LoadingFloor { get; } = new(
+        "loading-scatter-at-floor", Severity.Note,
+        "Replicate loadings differ by little more than their fits' own errors; the loading part is held at a tenth of the replicate variance.",
+        "Few replicates, or loadings that repeat very well.",
+        "Nothing, or load more samples twice.",
+        "Simulated with the budget, this project");
+
+    /// <summary>The study's curves together contradict a law.</summary>
+    public static FindingKind LawDoesNotFit { get; } = new(
+        "law-does-not-fit", Severity.Fault,
+        "The study's curves together contradict this law.",
+        "Blood does not follow the law over these shear rates, or the declared error of readings is far too small.",
+        "Decide by a law that the evidence allows; compare the fitted values with those interpolated from the readings.",
+        "Pooled chi-square and mean residual pattern over the study");
+
+    /// <summary>Residuals are larger than declared, without a pattern.</summary>
+    public static FindingKind ScatterLargerThanDeclared { get; } = new(
+        "scatter-larger-than-declared", Severity.Warning,
+        "Residuals over the whole study are larger than the declared error of readings, without a common pattern.",
+        "The relative error or the floor in the study file is too small.",
+        "Measure the repeatability of readings and correct the study file.",
+        "Pooled chi-square over the study");
+}

@@ -1,0 +1,70 @@
+namespace HemoRheo;
+
+/// <summary>A measurand of one loading, corrected and moved to 37 degC, with every part of its budget but the scatter between loadings.</summary>
+internal static class LoadingValue
+{
+    /// <summary>The corrected value.</summary>
+    /// <param name="study">The study.</param>
+    /// <param name="loading">The loading.</param>
+    /// <param name="fit">The fit the measurand comes from.</param>
+    /// <param name="value">The measurand of that fit, logarithmic and proportional to stress.</param>
+    public static Value Of(Study study, LoadingResult loading, FittedLaw fit, FitValue value)
+    {
+        var terms = new List<(double, Value)> { (1, value.ToValue(fit)), (1, Shift(study, loading)) };
+        var response = value.StressResponse(fit) * (loading.Curve.StressPerTorque ?? 0) * TorqueZero(study, loading.Recording.Instrument);
+        if (response != 0) terms.Add((1, new(0, [new(new(SourceKind.TorqueZero, InstrumentDay(loading.Recording)), response)])));
+        return Value.Combine(terms);
+    }
+
+    /// <summary>What correction and temperature add to every log value of a loading.</summary>
+    public static Value Shift(Study study, LoadingResult loading)
+    {
+        var recording = loading.Recording;
+        var temperature = loading.Curve.MeanTemperature;
+        return Value.Combine([
+            (1, Corrected(study, loading.Standing, InstrumentDay(recording))),
+            (1, temperature is { } read ? ToBody(read, study.Blood.PerKelvin, Thermometer(study, recording.Instrument), recording.Instrument) : Value.Exact(0)),
+            (1, temperature is { } at ? BloodCoefficient(study, at) : Value.Exact(0))]);
+    }
+
+    /// <summary>Log plasma viscosity of a sample at 37 degC; null where it was not measured or its temperature is not stated.</summary>
+    public static Value? Plasma(Study study, SampleRecord record, DateTimeOffset measuredAt, IReadOnlyDictionary<string, InstrumentHistory> histories)
+    {
+        if (record.PlasmaViscosity is not { } viscosity || record.PlasmaTemperature is not { } temperature) return null;
+        var own = new Value(Math.Log(viscosity.PascalSeconds), [new(new(SourceKind.Plasma, record.Sample), study.Blood.PlasmaUncertainty)]);
+        if (record.PlasmaInstrument is { } name && histories.TryGetValue(name, out var history))
+        {
+            var at = record.PlasmaMeasuredAt ?? measuredAt;
+            var day = string.Create(System.Globalization.CultureInfo.InvariantCulture, $"{name}/{DateOnly.FromDateTime(at.DateTime):yyyy-MM-dd}");
+            return Value.Combine([
+                (1, own),
+                (1, Corrected(study, history.At(at), day)),
+                (1, ToBody(temperature, study.Blood.PlasmaPerKelvin, history.Instrument.Thermometer, name))]);
+        }
+
+        return own with { X = own.X + study.Blood.PlasmaPerKelvin * (temperature.DegreesCelsius - Temperature.Body.DegreesCelsius) };
+    }
+
+    private static Value Corrected(Study study, InstrumentStanding standing, string day)
+    {
+        if (standing.Period is not { } period) return Value.Exact(0);
+        var correction = -1 * period.Correction;
+        if (!study.Analysis.CorrectBias) correction = (correction with { X = 0 }).With(new(new(SourceKind.Bias, period.Key), -period.Correction.X));
+        return correction.With(new(new(SourceKind.Day, day), period.Scatter, period.ScatterEstimate, period.ScatterDegreesOfFreedom));
+    }
+
+    private static Value ToBody(Temperature read, double perKelvin, double thermometer, string instrument) => new(
+        perKelvin * (read.DegreesCelsius - Temperature.Body.DegreesCelsius),
+        [new(new(SourceKind.Thermometer, instrument), perKelvin * thermometer)]);
+
+    private static Value BloodCoefficient(Study study, Temperature read) => new(
+        0,
+        [new(new(SourceKind.BloodBeta, ""), (read.DegreesCelsius - Temperature.Body.DegreesCelsius) * study.Blood.PerKelvinUncertainty)]);
+
+    private static string InstrumentDay(Recording recording) =>
+        string.Create(System.Globalization.CultureInfo.InvariantCulture, $"{recording.Instrument}/{recording.Day:yyyy-MM-dd}");
+
+    private static double Thermometer(Study study, string instrument) => study.Instruments.FirstOrDefault(known => known.Name == instrument)?.Thermometer ?? 0;
+
+    private static double TorqueZero(Study study, string instrument) => study.Instruments.FirstOrDefault(known => known.Name == instrument)?.TorqueZero ?? 0;
+}

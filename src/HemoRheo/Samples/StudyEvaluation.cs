@@ -1,0 +1,95 @@
+namespace HemoRheo;
+
+/// <summary>Analyzes the samples of a study.</summary>
+public static class StudyEvaluation
+{
+    /// <summary>
+    /// Screens and fits every loading, pools what only the whole study tells, and gives each sample its values with their whole budgets. Nothing is judged yet.
+    /// </summary>
+    /// <param name="study">The study.</param>
+    /// <param name="readings">What was read for it.</param>
+    /// <param name="progress">Told how far it has come.</param>
+    /// <param name="cancel">Stops it between steps.</param>
+    public static AnalyzedStudy Evaluate(this Study study, StudyReadings readings, IProgress<AnalysisProgress>? progress = null, CancellationToken cancel = default)
+    {
+        progress?.Report(new("checking instruments", 0, readings.Checks.Count));
+        var histories = study.CheckInstruments(readings);
+        var byInstrument = histories.ToDictionary(history => history.Instrument.Name);
+        var records = readings.Samples.ToDictionary(record => record.Sample);
+        var loadings = StudyLoadings.Of(study, readings, records, byInstrument, progress, cancel);
+        var samples = loadings.GroupBy(loading => loading.Recording.Sample).OrderBy(sample => sample.Key, StringComparer.Ordinal).Select(sample => (Name: sample.Key, Loadings: sample.ToItems())).ToArray();
+
+        var laws = study.Analysis.Laws.Select(FlowLaw.Named).ToArray();
+        var evidence = laws.ToDictionary(law => law.Name, law => LawJudgment.Judge(law, [.. loadings.Select(loading => (Loading: loading, Fit: FitOf(loading, law))).Where(item => NativeValues.Sound(item.Loading, item.Fit)).Select(item => item.Fit)]));
+        var sets = laws.SelectMany(law => MeasurandSet.Of(study, law).Select(measurands => new MeasurandSet(law, measurands, Scatter(study, law, measurands, samples.Select(sample => sample.Loadings))))).ToArray();
+
+        var native = samples.ToDictionary(sample => sample.Name, sample => sets.SelectMany(set => NativeValues.Of(study, sample.Name, sample.Loadings, set, evidence[set.Law.Name])).ToArray());
+        cancel.ThrowIfCancellationRequested();
+        var slopes = Slopes(study, readings, records, samples.Select(sample => (sample.Name, sample.Loadings)), native).ToItems();
+
+        var results = new List<SampleResult>();
+        foreach (var (name, own) in samples)
+        {
+            cancel.ThrowIfCancellationRequested();
+            results.Add(Result(study, name, own, records.GetValueOrDefault(name), native[name], slopes, byInstrument));
+            progress?.Report(new("budgets", results.Count, samples.Length));
+        }
+
+        var pool = new StudyPool(sets.Select(set => set.Scatter).ToItems(), laws.Select(law => evidence[law.Name]).ToItems(), slopes, PoolFindings(study, sets, evidence.Values).ToItems());
+        return new(study, readings, histories, pool, results.ToItems());
+    }
+
+    private static SampleResult Result(Study study, string name, Items<LoadingResult> loadings, SampleRecord? record, SampleValue[] native, Items<HematocritSlope> slopes, IReadOnlyDictionary<string, InstrumentHistory> histories)
+    {
+        var plasma = record is null ? null : LoadingValue.Plasma(study, record, loadings[0].Recording.StartedAt, histories);
+        var values = native.Concat(StandardValues.Of(study, record, native, plasma, slopes)).ToItems();
+        var where = new Where(Sample: name);
+        var own = new List<Finding>();
+        if (record is null) own.Add(SampleFindings.NoRecord.At(where, "The samples table has no such row."));
+        if (record is { Hematocrit: null }) own.Add(SampleFindings.NoHematocrit.At(record.Where with { Sample = name }, "There is no usable hematocrit."));
+        if (record is not null && plasma is null) own.Add(SampleFindings.NoPlasma.At(record.Where with { Sample = name }, "There is no usable plasma viscosity with its temperature."));
+        if (values.All(value => value.Law != study.Analysis.DecideBy)) own.Add(SampleFindings.NoUsableFit.At(where, $"No loading has a usable fit of {study.Analysis.DecideBy}."));
+        var findings = own.Concat(loadings.SelectMany(loading => loading.Findings)).Concat(values.SelectMany(value => value.Findings).Where(finding => finding.Kind != SampleFindings.ShownBeside)).Distinct().ToItems();
+        return new(name, record, loadings, values, loadings.Max(loading => loading.Standing.Status), findings);
+    }
+
+    private static LoadingScatter Scatter(Study study, FlowLaw law, Items<Measurand> measurands, IEnumerable<Items<LoadingResult>> samples)
+    {
+        var replicates = samples
+            .Select(loadings => loadings.Where(loading => NativeValues.Sound(loading, FitOf(loading, law)))
+                .Select(loading => (Set: FitValueSet.Of(FitOf(loading, law), measurands), Shift: LoadingValue.Shift(study, loading).X))
+                .Where(item => item.Set is not null).Select(item => item.Set!.ShiftedBy(item.Shift)).ToArray())
+            .Where(sets => sets.Length > 1).ToArray();
+        return LoadingPool.Pool(law.Name, measurands, replicates, study.Errors.DeclaredLoading);
+    }
+
+    private static IEnumerable<HematocritSlope> Slopes(
+        Study study, StudyReadings readings, IReadOnlyDictionary<string, SampleRecord> records,
+        IEnumerable<(string Name, Items<LoadingResult> Loadings)> samples, IReadOnlyDictionary<string, SampleValue[]> native)
+    {
+        var strata = readings.People.ToDictionary(person => person.Id, person => person.GroupCode);
+        var inOrder = samples.Where(sample => sample.Loadings.All(loading => loading.Standing.Status == InstrumentStatus.InOrder)).Select(sample => sample.Name).ToArray();
+        foreach (var law in study.Analysis.Laws)
+        {
+            foreach (var measurand in study.Analysis.StandardRates.Select(Measurand.Viscosity))
+            {
+                yield return SlopePool.Pool(law, measurand, [.. inOrder
+                    .Select(name => (Record: records.GetValueOrDefault(name), Value: native[name].FirstOrDefault(value => value.Law == law && value.Measurand == measurand)))
+                    .Where(item => item.Record?.Hematocrit is not null && item.Value is not null && item.Value.Findings.All(finding => finding.Severity != Severity.Fault || finding.Kind == PoolingFindings.LawDoesNotFit))
+                    .Select(item => (item.Record!.Person, strata.GetValueOrDefault(item.Record.Person, ""), item.Record.Hematocrit!.Value.LiterPerLiter, study.Counters.FirstOrDefault(counter => counter.Name == item.Record.Counter)?.Uncertainty ?? 0, item.Value!.Value.X))]);
+            }
+        }
+    }
+
+    private static IEnumerable<Finding> PoolFindings(Study study, IEnumerable<MeasurandSet> sets, IEnumerable<LawEvidence> evidence)
+    {
+        foreach (var finding in sets.SelectMany(set => set.Scatter.Findings)) yield return finding;
+        foreach (var law in evidence.Where(law => law.Law == study.Analysis.DecideBy))
+        {
+            if (!law.Fits) yield return PoolingFindings.LawDoesNotFit.At(Where.Nowhere, law.Words, law.PatternProbability);
+            else if (law.Probability < 1e-3) yield return PoolingFindings.ScatterLargerThanDeclared.At(Where.Nowhere, law.Words, law.ChiSquare / law.DegreesOfFreedom, 1);
+        }
+    }
+
+    private static FittedLaw FitOf(LoadingResult loading, FlowLaw law) => loading.Fits.First(fit => fit.Law == law);
+}

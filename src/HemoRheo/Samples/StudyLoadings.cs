@@ -1,0 +1,44 @@
+namespace HemoRheo;
+
+/// <summary>Makes the loadings of a study: curves, screening, fits, standing of the instrument.</summary>
+internal static class StudyLoadings
+{
+    /// <summary>Every loading, in the order of the recordings.</summary>
+    public static LoadingResult[] Of(
+        Study study,
+        StudyReadings readings,
+        IReadOnlyDictionary<string, SampleRecord> records,
+        IReadOnlyDictionary<string, InstrumentHistory> histories,
+        IProgress<AnalysisProgress>? progress,
+        CancellationToken cancel)
+    {
+        var ramp = study.Analysis.Ramp;
+        var other = ramp == Ramp.Down ? Ramp.Up : Ramp.Down;
+        FlowCurve Screened(Recording recording, Ramp which) => recording.ToCurve(study, which).Screened(study, records.GetValueOrDefault(recording.Sample));
+        var curves = readings.Blood.Select(recording => Screened(recording, ramp)).ToArray();
+        var errors = new ErrorModel(study.Errors.Relative, ShearStress.FromPascals(study.Errors.Floor), study.Errors.Known);
+
+        var fits = new List<FittedLaw[]>();
+        foreach (var law in study.Analysis.Laws.Select(FlowLaw.Named))
+        {
+            cancel.ThrowIfCancellationRequested();
+            fits.Add(Fits.OfAll(curves, law, errors));
+            progress?.Report(new("fitting", fits.Count * curves.Length, study.Analysis.Laws.Count * curves.Length));
+        }
+
+        return readings.Blood.Select((recording, i) =>
+        {
+            var hasOther = recording.Readings.Any(reading => reading.Ramp == other);
+            var standing = histories.TryGetValue(recording.Instrument, out var history)
+                ? history.At(recording.StartedAt)
+                : new InstrumentStanding(InstrumentStatus.Unknown, $"The study file declares no instrument {recording.Instrument}.", null, []);
+            var laws = fits.Select(all => all[i]).ToItems();
+            var findings = curves[i].Findings
+                .Concat(curves[i].SetAside.SelectMany(aside => aside.Findings))
+                .Concat(laws.SelectMany(fit => fit.Findings))
+                .Concat(standing.Findings)
+                .ToItems();
+            return new LoadingResult(recording, curves[i], hasOther ? Screened(recording, other) : null, laws, standing, findings);
+        }).ToArray();
+    }
+}
