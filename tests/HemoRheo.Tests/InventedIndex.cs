@@ -4,4 +4,6 @@ namespace HemoRheo.Tests;
 internal sealed record InventedIndex() : Measurand("invented index", "I", ShownUnits.One, false)
 {
     public override string ToString() => Name;
+
+    internal override FitValue? From(FittedLaw fit) => null;
 }
