@@ -1,0 +1,69 @@
+namespace HemoRheo.Notebooks;
+
+/// <summary>Plain words for what pages, tables and pictures name.</summary>
+internal static class Words
+{
+    public static string Of(InstrumentStatus status) => status switch
+    {
+        InstrumentStatus.InOrder => "in order",
+        InstrumentStatus.InDoubt => "in doubt",
+        InstrumentStatus.Failed => "failed",
+        _ => "unknown",
+    };
+
+    public static string Of(CheckOutcome outcome) => outcome switch
+    {
+        CheckOutcome.Passes => "passes",
+        CheckOutcome.Fails => "fails",
+        _ => "cannot tell",
+    };
+
+    public static string Of(Outcome outcome) => outcome switch
+    {
+        Outcome.Below => "below",
+        Outcome.Within => "within",
+        Outcome.Above => "above",
+        _ => "undecided",
+    };
+
+    public static string Of(HematocritBasis basis) => basis switch
+    {
+        HematocritBasis.Native => "native hematocrit",
+        HematocritBasis.StandardByPlasma => "standard hematocrit, plasma rule",
+        _ => "standard hematocrit, slope rule",
+    };
+
+    public static string Short(HematocritBasis basis) => basis switch
+    {
+        HematocritBasis.Native => "native",
+        HematocritBasis.StandardByPlasma => "std. (plasma)",
+        _ => "std. (slope)",
+    };
+
+    public static string Of(Severity severity) => severity switch
+    {
+        Severity.Fault => "fault",
+        Severity.Warning => "warning",
+        _ => "note",
+    };
+
+    public static string Of(Ramp ramp) => ramp switch
+    {
+        Ramp.Down => "downward",
+        Ramp.Up => "upward",
+        _ => "unstated",
+    };
+
+    public static string Of(StopReason reason) => reason switch
+    {
+        StopReason.SmallStep => "the step became smaller than the tolerance",
+        StopReason.SmallDecrease => "the sum of squares stopped falling",
+        StopReason.SmallGradient => "the gradient vanished",
+        StopReason.IterationLimit => "the largest number of iterations was reached",
+        StopReason.Singular => "the equations had no unique solution",
+        _ => "the data cannot be fitted",
+    };
+
+    /// <summary>The basis whose values a rule makes.</summary>
+    public static HematocritBasis Basis(this StandardisingRule rule) => rule == StandardisingRule.StudySlope ? HematocritBasis.StandardBySlope : HematocritBasis.StandardByPlasma;
+}

@@ -1,0 +1,47 @@
+namespace HemoRheo.Notebooks;
+
+/// <summary>Reference ranges, and where the samples lie against them.</summary>
+internal static class RangeSection
+{
+    /// <summary>The section.</summary>
+    public static Markup Write(Edition edition)
+    {
+        var ranges = edition.Results.Ranges;
+        if (ranges.Count == 0) return Page.Section("ranges", "Reference ranges", Markup.Of($"<p>There is no reference range: too few controls, and none declared. Nothing is judged.</p>"));
+        return Page.Section("ranges", "Reference ranges", Markup.Of($"""
+            <p>Limits from this study's controls hold for this study's instruments, handling and people. The limits' own intervals show how far 95 % sure they are not: a verdict that would change within them is marked on the sample's page.</p>
+            <div class="wide"><table><caption>Reference ranges</caption>
+            <thead><tr><th scope="col">quantity</th><th scope="col">limits</th><th scope="col">lower limit's 90 % interval</th><th scope="col">upper limit's 90 % interval</th><th scope="col" class="n">controls used</th><th scope="col">left out</th><th scope="col">method and source</th></tr></thead>
+            <tbody>{ranges.Select(Row)}</tbody></table></div>
+            {Strips(edition)}
+            """));
+    }
+
+    private static Markup Row(ReferenceRange range) => Markup.Of($"""
+        <tr><th scope="row">{range.Measurand.Name}, {range.Measurand.Shown.Symbol}<br/><small>{Words.Of(range.Basis)}{(range.Law is null ? "" : $", {range.Law}")}</small></th><td class="w">{Figures.Limits(range.Measurand, range.Limits)}</td><td class="w">{Figures.Limits(range.Measurand, range.LowerLimit)}</td><td class="w">{Figures.Limits(range.Measurand, range.UpperLimit)}</td><td class="n">{(range.Used == 0 ? Markup.Of($"declared") : Markup.Of($"{range.Used}"))}</td><td>{Marks.Reasons(range.Missing)}</td><td>{range.Method}. <small>{range.Source}</small></td></tr>
+
+        """);
+
+    private static IEnumerable<Markup> Strips(Edition edition)
+    {
+        foreach (var rate in edition.Rates)
+        {
+            var range = edition.Results.Ranges.FirstOrDefault(range => range.Measurand == rate && range.Basis == edition.Basis && (range.Law is null || range.Law == edition.Law));
+            if (range is null) continue;
+            var rows = edition.Results.Samples.GroupBy(edition.GroupOf).OrderBy(group => Place(edition, group.Key))
+                .Select(group => new StripRow(group.Key.Length == 0 ? "no group" : group.Key, range, group.Select(sample => edition.Find(sample, rate, edition.Basis)).OfType<JudgedValue>().Where(value => double.IsFinite(value.Value.Value.X)).ToItems()))
+                .Where(row => row.Values.Count > 0).ToArray();
+            if (rows.Length == 0) continue;
+            yield return Page.Figure(
+                RangeStripChart.Svg(rows, $"{rate.Name}, {rate.Shown.Symbol}, at hematocrit {edition.Study.Standard.Hematocrit}", whiskers: false),
+                $"{rate.Name}: {string.Join("; ", rows.Select(row => $"{row.Name}, {Figures.Count(row.Values.Count, "sample")}, {row.Values.Count(value => value.Verdict?.Outcome == Outcome.Above)} above and {row.Values.Count(value => value.Verdict?.Outcome == Outcome.Below)} below the range"))}.",
+                Markup.Of($"{rate.Name}, {Words.Of(edition.Basis)}: each sample against the reference range (band) with the limits' own intervals (darker). The height within a row has no meaning."));
+        }
+    }
+
+    private static int Place(Edition edition, string label)
+    {
+        var place = edition.Study.Groups.ToList().FindIndex(group => group.Label == label);
+        return place < 0 ? int.MaxValue : place;
+    }
+}
