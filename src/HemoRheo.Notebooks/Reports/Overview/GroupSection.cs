@@ -29,9 +29,9 @@ internal static class GroupSection
 
     private static Markup Quantity(Measurand measurand, HematocritBasis basis) => Markup.Of($"{measurand.Name}, {measurand.Shown.Symbol}<br/><small>{Words.Of(basis)}</small>");
 
-    private static Markup Mean(MeasurandSummary one, GroupSummary group) => Markup.Of($"""
-        <td class="n">{group.Used} of {group.Samples}</td><td class="w">{Figures.Estimate(one.Measurand, group.Mean)}<br/><small>{Figures.Interval(one.Measurand, group.Mean)}</small></td>
-        """);
+    private static Markup Mean(MeasurandSummary one, GroupSummary group) => group.Mean is { } mean
+        ? Markup.Of($"<td class=\"n\">{group.Used} of {group.Samples}</td><td class=\"w\">{Figures.Estimate(one.Measurand, mean)}<br/><small>{Figures.Interval(one.Measurand, mean)}</small></td>")
+        : Markup.Of($"<td class=\"n\">{group.Used} of {group.Samples}</td><td><small>{group.WhyNoMean}</small></td>");
 
     private static Markup Ratio(MeasurandSummary one, GroupDifference? difference) => difference switch
     {
