@@ -23,7 +23,7 @@ public static class StudyPages
         Put("index.html", OverviewPage.Write(edition));
         for (var place = 0; place < results.Samples.Count; place++) Put(Path.Combine("samples", edition.SamplePages[results.Samples[place].Sample]), SamplePage.Write(edition, place));
         foreach (var history in results.Analyzed.Histories) Put(Path.Combine("instruments", edition.InstrumentPages[history.Instrument.Name]), InstrumentPage.Write(edition, history));
-        foreach (var table in StudyTables.Of(edition)) Put(Path.Combine("tables", table.File), table.Text);
+        foreach (var table in StudyTables.Files(edition)) Put(Path.Combine("tables", table.Name), table.Text);
         Put("run.json", record.ToJson());
 
         void Put(string name, string text) => ReplacedFile.Write(Path.Combine(folder, name), Encoding.UTF8.GetBytes(text));

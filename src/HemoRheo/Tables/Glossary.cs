@@ -197,6 +197,7 @@ public static class Glossary
         new("count", "How many."),
         new("meaning", "What a cell of the column says."),
         new("table", "File that the column stands in."),
+        new("marked ones", "How many are judged but marked, because the instrument was not in order; not among the others."),
     ];
 
     /// <summary>The column of this name.</summary>
