@@ -1,4 +1,3 @@
-using System.Globalization;
 using OxyPlot;
 using OxyPlot.Annotations;
 using OxyPlot.Axes;
@@ -35,7 +34,6 @@ internal static class CheckChart
             MinorIntervalType = DateTimeIntervalType.Days,
             IntervalType = DateTimeIntervalType.Days,
         }));
-        model.Culture = CultureInfo.InvariantCulture;
         model.Axes.Add(Still.Linear(AxisPosition.Left, "measured less certified, %", -reach, reach));
         model.Legends.Add(Still.Legend());
         foreach (var span in spans.Where(span => span.Status != InstrumentStatus.InOrder)) model.Annotations.Add(Ground(span, reach));

@@ -1,3 +1,4 @@
+using System.Globalization;
 using OxyPlot;
 using OxyPlot.Axes;
 using OxyPlot.Legends;
@@ -23,6 +24,7 @@ internal static class Still
         PlotAreaBorderThickness = new(1, 0, 0, 1),
         Background = OxyColors.White,
         Padding = new(8, 8, 16, 8),
+        Culture = CultureInfo.InvariantCulture,
     };
 
     /// <summary>A logarithmic axis.</summary>
