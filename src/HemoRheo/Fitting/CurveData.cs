@@ -1,14 +1,24 @@
 namespace HemoRheo;
 
 /// <summary>The kept points of a curve as numbers, or why they cannot be fitted.</summary>
-/// <param name="Rates">Shear rates, 1/s.</param>
-/// <param name="Stresses">Shear stresses, Pa.</param>
-/// <param name="Fault">Why they cannot be fitted; null where they can.</param>
-internal sealed record CurveData(double[] Rates, double[] Stresses, Finding? Fault)
+/// <param name="rates">Shear rates, 1/s.</param>
+/// <param name="stresses">Shear stresses, Pa.</param>
+/// <param name="fault">Why they cannot be fitted; null where they can.</param>
+internal sealed class CurveData(double[] rates, double[] stresses, Finding? fault)
 {
     private const double SameRate = 1e-6;
 
-    public double LowestStress => Stresses.Min();
+    /// <summary>Shear rates, 1/s.</summary>
+    public double[] Rates { get; } = rates;
+
+    /// <summary>Shear stresses, Pa.</summary>
+    public double[] Stresses { get; } = stresses;
+
+    /// <summary>Why they cannot be fitted; null where they can.</summary>
+    public Finding? Fault { get; } = fault;
+
+    /// <summary>Lowest stress, Pa.</summary>
+    public double LowestStress { get; } = stresses.Length == 0 ? 0 : stresses.Min();
 
     public static CurveData Of(FlowCurve curve, FlowLaw law)
     {

@@ -31,7 +31,7 @@ internal static class FitReport
 
         if (solution.Held is { } held)
         {
-            findings.Add(FittingFindings.Boundary.At(where, FormattableString.Invariant($"{law.Name} at its boundary, {law.Parameters[held].Name} = {law.Parameters[held].Lower}: {law.Boundary!.Law} describes this curve.")));
+            findings.Add(FittingFindings.Boundary.At(where, BoundaryWords(law, held)));
         }
 
         if (!errors.ScaleKnown && degrees == 0)
@@ -58,6 +58,10 @@ internal static class FitReport
             fit,
             findings.ToItems());
     }
+
+    private static string BoundaryWords(FlowLaw law, int held) => string.Create(
+        CultureInfo.InvariantCulture,
+        $"{law.Name} at its boundary, {law.Parameters[held].Name} = {law.Parameters[held].Lower:G3}: {law.Boundary!.Law} describes this curve.");
 
     private static string LackWords(FlowLaw law, LackOfFit fit) => string.Create(
         CultureInfo.InvariantCulture,

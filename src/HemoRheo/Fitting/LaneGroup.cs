@@ -37,7 +37,7 @@ internal static class LaneGroup
             wall[boundary.Parameter] = new(WallOf(law, curves[0]), WallOf(law, At(curves, 1)), WallOf(law, At(curves, 2)), WallOf(law, At(curves, 3)));
         }
 
-        var solution = LaneSolver.Solve(law.StressesAndSlopes, new(x, y, present, start, free, wall, errors.Relative, errors.Floor.Pascals));
+        var solution = LaneSolver.Solve(law.StressesAndSlopes, new LaneProblem(x, y, present, start, free, wall, errors.Relative, errors.Floor.Pascals));
         var outcomes = new LaneOutcome[curves.Length];
         for (var lane = 0; lane < outcomes.Length; lane++) outcomes[lane] = Read(solution, lane, curves[lane].Rates.Length, held);
         return outcomes;
@@ -45,9 +45,9 @@ internal static class LaneGroup
 
     /// <summary>The scaled value at which a curve's parameter has run to its bound.</summary>
     public static double WallOf(FlowLaw law, CurveData curve) =>
-        law.Boundary is { } boundary ? law.Parameters[boundary.Parameter].ToScaled(boundary.Wall(curve.LowestStress)) : double.NegativeInfinity;
+        law.Boundary is { } boundary ? law.Parameters[boundary.Parameter].ToScaled(boundary.WallAt(curve.LowestStress)) : double.NegativeInfinity;
 
-    private static LaneOutcome Read(in LaneSolution solution, int lane, int points, int? held)
+    private static LaneOutcome Read(LaneSolution solution, int lane, int points, int? held)
     {
         var solved = new CurveSolution(
             Column(solution.Parameters, lane, solution.Parameters.Length),

@@ -1,7 +1,17 @@
 namespace HemoRheo;
 
 /// <summary>What became of a curve in its lane.</summary>
-/// <param name="Solution">Its numbers.</param>
-/// <param name="AtWall">Whether a parameter ran to its bound.</param>
-/// <param name="Good">Whether the numbers stand as they are.</param>
-internal readonly record struct LaneOutcome(CurveSolution Solution, bool AtWall, bool Good);
+/// <param name="solution">Its numbers.</param>
+/// <param name="atWall">Whether a parameter ran to its bound.</param>
+/// <param name="good">Whether the numbers stand as they are.</param>
+internal sealed class LaneOutcome(CurveSolution solution, bool atWall, bool good)
+{
+    /// <summary>Its numbers.</summary>
+    public CurveSolution Solution { get; } = solution;
+
+    /// <summary>Whether a parameter ran to its bound.</summary>
+    public bool AtWall { get; } = atWall;
+
+    /// <summary>Whether the numbers stand as they are.</summary>
+    public bool Good { get; } = good;
+}

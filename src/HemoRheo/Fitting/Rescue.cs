@@ -34,7 +34,7 @@ internal static class Rescue
         var held = LaneGroup.Solve(law, [curve], [start], errors, parameter)[0];
         if (!FallsInward(law, curve, held.Solution, errors)) return held.Solution;
         var inside = held.Solution.Scaled.ToArray();
-        inside[parameter] = law.Parameters[parameter].ToScaled(boundary.Inside(curve.LowestStress));
+        inside[parameter] = law.Parameters[parameter].ToScaled(boundary.InsideAt(curve.LowestStress));
         var again = LaneGroup.Solve(law, [curve], [inside], errors)[0];
         return again.Good ? again.Solution : held.Solution;
     }

@@ -13,10 +13,7 @@ public sealed record Casson(ShearStress YieldStress, Viscosity CassonViscosity)
         new("Casson", 1959, "in Mill (ed.), Rheology of Disperse Systems, Pergamon, 84-104"),
         [new("yield stress", "τ_y", "Pa"), new("Casson viscosity", "η_C", "Pa.s")],
         new(0.1, 1000),
-        default,
-        Guess,
-        p => new(ShearStress.FromPascals(p[0]), Viscosity.FromPascalSeconds(p[1])),
-        new(0, lowest => 1e-8 * lowest, lowest => 1e-2 * lowest, "Newtonian"));
+        new(0, "Newtonian", Wall: 1e-8, Inside: 1e-2, OfLowestStress: true));
 
     /// <inheritdoc/>
     public override string ToString() => $"yield stress {YieldStress}, Casson viscosity {CassonViscosity}";
@@ -50,8 +47,12 @@ public sealed record Casson(ShearStress YieldStress, Viscosity CassonViscosity)
         guess[1] = slope * slope;
     }
 
-    private readonly struct Formula : IFormula
+    private readonly struct Formula : ILawFormula<Casson>
     {
+        public static void Guess(ReadOnlySpan<double> perSecond, ReadOnlySpan<double> pascals, Span<double> guess) => HemoRheo.Casson.Guess(perSecond, pascals, guess);
+
+        public static Casson Values(IReadOnlyList<double> estimates) => new(ShearStress.FromPascals(estimates[0]), Viscosity.FromPascalSeconds(estimates[1]));
+
         [MethodImpl(MethodImplOptions.AggressiveInlining)]
         public T Stress<T>(T rate, ReadOnlySpan<T> p) where T : struct, ILawNumber<T> => T.Square(T.Sqrt(p[0]) + T.Sqrt(p[1] * rate));
     }

@@ -3,25 +3,17 @@ using System.Runtime.CompilerServices;
 namespace HemoRheo;
 
 /// <summary>A law made of a formula: the loops live here, so that they are compiled anew for each formula.</summary>
-internal sealed record FormulaLaw<F, TValues>(
-    string Name,
-    Citation Source,
-    Items<LawParameter> Parameters,
-    Interval ValidRates,
-    F Formula,
-    FirstGuess Guess,
-    Func<IReadOnlyList<double>, TValues> Naming,
-    LawBoundary? Limit = null)
+internal sealed record FormulaLaw<F, TValues>(string Name, Citation Source, Items<LawParameter> Parameters, Interval ValidRates, LawBoundary? Limit = null)
     : FlowLaw<TValues>(Name, Source, Parameters, ValidRates)
-    where F : struct, IFormula
+    where F : struct, ILawFormula<TValues>
 {
     internal override LawBoundary? Boundary => Limit;
 
-    internal override TValues Values(IReadOnlyList<double> estimates) => Naming(estimates);
+    internal override TValues Values(IReadOnlyList<double> estimates) => F.Values(estimates);
 
-    internal override void FirstGuess(ReadOnlySpan<double> perSecond, ReadOnlySpan<double> pascals, Span<double> guess) => Guess(perSecond, pascals, guess);
+    internal override void FirstGuess(ReadOnlySpan<double> perSecond, ReadOnlySpan<double> pascals, Span<double> guess) => F.Guess(perSecond, pascals, guess);
 
-    internal override Lane StressOf(Lane rate, ReadOnlySpan<Lane> natural) => Formula.Stress(rate, natural);
+    internal override Lane StressOf(Lane rate, ReadOnlySpan<Lane> natural) => default(F).Stress(rate, natural);
 
     internal override void StressesAndSlopes(ReadOnlySpan<Lane> rates, ReadOnlySpan<Lane> scaled, Span<Lane> stresses, Span<Lane> slopes)
     {
@@ -33,11 +25,10 @@ internal sealed record FormulaLaw<F, TValues>(
             seeds[k] = LaneDual.Seed(natural, k, Parameters[k].SlopeOf(natural));
         }
 
-        var formula = Formula;
         ReadOnlySpan<LaneDual> p = seeds[..count];
         for (var i = 0; i < rates.Length; i++)
         {
-            var stress = formula.Stress(new LaneDual(rates[i]), p);
+            var stress = default(F).Stress(new LaneDual(rates[i]), p);
             stresses[i] = stress.Value;
             Store(stress, slopes, i, rates.Length, count);
         }

@@ -2,7 +2,15 @@ namespace HemoRheo;
 
 /// <summary>A limiting case of a law: one parameter at its lower bound, where another law takes over.</summary>
 /// <param name="Parameter">Number of the parameter.</param>
-/// <param name="Wall">A natural value so near the bound that the bound itself is tried, from the lowest stress of the curve, Pa.</param>
-/// <param name="Inside">A natural value to start again from, from the lowest stress of the curve, Pa.</param>
 /// <param name="Law">Name of the law that takes over.</param>
-internal sealed record LawBoundary(int Parameter, Func<double, double> Wall, Func<double, double> Inside, string Law);
+/// <param name="Wall">A value so near the bound that the bound itself is tried.</param>
+/// <param name="Inside">A value to start again from.</param>
+/// <param name="OfLowestStress">Whether both values are multiples of the lowest stress of the curve.</param>
+internal sealed record LawBoundary(int Parameter, string Law, double Wall, double Inside, bool OfLowestStress)
+{
+    /// <summary>The value at which a curve's parameter has run to its bound.</summary>
+    public double WallAt(double lowestStress) => OfLowestStress ? Wall * lowestStress : Wall;
+
+    /// <summary>The value to start again from.</summary>
+    public double InsideAt(double lowestStress) => OfLowestStress ? Inside * lowestStress : Inside;
+}

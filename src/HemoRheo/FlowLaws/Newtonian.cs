@@ -11,23 +11,22 @@ public sealed record Newtonian(Viscosity Viscosity)
         "Newtonian",
         new("Newton", 1687, "Philosophiae Naturalis Principia Mathematica, book 2, section 9"),
         [new("viscosity", "η", "Pa.s")],
-        new(0.01, 10000),
-        default,
-        Guess,
-        p => new(Viscosity.FromPascalSeconds(p[0])));
+        new(0.01, 10000));
 
     /// <inheritdoc/>
     public override string ToString() => $"viscosity {Viscosity}";
 
-    private static void Guess(ReadOnlySpan<double> perSecond, ReadOnlySpan<double> pascals, Span<double> guess)
+    private readonly struct Formula : ILawFormula<Newtonian>
     {
-        double sum = 0;
-        for (var i = 0; i < perSecond.Length; i++) sum += pascals[i] / perSecond[i];
-        guess[0] = sum / perSecond.Length;
-    }
+        public static void Guess(ReadOnlySpan<double> perSecond, ReadOnlySpan<double> pascals, Span<double> guess)
+        {
+            double sum = 0;
+            for (var i = 0; i < perSecond.Length; i++) sum += pascals[i] / perSecond[i];
+            guess[0] = sum / perSecond.Length;
+        }
 
-    private readonly struct Formula : IFormula
-    {
+        public static Newtonian Values(IReadOnlyList<double> estimates) => new(Viscosity.FromPascalSeconds(estimates[0]));
+
         [MethodImpl(MethodImplOptions.AggressiveInlining)]
         public T Stress<T>(T rate, ReadOnlySpan<T> p) where T : struct, ILawNumber<T> => p[0] * rate;
     }

@@ -14,10 +14,7 @@ public sealed record Quemada(Viscosity HighShearViscosity, ShearRate CriticalRat
         new("Quemada", 1978, "Rheologica Acta 17:632-642"),
         [new("high-shear viscosity", "η_∞", "Pa.s"), new("critical rate", "γ_c", "1/s"), new("ratio", "r", "1", 0, 1)],
         new(0.1, 1000),
-        default,
-        Guess,
-        p => new(Viscosity.FromPascalSeconds(p[0]), ShearRate.FromReciprocalSeconds(p[1]), p[2]),
-        new(2, _ => 1e-4, _ => 0.05, "Casson"));
+        new(2, "Casson", Wall: 1e-4, Inside: 0.05, OfLowestStress: false));
 
     /// <inheritdoc/>
     public override string ToString() => string.Create(
@@ -67,8 +64,13 @@ public sealed record Quemada(Viscosity HighShearViscosity, ShearRate CriticalRat
         guess[2] = 0.05;
     }
 
-    private readonly struct Formula : IFormula
+    private readonly struct Formula : ILawFormula<Quemada>
     {
+        public static void Guess(ReadOnlySpan<double> perSecond, ReadOnlySpan<double> pascals, Span<double> guess) => HemoRheo.Quemada.Guess(perSecond, pascals, guess);
+
+        public static Quemada Values(IReadOnlyList<double> estimates) =>
+            new(Viscosity.FromPascalSeconds(estimates[0]), ShearRate.FromReciprocalSeconds(estimates[1]), estimates[2]);
+
         [MethodImpl(MethodImplOptions.AggressiveInlining)]
         public T Stress<T>(T rate, ReadOnlySpan<T> p) where T : struct, ILawNumber<T>
         {

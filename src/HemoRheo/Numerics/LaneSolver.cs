@@ -12,7 +12,7 @@ internal static class LaneSolver
     private const double LongestStep = 3;
     private const double FirstDamping = 1e-4;
 
-    public static LaneSolution Solve(LaneModel model, in LaneProblem problem)
+    public static LaneSolution Solve(LaneModel model, LaneProblem problem)
     {
         var size = problem.Start.Length;
         var at = problem.Start.ToArray();
@@ -115,7 +115,7 @@ internal static class LaneSolver
         return Lane.Select(accept, accepted, more);
     }
 
-    private static LaneSolution Finish(in LaneProblem problem, Lane[] at, LaneSums here, LaneCholesky factor, Lane atWall, Convergence[] ends)
+    private static LaneSolution Finish(LaneProblem problem, Lane[] at, LaneSums here, LaneCholesky factor, Lane atWall, Convergence[] ends)
     {
         var size = at.Length;
         var points = problem.X.Length;

@@ -2,7 +2,7 @@ namespace HemoRheo;
 
 /// <summary>The sums of a weighted least-squares problem in four lanes: normal equations, gradient, sum of squares. Sums run in point order inside a lane.</summary>
 /// <param name="problem">The problem.</param>
-internal sealed class LaneSums(in LaneProblem problem)
+internal sealed class LaneSums(LaneProblem problem)
 {
     private readonly LaneProblem _problem = problem;
     private readonly int _points = problem.X.Length;

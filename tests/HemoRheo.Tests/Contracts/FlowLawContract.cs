@@ -1,0 +1,113 @@
+namespace HemoRheo.Tests.Contracts;
+
+/// <summary>What every built-in flow law must do.</summary>
+public class FlowLawContract
+{
+    private static readonly double[] Rates = [300, 200, 130, 100, 50, 30, 20, 11, 5, 2.5, 1.2, 0.7];
+
+    public static TheoryData<string> Laws => [.. FlowLaw.All.Select(law => law.Name)];
+
+    [Theory]
+    [MemberData(nameof(Laws))]
+    public void It_names_its_source_its_range_and_its_parameters(string name)
+    {
+        var law = FlowLaw.Named(name);
+        Assert.NotEmpty(law.Source.Author);
+        Assert.NotEmpty(law.Source.Text);
+        Assert.InRange(law.Source.Year, 1600, 2026);
+        Assert.True(law.ValidRates.Lower > 0 && law.ValidRates.Upper > law.ValidRates.Lower);
+        Assert.InRange(law.Parameters.Count, 1, 5);
+        Assert.All(law.Parameters, parameter => Assert.False(string.IsNullOrWhiteSpace(parameter.Name) || string.IsNullOrWhiteSpace(parameter.Symbol) || string.IsNullOrWhiteSpace(parameter.Unit)));
+        Assert.Equal(law.Parameters.Count, law.Parameters.Select(parameter => parameter.Name).Distinct().Count());
+    }
+
+    [Theory]
+    [MemberData(nameof(Laws))]
+    public void Its_slopes_are_those_of_its_stress(string name)
+    {
+        var law = FlowLaw.Named(name);
+        var scaled = law.ToScaled(Invented(law));
+        var slopes = new double[scaled.Length];
+        foreach (var rate in Rates)
+        {
+            law.StressAt(rate, scaled, slopes);
+            for (var k = 0; k < scaled.Length; k++)
+            {
+                var expected = (4 * Difference(law, rate, scaled, k, 5e-4) - Difference(law, rate, scaled, k, 1e-3)) / 3;
+                Assert.Equal(expected, slopes[k], 1e-9 * law.Stress(ShearRate.FromReciprocalSeconds(rate), Invented(law)).Pascals);
+            }
+        }
+    }
+
+    [Theory]
+    [MemberData(nameof(Laws))]
+    public void Its_stress_has_the_same_bits_by_either_road(string name)
+    {
+        var law = FlowLaw.Named(name);
+        var scaled = law.ToScaled(Invented(law));
+        foreach (var rate in Rates)
+        {
+            Assert.Equal(law.Stress(ShearRate.FromReciprocalSeconds(rate), law.ToNatural(scaled)).Pascals, law.StressAt(rate, scaled, new double[scaled.Length]));
+        }
+    }
+
+    [Theory]
+    [MemberData(nameof(Laws))]
+    public void Its_stress_rises_with_rate_and_is_above_zero(string name)
+    {
+        var law = FlowLaw.Named(name);
+        var stresses = Rates.Select(rate => law.Stress(ShearRate.FromReciprocalSeconds(rate), Invented(law)).Pascals).ToArray();
+        Assert.True(stresses[^1] > 0);
+        Assert.Equal(stresses, stresses.OrderDescending());
+    }
+
+    [Theory]
+    [MemberData(nameof(Laws))]
+    public void Its_first_guess_lies_inside_its_bounds_for_any_sound_curve(string name)
+    {
+        var law = FlowLaw.Named(name);
+        double[][] curves =
+        [
+            Stresses(FlowLaw.Newtonian, 0.0012), Stresses(FlowLaw.Casson, 0.005, 0.0035), Stresses(FlowLaw.Quemada, 0.003, 2, 0.2), Stresses(FlowLaw.Casson, 1e-9, 0.001),
+            [.. Rates.Select(rate => 0.01 * Math.Pow(rate, 1.4))], [.. Rates.Select(rate => 0.5 / rate)], [.. Rates.Select(_ => 0.02)], [.. Rates.Select((_, i) => i % 2 == 0 ? 1e-6 : 10.0)],
+        ];
+        var guess = new double[law.Parameters.Count];
+        foreach (var stresses in curves)
+        {
+            law.FirstGuess(Rates, stresses, guess);
+            for (var k = 0; k < guess.Length; k++) Assert.True(guess[k] > law.Parameters[k].Lower && guess[k] < law.Parameters[k].Upper, $"{law.Parameters[k].Name} {guess[k]:R}");
+        }
+    }
+
+    [Theory]
+    [MemberData(nameof(Laws))]
+    public void It_recovers_its_own_data(string name)
+    {
+        var law = FlowLaw.Named(name);
+        var truth = Invented(law);
+        var fit = FlowCurve.Of(Rates, Stresses(law, truth)).Fit(law, ErrorModel.Known(0.01, ShearStress.FromPascals(0.0003)));
+        Assert.True(fit.Usable, fit.ToString());
+        for (var k = 0; k < truth.Length; k++) Assert.Equal(truth[k], fit.Parameters[k].Estimate, 1e-9 * truth[k]);
+        Assert.Empty(fit.Findings);
+    }
+
+    /// <summary>Believable numbers for blood, invented here; a new law adds its own line.</summary>
+    private static double[] Invented(FlowLaw law) => law.Name switch
+    {
+        "Newtonian" => [0.0035],
+        "Casson" => [0.005, 0.0034],
+        "Quemada" => [0.0031, 2.5, 0.2],
+        _ => throw new ArgumentException($"Write believable numbers for {law.Name} here.", nameof(law)),
+    };
+
+    private static double[] Stresses(FlowLaw law, params double[] natural) => [.. Rates.Select(rate => law.Stress(ShearRate.FromReciprocalSeconds(rate), natural).Pascals)];
+
+    private static double Difference(FlowLaw law, double rate, double[] scaled, int k, double h)
+    {
+        double[] up = [.. scaled], down = [.. scaled];
+        up[k] += h;
+        down[k] -= h;
+        var at = ShearRate.FromReciprocalSeconds(rate);
+        return (law.Stress(at, law.ToNatural(up)).Pascals - law.Stress(at, law.ToNatural(down)).Pascals) / (2 * h);
+    }
+}
