@@ -27,7 +27,7 @@ internal sealed record GroupValues(Items<PersonValue> People, int Samples, Items
             }
             else
             {
-                left.Add(own.Length == 0 ? ExportFindings.PersonWithoutSample.Code : own[0].Reason!);
+                left.Add(own.Length == 0 ? ExportFindings.PersonNotMeasured.Code : own[0].Reason!);
             }
         }
 
