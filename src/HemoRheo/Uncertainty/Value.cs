@@ -87,7 +87,7 @@ public sealed record Value(double X, Items<Contribution> Parts)
     /// <param name="level">Coverage, between 0 and 1.</param>
     public Interval Interval(double level = 0.95)
     {
-        var reach = Quantile((1 + level) / 2) * StandardUncertainty;
+        var reach = StudentQuantile.At(DegreesOfFreedom, (1 + level) / 2) * StandardUncertainty;
         return new(X - reach, X + reach);
     }
 
@@ -104,12 +104,6 @@ public sealed record Value(double X, Items<Contribution> Parts)
         var z = margin / u;
         var df = DegreesOfFreedom;
         return double.IsFinite(df) ? StudentT.CDF(0, 1, df, z) : Normal.CDF(0, 1, z);
-    }
-
-    private double Quantile(double p)
-    {
-        var df = DegreesOfFreedom;
-        return double.IsFinite(df) ? StudentT.InvCDF(0, 1, df, p) : Normal.InvCDF(0, 1, p);
     }
 
     private static double Square(double x) => x * x;
