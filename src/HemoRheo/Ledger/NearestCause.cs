@@ -11,7 +11,7 @@ internal sealed class NearestCause
     {
         _feeds = later.Feeds.Concat(earlier.Feeds).GroupBy(feed => feed.Name).ToDictionary(sample => sample.Key, sample => sample.Select(feed => feed.Text).Distinct().ToArray());
         _changedInputs = inputs.Select(change => change.Name).ToHashSet();
-        _otherwise = rest.FirstOrDefault() is { } change ? $"{change.What} {change.Name}"
+        _otherwise = rest.FirstOrDefault() is { } change ? change.What == change.Name ? change.What : $"{change.What} {change.Name}"
             : inputs.Count > 0 ? $"input {inputs.First().Name}{(inputs.Count > 1 ? $" or another of {inputs.Count} changed inputs" : "")}, through what the samples share"
             : "nothing that was recorded: no input, setting, version or seed changed";
     }
