@@ -3,6 +3,16 @@ namespace HemoRheo;
 /// <summary>Ranges and verdicts for a whole study.</summary>
 public static class StudyJudging
 {
+    /// <summary>The whole analysis of what was read: screens, fits, pools and corrects every sample, makes reference ranges and judges every value.</summary>
+    /// <param name="study">The study.</param>
+    /// <param name="readings">What was read for it.</param>
+    /// <param name="progress">Told how far the work has come; may be null.</param>
+    /// <param name="cancel">Ends the work early.</param>
+    /// <returns>The study with its ranges, verdicts and findings.</returns>
+    /// <exception cref="OperationCanceledException">The work was ended early.</exception>
+    public static StudyResult Analyze(this Study study, StudyReadings readings, IProgress<AnalysisProgress>? progress = null, CancellationToken cancel = default) =>
+        study.Evaluate(readings, progress, cancel).Judge(progress, cancel);
+
     /// <summary>Makes reference ranges and judges every value of an analyzed study.</summary>
     /// <param name="analyzed">The study, analyzed.</param>
     /// <param name="progress">Told how far the work has come; may be null.</param>

@@ -84,7 +84,7 @@ public sealed class ReferenceRangeTests
         var range = Assert.Single(analyzed.Judged().Ranges);
         Assert.Equal(20, range.Used);
         Assert.Equal(
-            [new("instrument-not-in-order", 2), new("person-without-sample", 1), new("value-missing", 1), new CountedReason("value-not-decidable", 1)],
+            [new("instrument-not-in-order", 2), new("person-not-measured", 1), new("value-missing", 1), new CountedReason("value-not-decidable", 1)],
             range.Missing);
     }
 
