@@ -17,7 +17,10 @@ internal static class BudgetChart
 
     /// <summary>The picture.</summary>
     /// <param name="values">Up to three values on the logarithmic scale; others are left out.</param>
-    public static string Svg(IReadOnlyList<SampleValue> values)
+    public static string Svg(IReadOnlyList<SampleValue> values) => Still.Svg(Model(values), Height(values));
+
+    /// <summary>The picture's model, which the interactive chart is made of too.</summary>
+    public static PlotModel Model(IReadOnlyList<SampleValue> values)
     {
         var shown = values.Where(value => value.Measurand.Logarithmic).Take(Most).ToArray();
         var kinds = Kinds(shown);
@@ -40,7 +43,7 @@ internal static class BudgetChart
             model.Series.Add(bars);
         }
 
-        return Still.Svg(model, Height(values));
+        return model;
     }
 
     private static SourceKind[] Kinds(IReadOnlyList<SampleValue> values) => [.. values.SelectMany(value => value.Value.Parts).Select(part => part.Source.Kind).Distinct().Order()];

@@ -1,6 +1,7 @@
 using OxyPlot;
 using OxyPlot.Annotations;
 using OxyPlot.Axes;
+using OxyPlot.Series;
 
 namespace HemoRheo.Notebooks;
 
@@ -13,7 +14,10 @@ internal static class CheckChart
     /// <summary>The picture.</summary>
     /// <param name="history">The instrument's checks; there is at least one.</param>
     /// <param name="spans">Its status over time.</param>
-    public static string Svg(InstrumentHistory history, IReadOnlyList<StatusSpan> spans)
+    public static string Svg(InstrumentHistory history, IReadOnlyList<StatusSpan> spans) => Still.Svg(Model(history, spans), Height);
+
+    /// <summary>The picture's model, which the interactive chart is made of too.</summary>
+    public static PlotModel Model(InstrumentHistory history, IReadOnlyList<StatusSpan> spans)
     {
         var checks = history.Checks;
         var limit = 100 * history.Instrument.CheckLimit;
@@ -41,7 +45,7 @@ internal static class CheckChart
         model.Series.Add(Still.Line(new(Place(from), limit), new(Place(until), limit), Ink.Text, LineStyle.Dash, title: "limit of a check"));
         model.Series.Add(Still.Line(new(Place(from), -limit), new(Place(until), -limit), Ink.Text, LineStyle.Dash));
         foreach (var outcome in (CheckOutcome[])[CheckOutcome.Passes, CheckOutcome.CannotTell, CheckOutcome.Fails]) Add(model, checks, outcome);
-        return Still.Svg(model, Height);
+        return model;
     }
 
     private static void Add(PlotModel model, Items<InstrumentCheck> checks, CheckOutcome outcome)
@@ -51,7 +55,7 @@ internal static class CheckChart
         var color = outcome switch { CheckOutcome.Passes => Ink.Accent, CheckOutcome.Fails => Ink.Alert, _ => Ink.Muted };
         var marker = outcome switch { CheckOutcome.Passes => MarkerType.Circle, CheckOutcome.Fails => MarkerType.Square, _ => MarkerType.Diamond };
         model.Series.Add(Still.Strokes(shown.Select(check => (check.Error.Interval().Select(Percent), Place(check.At))).Select(one => (new DataPoint(one.Item2, one.Item1.Lower), new DataPoint(one.Item2, one.Item1.Upper))), color, 2));
-        model.Series.Add(Still.Points(shown.Select(check => new DataPoint(Place(check.At), Percent(check.Error.X))), color, marker, 6, outcome == CheckOutcome.CannotTell, Words.Of(outcome)));
+        model.Series.Add(Still.Points(shown.Select(check => new ScatterPoint(Place(check.At), Percent(check.Error.X), tag: PointWords.Of(check))), color, marker, 6, outcome == CheckOutcome.CannotTell, Words.Of(outcome)));
     }
 
     private static RectangleAnnotation Ground(StatusSpan span, double reach) => new()

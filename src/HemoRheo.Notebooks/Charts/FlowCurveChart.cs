@@ -20,7 +20,10 @@ internal static class FlowCurveChart
     /// <param name="law">Name of the law whose line is drawn.</param>
     /// <param name="values">Reported values of viscosity at a rate, drawn with their 95 % interval; those of one hematocrit basis.</param>
     /// <param name="lowestStress">Shear stress of the instrument's torque floor, Pa; null where it is not known.</param>
-    public static string Svg(IReadOnlyList<LoadingResult> loadings, string law, IReadOnlyList<SampleValue> values, double? lowestStress)
+    public static string Svg(IReadOnlyList<LoadingResult> loadings, string law, IReadOnlyList<SampleValue> values, double? lowestStress) => Still.Svg(Model(loadings, law, values, lowestStress), Height);
+
+    /// <summary>The picture's model, which the interactive chart is made of too.</summary>
+    public static PlotModel Model(IReadOnlyList<LoadingResult> loadings, string law, IReadOnlyList<SampleValue> values, double? lowestStress)
     {
         var reported = values.Where(value => value.Measurand is ViscosityAtRate && double.IsFinite(value.Value.X)).ToArray();
         var points = loadings.SelectMany(loading => loading.Curve.Points.Concat(loading.Curve.SetAside.Select(aside => aside.Point))).Where(Drawable).ToArray();
@@ -35,7 +38,7 @@ internal static class FlowCurveChart
         if (lowestStress is { } floor and > 0) model.Series.Add(Still.Line(new(left, 1000 * floor / left), new(right, 1000 * floor / right), Ink.Muted, LineStyle.Dot, title: "torque floor"));
         for (var i = 0; i < loadings.Count; i++) Add(model, loadings[i], law, i);
         if (reported.Length > 0) AddReported(model, reported);
-        return Still.Svg(model, Height);
+        return model;
     }
 
     private static void Add(PlotModel model, LoadingResult loading, string law, int index)
@@ -50,9 +53,9 @@ internal static class FlowCurveChart
             model.Series.Add(line);
         }
 
-        var kept = loading.Curve.Points.Where(Drawable).Select(Place).ToArray();
+        var kept = loading.Curve.Points.Where(Drawable).Select(point => Place(point, [])).ToArray();
         if (kept.Length > 0) model.Series.Add(Still.Points(kept, color, Ink.Marker(index), 4.5, title: $"loading {number}, kept"));
-        var aside = loading.Curve.SetAside.Select(one => one.Point).Where(Drawable).Select(Place).ToArray();
+        var aside = loading.Curve.SetAside.Where(one => Drawable(one.Point)).Select(one => Place(one.Point, one.Findings)).ToArray();
         if (aside.Length > 0) model.Series.Add(Still.Points(aside, color, index == 0 ? MarkerType.Cross : MarkerType.Plus, 5, title: $"loading {number}, set aside"));
     }
 
@@ -60,10 +63,10 @@ internal static class FlowCurveChart
     {
         static double Rate(SampleValue value) => ((ViscosityAtRate)value.Measurand).Rate.ReciprocalSeconds;
         model.Series.Add(Still.Strokes(values.Select(value => (new DataPoint(Rate(value), value.Interval().Lower), new DataPoint(Rate(value), value.Interval().Upper))), Ink.Text, 2));
-        model.Series.Add(Still.Points(values.Select(value => new DataPoint(Rate(value), value.Shown)), Ink.Text, MarkerType.Diamond, 6, hollow: true, title: $"reported, {Words.Short(values[0].Basis)}, 95 %"));
+        model.Series.Add(Still.Points(values.Select(value => new ScatterPoint(Rate(value), value.Shown, tag: value.ToString())), Ink.Text, MarkerType.Diamond, 6, hollow: true, title: $"reported, {Words.Short(values[0].Basis)}, 95 %"));
     }
 
     private static bool Drawable(FlowPoint point) => point.Rate.ReciprocalSeconds > 0 && point.Stress.Pascals > 0;
 
-    private static DataPoint Place(FlowPoint point) => new(point.Rate.ReciprocalSeconds, point.ApparentViscosity.MillipascalSeconds);
+    private static ScatterPoint Place(FlowPoint point, Items<Finding> findings) => new(point.Rate.ReciprocalSeconds, point.ApparentViscosity.MillipascalSeconds, tag: PointWords.Of(point, findings));
 }

@@ -1,6 +1,7 @@
 using OxyPlot;
 using OxyPlot.Annotations;
 using OxyPlot.Axes;
+using OxyPlot.Series;
 
 namespace HemoRheo.Notebooks;
 
@@ -16,7 +17,10 @@ internal static class RangeStripChart
     /// <param name="rows">Rows from top to bottom; their measurands share one unit and the logarithmic scale.</param>
     /// <param name="title">Title of the axis, with the unit.</param>
     /// <param name="whiskers">Whether each value's 95 % interval is drawn.</param>
-    public static string Svg(IReadOnlyList<StripRow> rows, string title, bool whiskers)
+    public static string Svg(IReadOnlyList<StripRow> rows, string title, bool whiskers) => Still.Svg(Model(rows, title, whiskers), Height(rows.Count));
+
+    /// <summary>The picture's model, which the interactive chart is made of too.</summary>
+    public static PlotModel Model(IReadOnlyList<StripRow> rows, string title, bool whiskers)
     {
         var (lowest, highest) = Reach(rows, whiskers);
         var model = Still.Model();
@@ -34,7 +38,7 @@ internal static class RangeStripChart
         }
 
         Add(model, rows, null, true, whiskers);
-        return Still.Svg(model, Height(rows.Count));
+        return model;
     }
 
     private static void AddRange(PlotModel model, ReferenceRange range, int place)
@@ -54,7 +58,7 @@ internal static class RangeStripChart
 
     private static void Add(PlotModel model, IReadOnlyList<StripRow> rows, Outcome? outcome, bool marked, bool whiskers)
     {
-        var drawn = rows.SelectMany((row, place) => row.Values.Select((value, i) => (value, row: place, at: place + Spread(i, row.Values.Count))))
+        var drawn = rows.SelectMany((row, place) => row.Values.Select((value, i) => (value, sample: row.SampleOf(i), row: place, at: place + Spread(i, row.Values.Count))))
             .Where(one => marked ? one.value.Marked : !one.value.Marked && one.value.Verdict?.Outcome == outcome).ToArray();
         if (drawn.Length == 0) return;
         var (marker, color, hollow, words) = Style(outcome, marked);
@@ -63,7 +67,7 @@ internal static class RangeStripChart
             model.Series.Add(Still.Strokes(drawn.Select(one => (one.value.Value.Interval(), one.at)).Select(one => (new DataPoint(one.Item1.Lower, one.at), new DataPoint(one.Item1.Upper, one.at))), color, 1.6));
         }
 
-        model.Series.Add(Still.Points(drawn.Select(one => new DataPoint(one.value.Value.Shown, one.at)), color, marker, whiskers ? 6 : 4, hollow, words));
+        model.Series.Add(Still.Points(drawn.Select(one => new ScatterPoint(one.value.Value.Shown, one.at, tag: PointWords.Of(one.sample, one.value))), color, marker, whiskers ? 6 : 4, hollow, words));
     }
 
     private static (MarkerType Marker, OxyColor Color, bool Hollow, string Words) Style(Outcome? outcome, bool marked) => (outcome, marked) switch

@@ -13,7 +13,10 @@ internal static class RatioChart
 
     /// <summary>The picture. A difference that could not be had has its row and no mark.</summary>
     /// <param name="summary">The summary; differences on the logarithmic scale are drawn.</param>
-    public static string Svg(CohortSummary summary)
+    public static string Svg(CohortSummary summary) => Still.Svg(Model(summary), Height(summary));
+
+    /// <summary>The picture's model, which the interactive chart is made of too.</summary>
+    public static PlotModel Model(CohortSummary summary)
     {
         var rows = Drawable(summary);
         var intervals = rows.SelectMany(row => new[] { row.Total.Difference, row.Adjusted?.Difference }).OfType<Value>().Select(difference => difference.Interval().Select(Math.Exp)).ToArray();
@@ -27,7 +30,7 @@ internal static class RatioChart
         model.Series.Add(Still.Line(new(1, -0.6), new(1, rows.Length - 0.4), Ink.Text, LineStyle.Dash, title: "no difference"));
         Add(model, rows, row => row.Total, -0.16, "as it is", Ink.Accent, MarkerType.Square);
         Add(model, rows, row => row.Adjusted, 0.16, "adjusted for hematocrit", Ink.Alert, MarkerType.Circle);
-        return Still.Svg(model, Height(summary));
+        return model;
     }
 
     private static MeasurandSummary[] Drawable(CohortSummary summary) => [.. summary.Measurands.Where(one => one.Measurand.Logarithmic)];

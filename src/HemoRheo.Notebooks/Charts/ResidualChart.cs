@@ -12,7 +12,10 @@ internal static class ResidualChart
     /// <summary>The picture.</summary>
     /// <param name="loadings">Loadings of one sample.</param>
     /// <param name="law">Name of the law.</param>
-    public static string Svg(IReadOnlyList<LoadingResult> loadings, string law)
+    public static string Svg(IReadOnlyList<LoadingResult> loadings, string law) => Still.Svg(Model(loadings, law), Height);
+
+    /// <summary>The picture's model, which the interactive chart is made of too.</summary>
+    public static PlotModel Model(IReadOnlyList<LoadingResult> loadings, string law)
     {
         var fits = loadings.Select(loading => (loading, fit: loading.Fits.FirstOrDefault(fit => fit.Law.Name == law))).Where(pair => pair.fit is { Residuals.Count: > 0 }).ToArray();
         var residuals = fits.SelectMany(pair => pair.fit!.Residuals).Where(double.IsFinite).ToArray();
@@ -33,6 +36,6 @@ internal static class ResidualChart
             model.Series.Add(Still.Points(points, Ink.Member(i), Ink.Marker(i), title: $"loading {loading.Recording.Loading}"));
         }
 
-        return Still.Svg(model, Height);
+        return model;
     }
 }

@@ -100,7 +100,11 @@ internal static class Still
     }
 
     /// <summary>Points without a line.</summary>
-    public static ScatterSeries Points(IEnumerable<DataPoint> points, OxyColor color, MarkerType marker, double size = 4, bool hollow = false, string? title = null)
+    public static ScatterSeries Points(IEnumerable<DataPoint> points, OxyColor color, MarkerType marker, double size = 4, bool hollow = false, string? title = null) =>
+        Points(points.Select(point => new ScatterPoint(point.X, point.Y)), color, marker, size, hollow, title);
+
+    /// <summary>Points without a line, each with a text as its tag, which an interactive chart shows where the pointer is.</summary>
+    public static ScatterSeries Points(IEnumerable<ScatterPoint> points, OxyColor color, MarkerType marker, double size = 4, bool hollow = false, string? title = null)
     {
         var open = marker is MarkerType.Cross or MarkerType.Plus;
         var series = new ScatterSeries
@@ -113,7 +117,7 @@ internal static class Still
             Title = title,
             RenderInLegend = title is not null,
         };
-        series.Points.AddRange(points.Select(point => new ScatterPoint(point.X, point.Y)));
+        series.Points.AddRange(points);
         return series;
     }
 

@@ -3,64 +3,32 @@ using HemoRheo.Notebooks;
 
 namespace HemoRheo;
 
-/// <summary>Results as frames, one row a value, a point or a check. Numbers are in the unit that the heading or the row names.</summary>
+/// <summary>Results as frames: the same columns as the tables that are written beside the pages, one row a value, a contribution, a point, a fit or a check.</summary>
 public static class ResultFrames
 {
-    /// <summary>Every value of every sample, with its interval, uncertainty and verdict.</summary>
+    /// <summary>Every value of every sample, with its interval, its budget by kind of source and its verdict.</summary>
     /// <param name="result">The result of a study.</param>
-    public static Frame<int, string> ValuesFrame(this StudyResult result) => Values(result.Samples).ToFrame();
+    public static Frame<int, string> ValuesFrame(this StudyResult result) => ValueTables.Values(Edition(result)).Table.ToFrame();
 
-    /// <summary>Every value of one sample.</summary>
-    /// <param name="sample">The sample.</param>
-    public static Frame<int, string> ValuesFrame(this JudgedSample sample) => Values([sample]).ToFrame();
+    /// <summary>Every contribution to every value of the law that decides.</summary>
+    /// <param name="result">The result of a study.</param>
+    public static Frame<int, string> BudgetFrame(this StudyResult result) => ValueTables.Budget(Edition(result)).Table.ToFrame();
 
-    /// <summary>Every point of a curve, those set aside included.</summary>
+    /// <summary>Every point of every curve of a study, those set aside included, with the line it was read from.</summary>
+    /// <param name="result">The result of a study.</param>
+    public static Frame<int, string> PointsFrame(this StudyResult result) => CurveTables.Points(Edition(result)).Table.ToFrame();
+
+    /// <summary>Every point of one curve, those set aside included.</summary>
     /// <param name="curve">The curve.</param>
     public static Frame<int, string> PointsFrame(this FlowCurve curve) => CurveView.Table(curve).ToFrame();
 
-    /// <summary>Every point of every analyzed curve of a study, those set aside included.</summary>
+    /// <summary>Every parameter of every law fitted to every loading.</summary>
     /// <param name="result">The result of a study.</param>
-    public static Frame<int, string> PointsFrame(this StudyResult result)
-    {
-        var loadings = result.Samples.SelectMany(sample => sample.Result.Loadings.SelectMany(loading => CurveView.Table(loading.Curve).Rows.Select(row => (sample.Sample, loading.Recording.Loading, row))));
-        return Table.Of("sample", "loading", "point", "shear rate", "shear stress", "viscosity", "temperature", "kept", "set aside because", "where")
-            .WithRows(loadings, one => [one.Sample, one.Loading, .. one.row]).ToFrame();
-    }
+    public static Frame<int, string> FitsFrame(this StudyResult result) => CurveTables.Fits(Edition(result)).Table.ToFrame();
 
-    /// <summary>Every check of a study's instruments.</summary>
+    /// <summary>Every check of the study's instruments.</summary>
     /// <param name="result">The result of a study.</param>
-    public static Frame<int, string> ChecksFrame(this StudyResult result) => HistoryView.Table(result.Analyzed.Histories.SelectMany(history => history.Checks)).ToFrame();
+    public static Frame<int, string> ChecksFrame(this StudyResult result) => LabTables.Checks(Edition(result)).Table.ToFrame();
 
-    private static Table Values(IEnumerable<JudgedSample> samples) =>
-        Table.Of("sample", "measurand", "law", "basis", "value", "lower", "upper", "standard uncertainty", "degrees of freedom", "unit", "interpolated", "decidable", "outcome", "p below", "p within", "p above", "marked", "status")
-            .WithRows(samples.SelectMany(sample => sample.Values.Select(value => (sample, value))), one => Row(one.sample, one.value));
-
-    private static Cell[] Row(JudgedSample sample, JudgedValue judged)
-    {
-        var value = judged.Value;
-        var interval = value.Interval();
-        return
-        [
-            sample.Sample,
-            value.Measurand.Name,
-            value.Law,
-            Words.Of(value.Basis),
-            Number(value.Shown),
-            Number(interval.Lower),
-            Number(interval.Upper),
-            Number(value.Value.StandardUncertainty * (value.Measurand.Logarithmic ? value.Shown : 1 / value.Measurand.Shown.Factor)),
-            value.Value.DegreesOfFreedom,
-            value.Measurand.Shown.Symbol,
-            value.Interpolated is { } read ? Number(value.Measurand.ToShown(read)) : Cell.Empty,
-            value.Decidable,
-            judged.Verdict is { } verdict ? Words.Of(verdict.Outcome) : Cell.Empty,
-            judged.Verdict?.Below,
-            judged.Verdict?.Within,
-            judged.Verdict?.Above,
-            judged.Marked,
-            Words.Of(sample.Result.Status),
-        ];
-    }
-
-    private static Cell Number(double number) => double.IsFinite(number) ? number : Cell.Empty;
+    private static Edition Edition(StudyResult result) => new(result, null, RunRecord.Of(result, null), null);
 }

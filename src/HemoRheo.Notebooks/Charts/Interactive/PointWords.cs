@@ -20,4 +20,17 @@ internal static class PointWords
         lines.AddRange(findings.Select(finding => $"{Words.Of(finding.Severity)}: {finding.Message}"));
         return string.Join('\n', lines);
     }
+
+    public static string Of(InstrumentCheck check) => string.Create(CultureInfo.InvariantCulture, $"{check.Name}, {check.At:yyyy-MM-dd HH:mm}\n{check.Fluid.Name}: measured {Rounding.Digits(check.Measured.MillipascalSeconds, 4)}, expected {Rounding.Digits(check.Expected.MillipascalSeconds, 4)} mPa·s\n{Words.Of(check.Outcome)}, probability within the limit {check.ProbabilityWithin:0.000}");
+
+    public static string Of(string sample, JudgedValue value)
+    {
+        var lines = new List<string> { value.Value.ToString() };
+        if (sample.Length > 0) lines.Insert(0, $"sample {sample}");
+        lines.Add(value.Verdict is { } verdict
+            ? string.Create(CultureInfo.InvariantCulture, $"{Words.Of(verdict.Outcome)}: below {verdict.Below:0.000}, within {verdict.Within:0.000}, above {verdict.Above:0.000}")
+            : $"not judged: {value.WhyNotJudged}");
+        if (value.Marked) lines.Add("marked: the instrument was not in order");
+        return string.Join('\n', lines);
+    }
 }

@@ -28,15 +28,27 @@ internal static class RangeSection
         {
             var range = edition.Results.Ranges.FirstOrDefault(range => range.Measurand == rate && range.Basis == edition.Basis && (range.Law is null || range.Law == edition.Law));
             if (range is null) continue;
-            var rows = edition.Results.Samples.GroupBy(edition.GroupOf).OrderBy(group => Place(edition, group.Key))
-                .Select(group => new StripRow(group.Key.Length == 0 ? "no group" : group.Key, range, group.Select(sample => edition.Find(sample, rate, edition.Basis)).OfType<JudgedValue>().Where(value => double.IsFinite(value.Value.Value.X)).ToItems()))
-                .Where(row => row.Values.Count > 0).ToArray();
+            var rows = Rows(edition, rate, range);
             if (rows.Length == 0) continue;
             yield return Page.Figure(
                 RangeStripChart.Svg(rows, $"{rate.Name}, {rate.Shown.Symbol}, at hematocrit {edition.Study.Standard.Hematocrit}", whiskers: false),
                 $"{rate.Name}: {string.Join("; ", rows.Select(row => $"{row.Name}, {Figures.Count(row.Values.Count, "sample")}, {row.Values.Count(value => value.Verdict?.Outcome == Outcome.Above)} above and {row.Values.Count(value => value.Verdict?.Outcome == Outcome.Below)} below the range"))}.",
                 Markup.Of($"{rate.Name}, {Words.Of(edition.Basis)}: each sample against the reference range (band) with the limits' own intervals (darker). The height within a row has no meaning."));
         }
+    }
+
+    /// <summary>Rows of a strip, one a group: each sample's value of the deciding law at the standard hematocrit.</summary>
+    public static StripRow[] Rows(Edition edition, Measurand measurand, ReferenceRange? range) =>
+    [
+        .. edition.Results.Samples.GroupBy(edition.GroupOf).OrderBy(group => Place(edition, group.Key))
+            .Select(group => Row(group.Key.Length == 0 ? "no group" : group.Key, range, [.. group.Select(sample => (sample.Sample, edition.Find(sample, measurand, edition.Basis)))]))
+            .Where(row => row.Values.Count > 0),
+    ];
+
+    private static StripRow Row(string name, ReferenceRange? range, (string Sample, JudgedValue? Value)[] samples)
+    {
+        var drawn = samples.Where(one => one.Value is { } value && double.IsFinite(value.Value.Value.X)).ToArray();
+        return new(name, range, drawn.Select(one => one.Value!).ToItems(), drawn.Select(one => one.Sample).ToItems());
     }
 
     private static int Place(Edition edition, string label)

@@ -19,7 +19,7 @@ internal static class SampleVerdicts
     private static Markup Strip(JudgedSample sample, JudgedValue[] values)
     {
         var rows = values.Where(value => value.Value.Measurand.Logarithmic && double.IsFinite(value.Value.Value.X))
-            .Select(value => new StripRow($"{value.Value.Measurand.Symbol}, {Words.Short(value.Value.Basis)}", value.Range, [value])).ToArray();
+            .Select(value => new StripRow($"{value.Value.Measurand.Symbol}, {Words.Short(value.Value.Basis)}", value.Range, [value], [])).ToArray();
         return rows.Length == 0 ? Markup.None : Page.Figure(
             RangeStripChart.Svg(rows, $"viscosity, {ShownUnits.MillipascalSecond.Symbol}", whiskers: true),
             $"Sample {sample.Sample} against its reference ranges: {string.Join("; ", values.Select(value => $"{value.Value.Measurand.Name}, {Words.Short(value.Value.Basis)}, {(value.Verdict is { } verdict ? Words.Of(verdict.Outcome) : "not judged")}"))}.",
