@@ -16,12 +16,16 @@ internal sealed class Jupyter : IDisposable
 
     public Jupyter()
     {
+        Folder = Directory.CreateDirectory(Path.Combine(_folder, "notebooks")).FullName;
+        File.WriteAllText(Path.Combine(Folder, "nuget.config"), $"""
+            <configuration><packageSources><clear /><add key="build" value="{Path.Combine(Repository.Root, "artifacts", "feed")}" /></packageSources></configuration>
+            """);
         WriteKernel();
         LinkPackages();
     }
 
     /// <summary>Folder for a test's own files; it has the feed of this build as its only package source.</summary>
-    public string Folder => Directory.CreateDirectory(Path.Combine(_folder, "notebooks")).FullName;
+    public string Folder { get; }
 
     private static string Packages => typeof(Jupyter).Assembly.GetCustomAttributes<AssemblyMetadataAttribute>().Single(one => one.Key == "PackagesFolder").Value!;
 
@@ -31,9 +35,6 @@ internal sealed class Jupyter : IDisposable
     /// <summary>A notebook of these cells, executed.</summary>
     public ExecutedNotebook Execute(string name, params string[] cells)
     {
-        File.WriteAllText(Path.Combine(Folder, "nuget.config"), $"""
-            <configuration><packageSources><clear /><add key="build" value="{Path.Combine(Repository.Root, "artifacts", "feed")}" /></packageSources></configuration>
-            """);
         var path = Path.Combine(Folder, $"{name}.ipynb");
         File.WriteAllText(path, NewNotebook(cells).ToJsonString());
         return Execute(path);
@@ -46,6 +47,14 @@ internal sealed class Jupyter : IDisposable
         var (exitCode, log) = RunPython("-m", "nbconvert", "--to", "notebook", "--execute", "--allow-errors", "--ExecutePreprocessor.kernel_name=hemorheo-test", "--ExecutePreprocessor.timeout=300", path, "--output-dir", output);
         Assert.True(exitCode == 0, log);
         return new(Path.Combine(output, Path.GetFileName(path)));
+    }
+
+    /// <summary>The notebook as an HTML page, drawn by a browser that has no network.</summary>
+    public string Drawn(ExecutedNotebook notebook)
+    {
+        var (exitCode, log) = RunPython("-m", "nbconvert", "--to", "html", notebook.Path, "--output-dir", _folder);
+        Assert.True(exitCode == 0, log);
+        return Browser.Drawn(Path.Combine(_folder, Path.ChangeExtension(Path.GetFileName(notebook.Path), ".html")), Path.Combine(_folder, "browser"));
     }
 
     /// <summary>Python with Jupyter's folders set to the test's own and no network.</summary>

@@ -1,7 +1,7 @@
 namespace HemoRheo.Notebooks.Tests;
 
 /// <summary>One small notebook, executed once for all tests that look at it.</summary>
-public sealed class ProbeNotebook
+public sealed class ProbeNotebook : IDisposable
 {
     public const int Loading = 0;
     public const int Versions = 1;
@@ -24,11 +24,15 @@ public sealed class ProbeNotebook
         "#r \"nuget:HemoRheo.Notebooks\"",
     ];
 
-    private readonly Lazy<ExecutedNotebook> _executed = new(() =>
+    private readonly Lazy<Jupyter> _jupyter = new(() => new());
+    private readonly Lazy<ExecutedNotebook> _executed;
+    private readonly Lazy<string> _drawn;
+
+    public ProbeNotebook()
     {
-        using var jupyter = new Jupyter();
-        return jupyter.Execute("probe", Cells);
-    });
+        _executed = new(() => _jupyter.Value.Execute("probe", Cells));
+        _drawn = new(() => _jupyter.Value.Drawn(_executed.Value));
+    }
 
     internal ExecutedNotebook Executed
     {
@@ -37,5 +41,21 @@ public sealed class ProbeNotebook
             Jupyter.Needed();
             return _executed.Value;
         }
+    }
+
+    /// <summary>Its page after a browser without a network has drawn it.</summary>
+    internal string Drawn
+    {
+        get
+        {
+            Jupyter.Needed();
+            Browser.Needed();
+            return _drawn.Value;
+        }
+    }
+
+    public void Dispose()
+    {
+        if (_jupyter.IsValueCreated) _jupyter.Value.Dispose();
     }
 }

@@ -52,6 +52,13 @@ public sealed partial class ProbeNotebookTests(ProbeNotebook probe) : IClassFixt
         Assert.Contains("Plotly.newPlot(", probe.Executed.Shown(ProbeNotebook.OwnChart, "text/html"), StringComparison.Ordinal);
 
     [Fact]
+    public void Every_chart_is_drawn_in_a_browser_without_a_network()
+    {
+        Assert.Equal(3, MainDrawing().Count(probe.Drawn));
+        Assert.DoesNotContain("<img width=\"700\"", probe.Drawn, StringComparison.Ordinal);
+    }
+
+    [Fact]
     public void A_frame_is_a_table_with_its_size()
     {
         var html = probe.Executed.Shown(ProbeNotebook.Frame, "text/html");
@@ -71,6 +78,9 @@ public sealed partial class ProbeNotebookTests(ProbeNotebook probe) : IClassFixt
 
     [GeneratedRegex("DecompressionStream")]
     private static partial Regex LibraryScript();
+
+    [GeneratedRegex("class=\"js-plotly-plot\"")]
+    private static partial Regex MainDrawing();
 
     [GeneratedRegex("(src|href)=[\"']?(https?:)?//", RegexOptions.IgnoreCase)]
     private static partial Regex RemoteReference();
