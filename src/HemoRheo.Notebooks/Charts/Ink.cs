@@ -15,7 +15,7 @@ internal static class Ink
     public static OxyColor Alert { get; } = OxyColor.FromRgb(0xb3, 0x4a, 0x00);
 
     /// <summary>Second and later members of a family.</summary>
-    public static OxyColor Muted { get; } = OxyColor.FromRgb(0x6b, 0x72, 0x7a);
+    public static OxyColor Muted { get; } = OxyColor.FromRgb(0x5c, 0x63, 0x6b);
 
     /// <summary>Grid lines.</summary>
     public static OxyColor Grid { get; } = OxyColor.FromRgb(0xe4, 0xe7, 0xea);

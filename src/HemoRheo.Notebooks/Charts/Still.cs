@@ -126,7 +126,7 @@ internal static class Still
     /// <param name="height">Its height, in pixels.</param>
     public static string Svg(PlotModel model, int height)
     {
-        var exporter = new SvgExporter { Width = Width, Height = height, IsDocument = false, UseVerticalTextAlignmentWorkaround = true };
+        var exporter = new SvgExporter { Width = Width, Height = height, IsDocument = false, UseVerticalTextAlignmentWorkaround = true, TextMeasurer = new PixelText() };
         return exporter.ExportToString(model);
     }
 }

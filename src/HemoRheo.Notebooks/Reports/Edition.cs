@@ -48,9 +48,9 @@ internal sealed class Edition
     public JudgedValue? Find(JudgedSample sample, Measurand measurand, HematocritBasis basis) =>
         sample.Values.FirstOrDefault(value => value.Value.Law == Law && value.Value.Basis == basis && value.Value.Measurand == measurand);
 
-    /// <summary>Values of the deciding law at the standard rates, native first, then at the standard hematocrit.</summary>
+    /// <summary>Values of the deciding law at the standard rates, at the standard hematocrit first, then native.</summary>
     public Items<JudgedValue> Deciding(JudgedSample sample) =>
-        new[] { HematocritBasis.Native, Basis }.SelectMany(basis => Rates.Select(rate => Find(sample, rate, basis))).OfType<JudgedValue>().ToItems();
+        new[] { Basis, HematocritBasis.Native }.SelectMany(basis => Rates.Select(rate => Find(sample, rate, basis))).OfType<JudgedValue>().ToItems();
 
     /// <summary>Whether a sample has no value at the standard hematocrit that may be decided on.</summary>
     public bool IsSetAside(JudgedSample sample) => Rates.All(rate => Find(sample, rate, Basis) is not { Value.Decidable: true });

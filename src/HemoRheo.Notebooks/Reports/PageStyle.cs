@@ -9,7 +9,7 @@ internal static class PageStyle
         :root{--text:#22262b;--quiet:#565e66;--line:#cfd5da;--accent:#0f5c7a;--ground:#f4f6f7;--alert:#9a3f00}
         *{box-sizing:border-box}
         html{-webkit-text-size-adjust:100%}
-        body{margin:0 auto;max-width:66rem;padding:1.2rem 1.4rem 3rem;font:16px/1.5 system-ui,sans-serif;color:var(--text);background:#fff}
+        body{margin:0 auto;max-width:78rem;padding:1.2rem 1.4rem 3rem;font:16px/1.5 system-ui,sans-serif;color:var(--text);background:#fff}
         h1{font-size:1.75rem;line-height:1.2;margin:.3rem 0 .1rem}
         h2{font-size:1.25rem;margin:2.4rem 0 .6rem;padding-top:.7rem;border-top:2px solid var(--accent)}
         h3{font-size:1.05rem;margin:1.5rem 0 .4rem}
@@ -27,7 +27,8 @@ internal static class PageStyle
         caption{text-align:left;font-weight:600;padding:.2rem 0 .4rem;max-width:48rem}
         th,td{text-align:left;vertical-align:top;padding:.28rem .9rem .28rem 0;border-bottom:1px solid var(--line)}
         thead th{vertical-align:bottom;border-bottom:2px solid var(--text);font-weight:600}
-        tbody th{font-weight:600}
+        tbody th{font-weight:600;min-width:7rem}
+        table code{white-space:nowrap}
         tfoot th,tfoot td{border-top:2px solid var(--text);border-bottom:none;font-weight:600}
         .n{text-align:right;white-space:nowrap}
         .w{white-space:nowrap}

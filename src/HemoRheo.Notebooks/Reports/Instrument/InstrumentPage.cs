@@ -54,7 +54,7 @@ internal static class InstrumentPage
         var interval = check.Error.Interval().Select(Percent);
         var outcome = Markup.Of($"{Words.Of(check.Outcome)}");
         return Markup.Of($"""
-            <tr><th scope="row">{check.Name}</th><td class="w">{Figures.Moment(check.At)}</td><td>{check.Fluid.Name}, {check.Fluid.Lot}</td><td class="n">{Figures.Fixed(check.Temperature.DegreesCelsius, 2)}</td><td class="n">{Rounding.Digits(check.Measured.MillipascalSeconds, 4)}</td><td class="n">{Rounding.Digits(check.Expected.MillipascalSeconds, 4)}</td><td class="n">{Figures.Signed(Percent(check.Error.X))}</td><td class="w">{Figures.Signed(interval.Lower)} to {Figures.Signed(interval.Upper)}</td><td>{(check.Outcome == CheckOutcome.Passes ? outcome : Markup.Of($"<span class=\"loud\">{outcome}</span>"))}</td><td class="n">{Figures.Probability(check.ProbabilityWithin)}</td></tr>
+            <tr><th scope="row">{check.Name}</th><td class="w">{Figures.Moment(check.At)}</td><td>{check.Fluid.Name}, {check.Fluid.Lot}</td><td class="n">{Figures.Fixed(check.Temperature.DegreesCelsius, 2)}</td><td class="n">{Viscosity(check.Measured, check.Error.StandardUncertainty)}</td><td class="n">{Viscosity(check.Expected, check.Fluid.RelativeExpandedUncertainty / check.Fluid.CoverageFactor)}</td><td class="n">{Figures.Signed(Percent(check.Error.X))}</td><td class="w">{Figures.Signed(interval.Lower)} to {Figures.Signed(interval.Upper)}</td><td>{(check.Outcome == CheckOutcome.Passes ? outcome : Markup.Of($"<span class=\"loud\">{outcome}</span>"))}</td><td class="n">{Figures.Probability(check.ProbabilityWithin)}</td></tr>
 
             """);
     }
@@ -84,6 +84,8 @@ internal static class InstrumentPage
             <thead><tr><th scope="col">sample</th><th scope="col" class="n">loading</th><th scope="col">measured</th><th scope="col">status</th><th scope="col">why</th></tr></thead>
             <tbody>{touched.Select(one => Markup.Of($"<tr><th scope=\"row\">{edition.SampleLink(one.Sample, "../")}</th><td class=\"n\">{one.Loading}</td><td class=\"w\">{Figures.Moment(one.At)}</td><td>{Marks.Status(one.Standing.Status)}</td><td>{one.Standing.Reason}</td></tr>\n"))}</tbody></table></div>
             """));
+
+    private static string Viscosity(Viscosity viscosity, double relative) => Rounding.Number(viscosity.MillipascalSeconds, relative * viscosity.MillipascalSeconds);
 
     private static double Percent(double logError) => 100 * (Math.Exp(logError) - 1);
 }

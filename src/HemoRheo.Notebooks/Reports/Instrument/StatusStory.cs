@@ -12,9 +12,9 @@ internal static class StatusStory
         var limit = $"±{Figures.Fixed(100 * history.Instrument.CheckLimit, 1)} %";
         return last.Outcome switch
         {
-            CheckOutcome.Passes => Markup.Of($"<p><b>Yes, at its last check</b> on {Figures.Date(last.At)}: error {error}, within {limit} with a probability of {Figures.Probability(last.ProbabilityWithin)}.</p>"),
-            CheckOutcome.Fails => Markup.Of($"<p><b>No.</b> Its last check, on {Figures.Date(last.At)}, failed: error {error}, beyond {limit}.</p>"),
-            _ => Markup.Of($"<p><b>Cannot tell.</b> Its last check, on {Figures.Date(last.At)}, showed {error}; the probability of lying within {limit} is {Figures.Probability(last.ProbabilityWithin)}.</p>"),
+            CheckOutcome.Passes => Markup.Of($"<p><b>Yes, at its last check</b> on <span class=\"w\">{Figures.Date(last.At)}</span>: error {error}, within {limit} with a probability of {Figures.Probability(last.ProbabilityWithin)}.</p>"),
+            CheckOutcome.Fails => Markup.Of($"<p><b>No.</b> Its last check, on <span class=\"w\">{Figures.Date(last.At)}</span>, failed: error {error}, beyond {limit}.</p>"),
+            _ => Markup.Of($"<p><b>Cannot tell.</b> Its last check, on <span class=\"w\">{Figures.Date(last.At)}</span>, showed {error}; the probability of lying within {limit} is {Figures.Probability(last.ProbabilityWithin)}.</p>"),
         };
     }
 
@@ -25,6 +25,6 @@ internal static class StatusStory
         var troubles = StatusSpans.Of(history).Where(span => span.Status != InstrumentStatus.InOrder).ToArray();
         return troubles.Length == 0
             ? Markup.Of($"<p>It was in order from its first check, on {Figures.Date(history.Checks[0].At)}, on.</p>")
-            : Markup.Of($"{troubles.Select(span => Markup.Of($"<p><b>{Words.Of(span.Status)}</b> from {Figures.Date(span.From)} to {Figures.Date(span.Until)}</p>"))}");
+            : Markup.Of($"{troubles.Select(span => Markup.Of($"<p><b>{Words.Of(span.Status)}</b> from <span class=\"w\">{Figures.Date(span.From)}</span> to <span class=\"w\">{Figures.Date(span.Until)}</span></p>"))}");
     }
 }

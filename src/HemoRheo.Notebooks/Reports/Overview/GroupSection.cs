@@ -9,15 +9,15 @@ internal static class GroupSection
         if (edition.Summary is not { Measurands.Count: > 0 } summary) return Page.Section("groups", "Groups side by side", Markup.Of($"<p>The study compares no groups.</p>"));
         var first = summary.Measurands[0].First.Label;
         var second = summary.Measurands[0].Second.Label;
-        return Page.Section("groups", $"Groups side by side, by {summary.By}", Markup.Of($"""
+        return Page.Section("groups", summary.By == "group" ? "Groups side by side" : $"Groups side by side, by {summary.By}", Markup.Of($"""
             <p>Ratios are {second} over {first}. The ratio as it is asks how the groups differ as they are; the ratio adjusted for hematocrit asks how they would differ at one hematocrit, knowing that hematocrit is measured with error. Intervals hold the scatter among people and the uncertainty that samples share.</p>
             {Page.Figure(RatioChart.Svg(summary), Alt(summary, first, second), Markup.Of($"Ratios of means with 95 % intervals. Squares: as it is. Circles: adjusted for hematocrit (native values only, since a standardised value already contains the hematocrit)."))}
             <div class="wide"><table><caption>Means by group and their ratio</caption>
-            <thead><tr><th scope="col">quantity</th><th scope="col" class="n">{first}<br/><small>n used of measured</small></th><th scope="col">mean<br/><small>95 % interval</small></th><th scope="col" class="n">{second}<br/><small>n used of measured</small></th><th scope="col">mean<br/><small>95 % interval</small></th><th scope="col">ratio as it is<br/><small>95 % interval, p</small></th><th scope="col">ratio adjusted<br/><small>95 % interval, p</small></th></tr></thead>
+            <thead><tr><th scope="col">quantity</th><th scope="col">{first}<br/><small>n of measured</small></th><th scope="col">mean<br/><small>95 % interval</small></th><th scope="col">{second}<br/><small>n of measured</small></th><th scope="col">mean<br/><small>95 % interval</small></th><th scope="col">ratio as it is<br/><small>95 % interval, p</small></th><th scope="col">ratio adjusted<br/><small>95 % interval, p</small></th></tr></thead>
             <tbody>{summary.Measurands.Select(one => Row(one, edition.Law))}</tbody></table></div>
             <div class="wide"><table><caption>Who is not counted, and why</caption>
             <thead><tr><th scope="col">quantity</th><th scope="col">group</th><th scope="col" class="n">measured</th><th scope="col" class="n">counted</th><th scope="col" class="n">marked</th><th scope="col">set aside, by code of the finding</th></tr></thead>
-            <tbody>{summary.Measurands.SelectMany(one => new[] { Aside(one, one.First), Aside(one, one.Second) })}</tbody></table></div>
+            <tbody>{Aside(summary)}</tbody></table></div>
             <p class="quiet">Methods: {string.Join("; ", summary.Measurands.SelectMany(one => new[] { one.Total.Method, one.Adjusted?.Method }).OfType<string>().Distinct())}.</p>
             """));
     }
@@ -30,8 +30,8 @@ internal static class GroupSection
     private static Markup Quantity(Measurand measurand, HematocritBasis basis) => Markup.Of($"{measurand.Name}, {measurand.Shown.Symbol}<br/><small>{Words.Of(basis)}</small>");
 
     private static Markup Mean(MeasurandSummary one, GroupSummary group) => group.Mean is { } mean
-        ? Markup.Of($"<td class=\"n\">{group.Used} of {group.Samples}</td><td class=\"w\">{Figures.Estimate(one.Measurand, mean)}<br/><small>{Figures.Interval(one.Measurand, mean)}</small></td>")
-        : Markup.Of($"<td class=\"n\">{group.Used} of {group.Samples}</td><td><small>{group.WhyNoMean}</small></td>");
+        ? Markup.Of($"<td class=\"w\">{group.Used} of {group.Samples}</td><td class=\"w\">{Figures.Estimate(one.Measurand, mean)}<br/><small>{Figures.Interval(one.Measurand, mean)}</small></td>")
+        : Markup.Of($"<td class=\"w\">{group.Used} of {group.Samples}</td><td><small>{group.WhyNoMean}</small></td>");
 
     private static Markup Ratio(MeasurandSummary one, GroupDifference? difference) => difference switch
     {
@@ -41,10 +41,13 @@ internal static class GroupSection
         { Difference: { } value } => Markup.Of($"<td class=\"w\">difference {Figures.Estimate(one.Measurand, value)}<br/><small>{Figures.Interval(one.Measurand, value)}, p {Figures.Probability(difference.Probability)}</small></td>"),
     };
 
-    private static Markup Aside(MeasurandSummary one, GroupSummary group) => Markup.Of($"""
-        <tr><th scope="row">{one.Measurand.Name}<br/><small>{Words.Of(one.Basis)}</small></th><td>{group.Label}</td><td class="n">{group.Samples}</td><td class="n">{group.Used}</td><td class="n">{group.Marked}</td><td>{Marks.Reasons(group.SetAside)}</td></tr>
+    private static IEnumerable<Markup> Aside(CohortSummary summary) => summary.Measurands
+        .SelectMany(one => new[] { (one, group: one.First), (one, group: one.Second) })
+        .GroupBy(pair => (pair.group.Label, pair.group.Samples, pair.group.Used, pair.group.Marked, pair.group.SetAside))
+        .Select(alike => Markup.Of($"""
+            <tr><th scope="row">{(alike.Count() == summary.Measurands.Count ? "every quantity" : string.Join("; ", alike.Select(pair => $"{pair.one.Measurand.Name}, {Words.Short(pair.one.Basis)}")))}</th><td>{alike.Key.Label}</td><td class="n">{alike.Key.Samples}</td><td class="n">{alike.Key.Used}</td><td class="n">{alike.Key.Marked}</td><td>{Marks.Reasons(alike.Key.SetAside)}</td></tr>
 
-        """);
+            """));
 
     private static string Alt(CohortSummary summary, string first, string second) =>
         $"Ratios of {second} over {first}: {string.Join("; ", summary.Measurands.Where(one => one.Total.Difference is not null && one.Measurand.Logarithmic).Select(one => $"{one.Measurand.Name}, {Words.Short(one.Basis)}, {Figures.Ratio(one.Total.Difference!)} ({Figures.RatioInterval(one.Total.Difference!)})"))}.";

@@ -9,9 +9,9 @@ internal static class RangeSection
         var ranges = edition.Results.Ranges;
         if (ranges.Count == 0) return Page.Section("ranges", "Reference ranges", Markup.Of($"<p>There is no reference range: too few controls, and none declared. Nothing is judged.</p>"));
         return Page.Section("ranges", "Reference ranges", Markup.Of($"""
-            <p>Limits from this study's controls hold for this study's instruments, handling and people. The limits' own intervals show how far 95 % sure they are not: a verdict that would change within them is marked on the sample's page.</p>
+            <p>Limits from this study's controls hold for this study's instruments, handling and people. Each limit has an interval of its own; where a verdict would change within it, the sample's page says so.</p>
             <div class="wide"><table><caption>Reference ranges</caption>
-            <thead><tr><th scope="col">quantity</th><th scope="col">limits</th><th scope="col">lower limit's 90 % interval</th><th scope="col">upper limit's 90 % interval</th><th scope="col" class="n">controls used</th><th scope="col">left out</th><th scope="col">method and source</th></tr></thead>
+            <thead><tr><th scope="col">quantity</th><th scope="col">limits</th><th scope="col">lower limit<br/><small>90 % interval</small></th><th scope="col">upper limit<br/><small>90 % interval</small></th><th scope="col" class="n">controls<br/>used</th><th scope="col">left out</th><th scope="col">method and source</th></tr></thead>
             <tbody>{ranges.Select(Row)}</tbody></table></div>
             {Strips(edition)}
             """));

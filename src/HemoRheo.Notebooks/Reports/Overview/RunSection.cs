@@ -10,7 +10,7 @@ internal static class RunSection
     {
         var readings = edition.Results.Analyzed.Readings;
         return Markup.Of($"""
-            <p class="lead">{Figures.Count(edition.Results.Samples.Count, "sample")} from {Figures.Count(readings.Files.Count, "file")}, {Figures.Count(readings.Blood.Count, "loading")}, {Figures.Count(edition.Results.Analyzed.Histories.Count, "instrument")} with {Figures.Count(readings.Checks.Count, "check")}. Values by the {edition.Law} law, decided on at hematocrit {edition.Study.Standard.Hematocrit.ToString()} by the {(edition.Basis == HematocritBasis.StandardBySlope ? "slope" : "plasma")} rule, at a probability of {Figures.Fixed(edition.Study.Analysis.Level, 2)}.</p>
+            <p class="lead">{Figures.Count(edition.Results.Samples.Count, "sample")} from {Figures.Count(readings.Files.Count, "file")}, {Figures.Count(readings.Blood.Count, "loading")}, {Figures.Count(edition.Results.Analyzed.Histories.Count, "instrument")} with {Figures.Count(edition.Results.Analyzed.Histories.Sum(history => history.Checks.Count), "check")}. Values by the {edition.Law} law, decided on at hematocrit {edition.Study.Standard.Hematocrit.ToString()} by the {(edition.Basis == HematocritBasis.StandardBySlope ? "slope" : "plasma")} rule, at a probability of {Figures.Fixed(edition.Study.Analysis.Level, 2)}.</p>
             <p>{Rerun(edition)}</p>
             """);
     }

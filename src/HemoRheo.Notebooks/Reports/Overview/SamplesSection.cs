@@ -6,7 +6,7 @@ internal static class SamplesSection
     /// <summary>The section.</summary>
     public static Markup Write(Edition edition) => Page.Section("samples", "All samples", Markup.Of($"""
         <div class="wide"><table><caption>Viscosity at hematocrit {edition.Study.Standard.Hematocrit.ToString()} in {ShownUnits.MillipascalSecond.Symbol}, {edition.Law} law, with its 95 % interval and verdict</caption>
-        <thead><tr><th scope="col">sample</th><th scope="col">group</th><th scope="col" class="n">visit</th><th scope="col" class="n">hematocrit<br/><small>L/L</small></th><th scope="col" class="n">loadings</th>{edition.Rates.Select(rate => Markup.Of($"<th scope=\"col\">at {rate.Rate.ToString()}</th>"))}<th scope="col">instrument</th><th scope="col" class="n">findings</th></tr></thead>
+        <thead><tr><th scope="col">sample</th><th scope="col">group<br/><small>visit</small></th><th scope="col" class="n">hematocrit<br/><small>L/L</small></th><th scope="col" class="n">loadings</th>{edition.Rates.Select(rate => Markup.Of($"<th scope=\"col\">at {rate.Rate.ToString()}</th>"))}<th scope="col">instrument</th><th scope="col" class="n">findings</th></tr></thead>
         <tbody>{edition.Results.Samples.Select(sample => Row(edition, sample))}</tbody></table></div>
         """));
 
@@ -14,7 +14,7 @@ internal static class SamplesSection
     {
         var record = sample.Result.Record;
         return Markup.Of($"""
-            <tr><th scope="row" class="w">{edition.SampleLink(sample.Sample)}</th><td>{edition.GroupOf(sample)}</td><td class="n">{(record is null ? Markup.Of($"{Figures.Nothing}") : Markup.Of($"{record.Visit}"))}</td><td class="n">{(record?.Hematocrit is { } hematocrit ? Figures.Fixed(hematocrit.LiterPerLiter, 3) : Figures.Nothing)}</td><td class="n">{sample.Result.Loadings.Count}</td>{edition.Rates.Select(rate => Cell(edition.Find(sample, rate, edition.Basis)))}<td>{Marks.Status(sample.Result.Status)}</td><td class="n">{sample.Result.Findings.Count}</td></tr>
+            <tr><th scope="row" class="w">{edition.SampleLink(sample.Sample)}</th><td>{edition.GroupOf(sample)}{(record is null ? Markup.Of($"<small>not in the samples table</small>") : Markup.Of($"<br/><small>visit {record.Visit}</small>"))}</td><td class="n">{(record?.Hematocrit is { } hematocrit ? Figures.Fixed(hematocrit.LiterPerLiter, 3) : Figures.Nothing)}</td><td class="n">{sample.Result.Loadings.Count}</td>{edition.Rates.Select(rate => Cell(edition.Find(sample, rate, edition.Basis)))}<td>{Marks.Status(sample.Result.Status)}</td><td class="n">{sample.Result.Findings.Count}</td></tr>
 
             """);
     }
@@ -23,6 +23,6 @@ internal static class SamplesSection
     {
         null => Markup.Of($"<td>{Figures.Nothing}</td>"),
         { Value.Decidable: false } => Markup.Of($"<td class=\"w\">({Figures.Estimate(value.Value)})<br/><small>not decided on</small></td>"),
-        _ => Markup.Of($"<td class=\"w\">{Figures.Estimate(value.Value)} <small>{Figures.Interval(value.Value)}</small><br/>{Marks.Verdict(value)}</td>"),
+        _ => Markup.Of($"<td class=\"w\">{Figures.Estimate(value.Value)} {Marks.Verdict(value)}<br/><small>{Figures.Interval(value.Value)}</small></td>"),
     };
 }
