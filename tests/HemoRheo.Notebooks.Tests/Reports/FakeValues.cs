@@ -10,7 +10,7 @@ internal static class FakeValues
 
     public static Items<SampleValue> Of(string sample, int place, Items<Finding> why) => Bases
         .SelectMany(basis => Rates.Select((rate, i) => new SampleValue(rate, "Casson", basis, Value(sample, Math.Log(Level[i] / 1000) + 0.05 * (place - 4), basis, i), i == 2 ? null : Math.Log(Level[i] / 1000) + 0.05 * (place - 4) + 0.01, why.Count == 0, why)))
-        .Append(new(new FakeYieldStress(), "Casson", HematocritBasis.Native, Value(sample, Math.Log(0.004) + 0.1 * place, HematocritBasis.Native, 0), null, why.Count == 0, why))
+        .Append(new(Measurand.CassonYieldStress, "Casson", HematocritBasis.Native, Value(sample, Math.Log(0.004) + 0.1 * place, HematocritBasis.Native, 0), null, why.Count == 0, why))
         .ToItems();
 
     public static Items<ReferenceRange> Ranges() => new[] { HematocritBasis.StandardByPlasma, HematocritBasis.Native }.SelectMany(basis => Rates.Select((rate, i) => Range(rate, basis, Level[i]))).ToItems();
