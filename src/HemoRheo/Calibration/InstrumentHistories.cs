@@ -52,7 +52,7 @@ internal static class InstrumentHistories
         var bare = new InstrumentPeriod(
             instrument.Name, i + 1, span.Checks[0].At, span.Until, span.Checks, Value.Exact(0), scatter.Size, scatter.DegreesOfFreedom, scatter.Estimate);
         var shared = Value.Mean([.. span.Checks.Select(check => check.Error.Only(SharedByPeriod))]);
-        return bare with { Correction = shared.With(scatter.As(SourceKind.Calibration, bare.Key, 1 / Math.Sqrt(span.Checks.Count))) };
+        return bare with { Correction = shared.With(scatter.OfMean(bare.Key, span.Checks.Count)) };
     });
 
     // The fit and the scatter of each check are what the scatter about the period's mean already shows.

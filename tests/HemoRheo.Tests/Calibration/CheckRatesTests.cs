@@ -8,6 +8,7 @@ namespace HemoRheo.Tests.Calibration;
 /// </summary>
 public class CheckRatesTests
 {
+    // A check scatters by 0.3 % and the 0.31 % of its fit: 0.43 % in all.
     private const int Instruments = 3000;
 
     // 5 % of 3,000, plus three standard errors of a proportion: sqrt(0.05 * 0.95 / 3000) = 0.0040.
@@ -18,7 +19,7 @@ public class CheckRatesTests
     [InlineData(-0.03)]
     public void An_instrument_at_its_limit_is_passed_and_failed_in_about_5_percent_each_when_the_scatter_is_known(double relativeError)
     {
-        var outcomes = Simulate(relativeError, checks: 1, declared: 0.003, seed: 11);
+        var outcomes = Simulate(relativeError, checks: 1, declared: 0.0043, seed: 11);
         Assert.InRange(outcomes.Passed, 0.05 - 3 * 0.0040, Most);
         Assert.InRange(outcomes.Failed, 0.05 - 3 * 0.0040, Most);
     }
@@ -26,7 +27,7 @@ public class CheckRatesTests
     [Fact]
     public void An_instrument_without_an_error_passes_and_never_fails()
     {
-        var outcomes = Simulate(0, checks: 1, declared: 0.003, seed: 12);
+        var outcomes = Simulate(0, checks: 1, declared: 0.0043, seed: 12);
         Assert.InRange(outcomes.Passed, 0.99, 1);
         Assert.Equal(0, outcomes.Failed);
     }

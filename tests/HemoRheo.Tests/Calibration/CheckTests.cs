@@ -5,7 +5,7 @@ namespace HemoRheo.Tests.Calibration;
 public class CheckTests
 {
     // Own uncertainty of a check with the oil at 37 degC: certificate 0.002, coefficient 12 * 0.0003, thermometer 0.022 * 0.1, fit about 0.003: 0.0056 in all.
-    private static readonly Study Declared = TestStudy.With(TestStudy.Rheometer with { CheckScatter = 0.003 });
+    private static readonly Study Declared = TestStudy.With(TestStudy.Rheometer with { CheckScatter = 0.0043 });
 
     [Fact]
     public void Its_budget_has_every_part_with_its_sign()
@@ -15,9 +15,21 @@ public class CheckTests
         Assert.Equal(-0.002, Part(check, SourceKind.Certificate, "lot 7").Amount, 1e-12);
         Assert.Equal(0.0036, Part(check, SourceKind.FluidBeta, "oil").Amount, 1e-12);
         Assert.Equal(0.0022, Part(check, SourceKind.Thermometer, "R1").Amount, 1e-12);
-        Assert.Equal(new Contribution(new(SourceKind.Day, "R1/2026-03-02"), 0.003, "checks of R1"), Part(check, SourceKind.Day, "R1/2026-03-02"));
-        Assert.InRange(Part(check, SourceKind.Fit, "C0/1/0").Amount, 0.0029, 0.0035);
+        var (fit, day) = (Part(check, SourceKind.Fit, "C0/1/0").Amount, Part(check, SourceKind.Day, "R1/2026-03-02"));
+        Assert.InRange(fit, 0.0029, 0.0035);
+        Assert.Equal(0.0043 * 0.0043, day.Amount * day.Amount + fit * fit, 1e-12);
+        Assert.Equal(("checks of R1", double.PositiveInfinity), (day.Estimate, day.DegreesOfFreedom));
         Assert.Equal(5, check.Error.Parts.Count);
+    }
+
+    [Fact]
+    public void Scatter_that_the_fits_explain_keeps_a_tenth_of_its_variance_and_a_hundredth_of_its_degrees_of_freedom()
+    {
+        // Fits alone would scatter by 0.3 %; these two checks scatter by less.
+        var history = History(Check(0, 0.4), Check(1, 0.5));
+        var (scatter, day) = (history.Periods[0].Scatter, Part(history.Checks[1], SourceKind.Day, "R1/2026-03-03"));
+        Assert.Equal(Math.Sqrt(0.1) * scatter, day.Amount, 1e-12);
+        Assert.Equal(0.01, day.DegreesOfFreedom, 1e-12);
     }
 
     [Fact]
@@ -72,7 +84,7 @@ public class CheckTests
     [InlineData(-4.5, CheckOutcome.Fails)]
     public void Passes_fails_or_cannot_tell(double percent, CheckOutcome outcome)
     {
-        // Limit 3 %, u about 0.0064 with the declared scatter: decided beyond 1.645 u = 0.0105 from the limit.
+        // Limit 3 %, u about 0.0064 with the declared scatter (0.0043, fit included): decided beyond 1.645 u = 0.0105 from the limit.
         var check = Assert.Single(History(Declared, Check(0, percent)).Checks);
         Assert.Equal(outcome, check.Outcome);
         Assert.Equal(
