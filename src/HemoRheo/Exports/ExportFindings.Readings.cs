@@ -16,7 +16,7 @@ public static partial class ExportFindings
     public static FindingKind NotFinite { get; } = new("not-finite", Severity.Fault, "A number is spelled as not a number or as infinite; the reading was kept out.", "A division by zero in the instrument's software.", "Look at the reading in the instrument's software.");
 
     /// <summary>A shear rate or speed is zero or negative; the reading was kept for screening to set aside.</summary>
-    public static FindingKind RateNotPositive { get; } = new("rate-not-positive", Severity.Fault, "A shear rate or speed is zero or negative; the reading was kept for screening to set aside.", "A reading at rest, or the other sense of rotation.", "Export only readings of the ramp.");
+    public static FindingKind RateNotPositive { get; } = new("rate-not-positive", Severity.Warning, "A shear rate or speed is zero or negative; the reading was kept for screening to set aside.", "A reading at rest, or the other sense of rotation.", "Export only readings of the ramp.");
 
     /// <summary>A shear stress or torque is zero or negative.</summary>
     public static FindingKind StressNotPositive { get; } = new("stress-not-positive", Severity.Warning, "A shear stress or torque is zero or negative.", "A torque below what the instrument resolves, or a wrong torque zero.", "Check the torque zero.");

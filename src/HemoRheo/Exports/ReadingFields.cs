@@ -6,6 +6,8 @@ internal sealed class ReadingFields(Layout layout, FileFindings findings)
     private static readonly FieldMeaning[] Numbers =
         [FieldMeaning.Speed, FieldMeaning.SetSpeed, FieldMeaning.Torque, FieldMeaning.ShearRate, FieldMeaning.SetShearRate, FieldMeaning.ShearStress, FieldMeaning.Temperature, FieldMeaning.Elapsed];
 
+    private static readonly FieldMeaning[] Needed = [FieldMeaning.Speed, FieldMeaning.Torque, FieldMeaning.ShearRate, FieldMeaning.ShearStress];
+
     private readonly Dictionary<FieldMeaning, LayoutField> _fields = layout.Fields.ToDictionary(field => field.Meaning);
     private readonly double?[] _values = new double?[Enum.GetValues<FieldMeaning>().Length];
 
@@ -21,9 +23,7 @@ internal sealed class ReadingFields(Layout layout, FileFindings findings)
             if (findings.Refused) return;
         }
 
-        if (!kept) return;
-        var whole = (Value(FieldMeaning.Speed) is not null && Value(FieldMeaning.Torque) is not null) || (Value(FieldMeaning.ShearRate) is not null && Value(FieldMeaning.ShearStress) is not null);
-        if (!whole) return;
+        if (!kept || Needed.Any(meaning => texts[meaning] is not null && Value(meaning) is null)) return;
         Question(ExportFindings.RateNotPositive, FieldMeaning.Speed, texts, line, draft, point);
         Question(ExportFindings.RateNotPositive, FieldMeaning.ShearRate, texts, line, draft, point);
         Question(ExportFindings.StressNotPositive, FieldMeaning.Torque, texts, line, draft, point);
@@ -55,7 +55,7 @@ internal sealed class ReadingFields(Layout layout, FileFindings findings)
                 _values[(int)meaning] = field.Unit!.ToSi(number);
                 return true;
             case NumberFault.Empty:
-                findings.Add(draft.Mark(ExportFindings.FieldEmpty, at, column, $"Found an empty field, expected a number in \"{field.Header}\".", point));
+                findings.Add(draft.Mark(ExportFindings.FieldEmpty, at, column, $"Found an empty field, expected a number in \"{field.Header}\"{(Needed.Contains(meaning) ? "; the reading was kept out" : "")}.", point));
                 return true;
             case NumberFault.OtherDecimalSign:
                 findings.Refuse(ExportFindings.DecimalSignDiffers, at, column, $"Found \"{text}\" in \"{field.Header}\", expected the decimal sign \"{layout.DecimalSign}\" that layout {layout.Name} declares.");

@@ -21,8 +21,11 @@ public sealed record Recording(
     Items<Reading> Readings,
     Where Where)
 {
-    /// <summary>What is wrong with it or with single readings of it. A fault here sets the recording aside from decisions until a person has acted; its readings stay.</summary>
+    /// <summary>What is wrong with it or with single readings of it. A fault that names a point concerns that reading alone.</summary>
     public Items<Finding> Findings { get; init; } = Items<Finding>.None;
+
+    /// <summary>Whether a fault concerns the recording as a whole: its readings stay, and nothing of it is decided on until a person has acted.</summary>
+    public bool HasFault => Findings.Any(finding => finding.Severity == Severity.Fault && finding.Where.Point is null);
 
     /// <summary>The local date of the recording.</summary>
     public DateOnly Day => DateOnly.FromDateTime(StartedAt.DateTime);

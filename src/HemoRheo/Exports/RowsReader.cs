@@ -7,6 +7,7 @@ internal sealed class RowsReader(Layout layout, RecordingKind kind, FileFindings
     private readonly ReadingFields _readings = new(layout, findings);
     private readonly Dictionary<string, RecordingDraft> _drafts = [];
     private readonly List<string> _fields = [];
+    private readonly FieldTexts _texts = new();
     private RecordingDraft? _last;
 
     /// <summary>The recordings, in the order they begin.</summary>
@@ -33,21 +34,20 @@ internal sealed class RowsReader(Layout layout, RecordingKind kind, FileFindings
 
     private void Row(ColumnMap map, int line)
     {
-        var texts = new FieldTexts();
-        map.Put(_fields, line, texts);
-        var key = string.Join('\n', Parts.Select(part => texts[part]));
+        map.Put(_fields, line, _texts);
+        var key = string.Join('\n', Parts.Select(part => _texts[part]));
         if (!_drafts.TryGetValue(key, out var draft))
         {
-            draft = _maker.Start(texts, line);
+            draft = _maker.Start(_texts, line);
             if (draft is null) return;
             _drafts.Add(key, draft);
         }
 
         _last = draft;
-        _readings.Add(texts, line, draft);
+        _readings.Add(_texts, line, draft);
     }
 
-    private static FieldMeaning[] Parts =>
+    private static FieldMeaning[] Parts { get; } =
         [FieldMeaning.Sample, FieldMeaning.Person, FieldMeaning.Visit, FieldMeaning.Loading, FieldMeaning.Instrument, FieldMeaning.Geometry, FieldMeaning.Fluid, FieldMeaning.StartedAt];
 
     private void Misfit(TextLine line, int expected)

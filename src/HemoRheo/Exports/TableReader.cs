@@ -58,7 +58,7 @@ internal static class TableReader
         }
 
         foreach (var missing in known.Where(column => column.Required && !header.Any(there => there.Item1 == column.Name)))
-            findings.Refuse(ExportFindings.TableColumnMissing, line, null, $"Found no column {missing.Name}.");
+            findings.Refuse(ExportFindings.TableColumnMissing, line, null, $"Found no column {missing.Name}{(fields.Count == 1 && fields[0].Contains(';', StringComparison.Ordinal) ? "; the fields are separated by semicolons, expected commas" : "")}.");
         return header;
     }
 

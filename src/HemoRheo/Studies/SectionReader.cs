@@ -5,6 +5,8 @@ namespace HemoRheo;
 /// <summary>One section of a study file, read strictly by the keys that <see cref="StudyFileKeys"/> gives it. Faults are collected; a faulty value comes back as NaN or empty and never leaves the reader.</summary>
 internal sealed class SectionReader
 {
+    private static readonly TimeSpan LongestSpan = TimeSpan.FromDays(3660);
+
     private readonly StudyFileFaults _faults;
     private readonly Items<StudyFileKey> _keys;
 
@@ -34,7 +36,12 @@ internal sealed class SectionReader
 
     public Items<double> Amounts(string name) => ListOf(name).Select(node => AmountOf(node, Key(name))).ToItems();
 
-    public TimeSpan Span(string name) => Amount(name) is var seconds && seconds < 1e9 ? TimeSpan.FromSeconds(seconds) : TimeSpan.Zero;
+    public TimeSpan Span(string name)
+    {
+        var seconds = Amount(name);
+        if (seconds > LongestSpan.TotalSeconds) Refuse(name, $"a {name} of more than {LongestSpan.Days} days", "a shorter time", "correct it");
+        return seconds <= LongestSpan.TotalSeconds ? TimeSpan.FromSeconds(seconds) : TimeSpan.Zero;
+    }
 
     public long WholeNumber(string name) => Node(name) is { } node ? Taken<long>(node, Key(name), "a whole number") : 0;
 
@@ -45,7 +52,7 @@ internal sealed class SectionReader
         if (Node(name) is not { } node) return double.NaN;
         var number = (node as TomlScalar)?.Value switch { long whole => whole, double real => real, _ => double.NaN };
         if (double.IsNaN(number)) AddKind(node, Key(name), "a plain number");
-        else if (!Key(name).Bounds.Allow(number)) AddBounds(node, Key(name), node.InWords);
+        else if (!double.IsFinite(number) || !Key(name).Bounds.Allow(number)) AddBounds(node, Key(name), node.InWords);
         return number;
     }
 

@@ -24,16 +24,17 @@ internal static class Spelling
         return plain.ToString();
     }
 
-    /// <summary>The candidate with the fewest changed letters; null where none is near (more than half its letters, and more than two, would change).</summary>
+    /// <summary>The candidate with the fewest changed letters, a letter's case counting least; null where none is near (more than a third of its letters, and more than one, would change).</summary>
     public static string? Nearest(string word, IEnumerable<string> candidates)
     {
         string? nearest = null;
-        var least = int.MaxValue;
+        var least = (int.MaxValue, int.MaxValue);
         foreach (var candidate in candidates)
         {
-            var changes = Changes(word, candidate);
-            if (changes >= least || changes > Math.Max(2, candidate.Length / 2)) continue;
-            (nearest, least) = (candidate, changes);
+            var changes = Changes(word.ToUpperInvariant(), candidate.ToUpperInvariant());
+            if (changes > Math.Max(1, candidate.Length / 3)) continue;
+            var both = (changes, Changes(word, candidate));
+            if (both.CompareTo(least) < 0) (nearest, least) = (candidate, both);
         }
 
         return nearest;

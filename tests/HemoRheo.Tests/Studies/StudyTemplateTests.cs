@@ -9,8 +9,8 @@ public sealed class StudyTemplateTests
         folder.Write("study.toml", Study.Template());
         folder.Write("samples.csv", "sample,person\n");
         folder.Write("people.csv", "person,group\n");
-        folder.Write("exports/.keep", "");
-        folder.Write("checks/.keep", "");
+        Directory.CreateDirectory(folder.PathOf("exports"));
+        Directory.CreateDirectory(folder.PathOf("checks"));
 
         var study = Study.Open(folder.PathOf("study.toml"));
 
