@@ -49,7 +49,9 @@ internal static class FlowCurveChart
         if (fit is { Convergence.Converged: true })
         {
             var line = new LineSeries { Color = color, LineStyle = Ink.Line(index), StrokeThickness = 1.6, Title = $"{law}, loading {number}" };
-            line.Points.AddRange(LawLine.Of(fit).Select(point => new DataPoint(point.Rate, point.Viscosity)));
+            var points = LawLine.Of(fit).ToArray();
+            line.Points.AddRange(points.Select(point => new DataPoint(point.Rate, point.Viscosity)));
+            model.Series.Add(Band(points, color));
             model.Series.Add(line);
         }
 
@@ -57,6 +59,19 @@ internal static class FlowCurveChart
         if (kept.Length > 0) model.Series.Add(Still.Points(kept, color, Ink.Marker(index), 4.5, title: $"loading {number}, kept"));
         var aside = loading.Curve.SetAside.Where(one => Drawable(one.Point)).Select(one => Place(one.Point, one.Findings)).ToArray();
         if (aside.Length > 0) model.Series.Add(Still.Points(aside, color, index == 0 ? MarkerType.Cross : MarkerType.Plus, 5, title: $"loading {number}, set aside"));
+    }
+
+    private static AreaSeries Band(LawPoint[] points, OxyColor color)
+    {
+        var band = new AreaSeries { Color = OxyColors.Transparent, Color2 = OxyColors.Transparent, Fill = OxyColor.FromAColor(45, color), StrokeThickness = 0, RenderInLegend = false };
+        foreach (var point in points)
+        {
+            if (point.Band is not { } ends) continue;
+            band.Points.Add(new(point.Rate, ends.Lower));
+            band.Points2.Add(new(point.Rate, ends.Upper));
+        }
+
+        return band;
     }
 
     private static void AddReported(PlotModel model, SampleValue[] values)

@@ -15,7 +15,7 @@ internal static class LawLine
         {
             var rate = kept.Lower * Math.Pow(kept.Upper / kept.Lower, (double)step / Steps);
             var viscosity = fit.Law.Stress(new(rate), estimates) / new ShearRate(rate);
-            yield return new(rate, viscosity.MillipascalSeconds);
+            yield return new(rate, viscosity.MillipascalSeconds, fit.Usable ? fit.ApparentViscosity(new(rate)).Interval() : null);
         }
     }
 }

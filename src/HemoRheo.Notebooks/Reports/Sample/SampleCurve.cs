@@ -15,7 +15,7 @@ internal static class SampleCurve
             {Page.Figure(
                 FlowCurveChart.Svg(loadings, edition.Law, reported, LowestStress(edition, loadings)),
                 $"Apparent viscosity against shear rate of sample {sample.Sample}: {Figures.Count(loadings.Count, "loading")}, {Figures.Count(kept, "point")} kept, {aside} set aside, with the {edition.Law} law.",
-                Markup.Of($"Apparent viscosity against shear rate, {Words.Of(edition.Study.Analysis.Ramp)} ramp, both axes logarithmic: {Figures.Count(kept, "point")} kept, {aside} set aside. The law is drawn between the kept shear rates only. Reported values are corrected by the instrument's checks and moved to 37 °C, the readings are not."))}
+                Markup.Of($"Apparent viscosity against shear rate, {Words.Of(edition.Study.Analysis.Ramp)} ramp, both axes logarithmic: {Figures.Count(kept, "point")} kept, {aside} set aside. The law is drawn between the kept shear rates only, with its 95 % band from the fit alone. Reported values are corrected by the instrument's checks and moved to 37 °C, the readings are not."))}
             {Residuals(edition, loadings)}
             {Fits(edition, loadings)}
             {Aside(loadings)}
