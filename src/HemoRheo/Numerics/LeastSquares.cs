@@ -9,8 +9,10 @@ internal static class LeastSquares
     private const int IterationLimit = 2000;
     private const int FinishingLimit = 60;
     private const double StepLimit = 1e-12;
-    private const double FirstDamping = 1e-3;
     private const double SmallestPivot = 1e-13;
+
+    /// <summary>Strong at first: a start far off is left by short steps, which a long one may overshoot into a plain without descent.</summary>
+    private const double FirstDamping = 100;
 
     /// <summary>Fits a model. Variance of a datum: (relative * model)^2 + floor^2 at the fitted model; the defaults are ordinary least squares.</summary>
     public static LeastSquaresSolution Solve(PointModel model, ReadOnlySpan<double> data, ReadOnlySpan<double> start, double relative = 0, double floor = 1)

@@ -1,0 +1,80 @@
+namespace HemoRheo.Tests.Fitting;
+
+/// <summary>A curve's fit does not feel its neighbors: the same bits alone, in any batch, in any lane.</summary>
+public class SameBitsTests
+{
+    public static TheoryData<string> Laws => [.. FlowLaw.All.Select(law => law.Name)];
+
+    [Theory]
+    [MemberData(nameof(Laws))]
+    public void A_curve_alone_and_in_a_batch_of_unequal_lengths_has_the_same_bits(string name)
+    {
+        var law = FlowLaw.Named(name);
+        var curves = Mixed(120);
+        var together = Fits.OfAll(curves, law, WeightedFits.Errors);
+        var backwards = Fits.OfAll([.. curves.Reverse()], law, WeightedFits.Errors);
+        for (var i = 0; i < curves.Length; i++)
+        {
+            Assert.Equal(curves[i].Fit(law, WeightedFits.Errors), together[i]);
+            Assert.Equal(together[i], backwards[^(i + 1)]);
+        }
+    }
+
+    [Theory]
+    [MemberData(nameof(Laws))]
+    public void Neighbors_that_are_not_numbers_or_overflow_change_no_bit(string name)
+    {
+        var law = FlowLaw.Named(name);
+        var curve = Mixed(1)[0];
+        var alone = curve.Fit(law, WeightedFits.Errors);
+        foreach (var poison in (double[])[double.NaN, double.PositiveInfinity, -1, 0, 1e-300, 1e300, 1e160])
+        {
+            var neighbor = FlowCurve.Of(Simulated.Rates, [.. Simulated.Rates.Select((rate, i) => i == 3 ? poison : 0.004 * rate)]);
+            var whole = FlowCurve.Of(Simulated.Rates, [.. Simulated.Rates.Select(_ => poison)]);
+            Assert.Equal(alone, Fits.OfAll([neighbor, curve, whole, neighbor], law, WeightedFits.Errors)[1]);
+            Assert.Equal(alone, Fits.OfAll([whole, neighbor, neighbor, curve], law, WeightedFits.Errors)[3]);
+        }
+    }
+
+    /// <summary>The lanes themselves, without the checks of data that keep such curves out.</summary>
+    [Fact]
+    public void A_lane_solves_the_same_beside_poisoned_lanes()
+    {
+        var clean = Solve(1, [0.3, 0.1, 0.05, 0.02]);
+        foreach (var poison in (double[])[double.NaN, double.PositiveInfinity, -1e300, 1e300])
+        {
+            var beside = Solve(poison, [0.3, 0.1, 0.05, 0.02]);
+            Assert.Equal([clean.Parameters[0][1], clean.Parameters[1][1], clean.ChiSquare[1], clean.Inverse[0][1]], [beside.Parameters[0][1], beside.Parameters[1][1], beside.ChiSquare[1], beside.Inverse[0][1]]);
+            Assert.Equal(clean.Ends[1], beside.Ends[1]);
+            Assert.Equal(StopReason.BadData, beside.Ends[0].Reason);
+        }
+    }
+
+    private static LaneSolution Solve(double first, double[] stresses)
+    {
+        double[] rates = [80, 20, 8, 2];
+        var x = rates.Select(rate => new Lane(rate)).ToArray();
+        var y = stresses.Select(stress => new Lane(first == 1 ? stress : first * stress, stress, stress, stress)).ToArray();
+        var present = rates.Select(_ => Lane.Everywhere).ToArray();
+        Lane[] start = [new(first == 1 ? Math.Log(0.004) : first, Math.Log(0.004), -5, -5), new(Math.Log(0.003))];
+        return LaneSolver.Solve(FlowLaw.Casson.StressesAndSlopes, new LaneProblem(x, y, present, start, [Lane.Everywhere, Lane.Everywhere], [new(double.NegativeInfinity), new(double.NegativeInfinity)], 0.01, 0.0003));
+    }
+
+    private static FlowCurve[] Mixed(int count)
+    {
+        var stream = RandomStream.Of(20261201, "same bits", count);
+        var curves = new FlowCurve[count];
+        for (var i = 0; i < count; i++)
+        {
+            var whole = (i % 3) switch
+            {
+                0 => Simulated.Noisy(stream, FlowLaw.Casson, 0.01, 0.0003, 0.005 * Math.Exp(0.3 * stream.Normal()), 0.0033),
+                1 => Simulated.Noisy(stream, FlowLaw.Quemada, 0.01, 0.0003, 0.003, 2 * Math.Exp(0.3 * stream.Normal()), 0.2),
+                _ => Simulated.Noisy(stream, FlowLaw.Newtonian, 0.01, 0.0003, 0.0013),
+            };
+            curves[i] = whole with { Points = whole.Points.Take(12 - i % 7).ToItems() };
+        }
+
+        return curves;
+    }
+}
