@@ -30,4 +30,7 @@ internal sealed class CurveSolution(double[] scaled, double[] inverse, double[] 
 
     /// <summary>Number of the parameter held at its bound; null where none is.</summary>
     public int? Held { get; } = held;
+
+    /// <summary>The same numbers with another end.</summary>
+    public CurveSolution Ended(Convergence end) => new(Scaled, Inverse, Response, Residuals, ChiSquare, end, Held);
 }

@@ -33,7 +33,8 @@ internal static class Fits
         return fits;
     }
 
-    private static double[] StartOf(FlowLaw law, CurveData curve)
+    /// <summary>Where a curve's fit starts, on the fitting scale.</summary>
+    internal static double[] StartOf(FlowLaw law, CurveData curve)
     {
         var guess = new double[law.Parameters.Count];
         law.FirstGuess(curve.Rates, curve.Stresses, guess);

@@ -32,6 +32,7 @@ internal static class Rescue
         var start = near.ToArray();
         start[parameter] = law.Parameters[parameter].ToScaled(law.Parameters[parameter].Lower);
         var held = LaneGroup.Solve(law, [curve], [start], errors, parameter)[0];
+        if (!held.Good) return held.Solution.Ended(new(StopReason.Singular, held.Solution.End.Iterations, $"{boundary.Law}, its boundary, does not describe the curve either"));
         if (!FallsInward(law, curve, held.Solution, errors)) return held.Solution;
         var inside = held.Solution.Scaled.ToArray();
         inside[parameter] = law.Parameters[parameter].ToScaled(boundary.InsideAt(curve.LowestStress));
