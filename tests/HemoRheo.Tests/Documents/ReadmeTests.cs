@@ -28,14 +28,14 @@ public sealed partial class ReadmeTests
         Assert.Matches(JobFirst(), Readme.Text);
     }
 
-    [Fact]
-    public void The_code_has_at_most_twelve_lines() =>
-        Assert.InRange(Code().Split('\n', StringSplitOptions.RemoveEmptyEntries).Length, 5, 12);
-
-    [Fact]
-    public void The_code_prints_what_stands_below_it() => Assert.Equal(Readme.Blocks[3], Run(Code()));
-
-    private static string Code() => Readme.Blocks[2];
+    [Theory]
+    [InlineData(2)]
+    [InlineData(4)]
+    public void The_code_has_at_most_twelve_lines_and_prints_what_stands_below_it(int block)
+    {
+        Assert.InRange(Readme.Blocks[block].Split('\n', StringSplitOptions.RemoveEmptyEntries).Length, 5, 12);
+        Assert.Equal(Readme.Blocks[block + 1], Run(Readme.Blocks[block]));
+    }
 
     private static string Run(string code)
     {
