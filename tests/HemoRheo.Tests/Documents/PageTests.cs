@@ -52,10 +52,11 @@ public sealed partial class PageTests
     {
         var words = Sources.FilesBelow(Path.Combine(Repository.Root, "src")).Append(Path.Combine(Repository.Root, "tests", "HemoRheo.Tests", "Architecture", "Rooms.cs"))
             .SelectMany(file => Names().Matches(File.ReadAllText(file)).Select(name => name.Value)).ToHashSet();
-        var tracked = Tracked.Paths.SelectMany(file => Folders(file)).Concat(Tracked.Paths).ToHashSet();
+        var tracked = Tracked.Paths.SelectMany(Folders).Concat(Tracked.Paths).ToHashSet();
+        words.UnionWith(Tracked.Paths.SelectMany(file => file.Split('/')));
         Faults.None(new Page(path).Codes.Where(code => code switch
         {
-            _ when OnePath().IsMatch(code) => !tracked.Contains(code.TrimEnd('/')) && !IsBuilt(code) && !tracked.Contains($"src/HemoRheo/{code.TrimEnd('/')}"),
+            _ when OnePath().IsMatch(code) => !IsBuilt(code) && !new[] { "", "src/HemoRheo/", "src/HemoRheo.Notebooks/" }.Any(folder => tracked.Contains(folder + code.TrimEnd('/'))),
             _ when OneName().IsMatch(code) => !words.Contains(code),
             _ => false,
         }));

@@ -34,7 +34,8 @@ public sealed partial class ReadmeTests
     public void The_code_has_at_most_twelve_lines_and_prints_what_stands_below_it(int block)
     {
         Assert.InRange(Readme.Blocks[block].Split('\n', StringSplitOptions.RemoveEmptyEntries).Length, 5, 12);
-        Assert.Equal(Readme.Blocks[block + 1], Run(Readme.Blocks[block]));
+        var printed = Run(Readme.Blocks[block]);
+        if (printed != Readme.Blocks[block + 1]) Assert.Fail($"README's code prints:\n{printed}");
     }
 
     private static string Run(string code)
