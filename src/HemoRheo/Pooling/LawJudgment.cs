@@ -31,7 +31,7 @@ internal static class LawJudgment
         var fitsTheStudy = !patterned && !oversized;
         var numbers = string.Create(
             System.Globalization.CultureInfo.InvariantCulture,
-            $"{free.Length} curves, chi-square {chiSquare:F0} on {df} degrees of freedom{(known ? $" (p = {probability:G2})" : "")}, mean residual up to {largest:F2} standard deviations at one place (p = {pattern:G2})");
+            $"{free.Length} curves, chi-square {chiSquare:F0} on {df} degrees of freedom{(known ? FormattableString.Invariant($" (p = {probability:G2})") : "")}, mean residual up to {largest:F2} standard deviations at one place (p = {pattern:G2})");
         var words = patterned ? $"{law.Name} does not fit: the residuals have a common pattern; {numbers}."
             : oversized ? $"{law.Name} does not fit within the declared errors; {numbers}."
             : known && probability < Certain ? $"{law.Name} fits, but the scatter is larger than declared; {numbers}."

@@ -99,7 +99,7 @@ public static class SampleFindings
     /// <summary>The study's slope cannot be used.</summary>
     public static FindingKind NoSlope { get; } = new(
         "no-slope", Severity.Note,
-        "The study's slope against hematocrit cannot be used.",
+        "The study's slope against hematocrit cannot be used, so no value is moved to the standard hematocrit by it.",
         "Too few people, or hematocrit measured too coarsely.",
         "Use the plasma power rule.");
 }

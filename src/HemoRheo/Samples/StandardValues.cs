@@ -27,7 +27,7 @@ internal static class StandardValues
         var k = study.Standard.Hematocrit.LiterPerLiter / hematocrit.LiterPerLiter;
         IEnumerable<Finding> outside = range.Contains(hematocrit.LiterPerLiter)
             ? []
-            : [SampleFindings.OutsidePowerRule.At(new(Sample: sample), $"Hematocrit {hematocrit}; the rule is used from {range.Lower} to {range.Upper} L/L.", hematocrit.LiterPerLiter, hematocrit.LiterPerLiter < range.Lower ? range.Lower : range.Upper)];
+            : [SampleFindings.OutsidePowerRule.At(new(Sample: sample), FormattableString.Invariant($"Hematocrit {hematocrit}; the rule is used from {range.Lower} to {range.Upper} L/L."), hematocrit.LiterPerLiter, hematocrit.LiterPerLiter < range.Lower ? range.Lower : range.Upper)];
         return Standardised(
             study, sample, native, HematocritBasis.StandardByPlasma, StandardisingRule.PlasmaPower, outside,
             StandardHematocritRule.ByPlasma(native.Value, plasma, sample, hematocrit, study.Standard.Hematocrit, counter),

@@ -35,7 +35,7 @@ public static class StudyEvaluation
             progress?.Report(new("budgets", results.Count, samples.Length));
         }
 
-        var pool = new StudyPool(sets.Select(set => set.Scatter).ToItems(), laws.Select(law => evidence[law.Name]).ToItems(), slopes, PoolFindings(study, sets, evidence.Values).ToItems());
+        var pool = new StudyPool(sets.Select(set => set.Scatter).ToItems(), laws.Select(law => evidence[law.Name]).ToItems(), slopes, PoolFindings(study, sets, evidence.Values, slopes).ToItems());
         return new(study, readings, histories, pool, results.ToItems());
     }
 
@@ -81,8 +81,9 @@ public static class StudyEvaluation
         }
     }
 
-    private static IEnumerable<Finding> PoolFindings(Study study, IEnumerable<MeasurandSet> sets, IEnumerable<LawEvidence> evidence)
+    private static IEnumerable<Finding> PoolFindings(Study study, IEnumerable<MeasurandSet> sets, IEnumerable<LawEvidence> evidence, IEnumerable<HematocritSlope> slopes)
     {
+        foreach (var slope in slopes.Where(slope => slope.Law == study.Analysis.DecideBy && slope.WhyNot is not null)) yield return SampleFindings.NoSlope.At(Where.Nowhere, $"{slope.Measurand}, {slope.Law}: {slope.WhyNot}.");
         foreach (var finding in sets.SelectMany(set => set.Scatter.Findings)) yield return finding;
         foreach (var law in evidence.Where(law => law.Law == study.Analysis.DecideBy))
         {

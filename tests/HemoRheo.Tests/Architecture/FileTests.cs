@@ -34,8 +34,8 @@ public sealed class FileTests
         {
             var types = Declared(path).Select(Name).ToArray();
             var file = Path.GetFileNameWithoutExtension(path).Split('.', '{')[0];
-            // Items and Items<T> have one name and two files: the words that make an Items<T> lie in ItemsWords.cs.
-            var fits = types.Length == 1 && (types[0] == file || types[0] + "Words" == file);
+            // Items and Items<T> have one name and two files: the words that make an Items<T> lie in ItemsWords.cs, FlowLaw<T> lies in FlowLawOf.cs.
+            var fits = types.Length == 1 && (types[0] == file || types[0] + "Words" == file || types[0] + "Of" == file);
             if (!fits) wrong.Add($"{Sources.Short(path)} declares {(types.Length == 0 ? "no type" : string.Join(", ", types))}");
         }
 

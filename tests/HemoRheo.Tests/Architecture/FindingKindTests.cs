@@ -28,7 +28,7 @@ public sealed partial class FindingKindTests
         var kind = Kind(property);
         foreach (var sentence in new[] { kind.Meaning, kind.UsualCause, kind.WhatToDo })
         {
-            Assert.True(sentence.Length > 10 && (char.IsUpper(sentence[0]) || char.IsDigit(sentence[0])) && sentence[^1] is '.', $"{kind.Code}: \"{sentence}\" is no sentence.");
+            Assert.True(sentence.Length > 7 && (char.IsUpper(sentence[0]) || char.IsDigit(sentence[0])) && sentence[^1] is '.', $"{kind.Code}: \"{sentence}\" is no sentence.");
         }
 
         Assert.False(string.IsNullOrWhiteSpace(kind.Source), kind.Code);
