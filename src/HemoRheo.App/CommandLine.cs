@@ -1,10 +1,17 @@
 using System.CommandLine;
+using System.CommandLine.Help;
+using System.CommandLine.Parsing;
 using HemoRheo.App.Synthetic;
 
 namespace HemoRheo.App;
 
 /// <summary>The program: its commands, and what becomes of whatever goes wrong.</summary>
-internal sealed class CommandLine(string workingFolder, TextWriter output, TextWriter error)
+/// <param name="workingFolder">Folder that paths on the command line are taken from.</param>
+/// <param name="programFolder">Folder of the program, from which the synthetic cohort is found too.</param>
+/// <param name="output">Where progress and results are told.</param>
+/// <param name="error">Where it is told why the program could not run.</param>
+/// <param name="live">Whether lines of progress may be rewritten.</param>
+internal sealed class CommandLine(string workingFolder, string programFolder, TextWriter output, TextWriter error, bool live)
 {
     /// <summary>Runs one command line.</summary>
     /// <param name="args">The command line.</param>
@@ -15,47 +22,98 @@ internal sealed class CommandLine(string workingFolder, TextWriter output, TextW
         var parsed = Commands().Parse(args, new ParserConfiguration { ResponseFileTokenReplacer = null });
         if (parsed.Errors.Count > 0)
         {
-            foreach (var fault in parsed.Errors) await error.WriteLineAsync(fault.Message);
-            await error.WriteLineAsync("\"hemorheo --help\" shows what can be asked for.");
-            return ExitCode.CouldNotRun;
+            foreach (var fault in parsed.Errors) Tell(fault.Message);
+            return CouldNotRun("\"hemorheo --help\" shows what can be asked for.");
         }
         try
         {
-            return await parsed.InvokeAsync(new InvocationConfiguration { Output = output, Error = error, EnableDefaultExceptionHandler = false }, cancel);
+            return await parsed.InvokeAsync(new InvocationConfiguration { Output = output, Error = error, EnableDefaultExceptionHandler = false, ProcessTerminationTimeout = null }, cancel);
         }
         catch (OperationCanceledException)
         {
-            await error.WriteLineAsync("Stopped. Nothing was written; results of an earlier run are as they were.");
+            return CouldNotRun("Stopped. Nothing was written; results of an earlier run are as they were.");
         }
-        catch (CouldNotRunException fault)
+        catch (Exception fault) when (fault is CouldNotRunException or StudyFileException or FileNotFoundException)
         {
-            await error.WriteLineAsync(fault.Message);
+            return CouldNotRun(fault.Message);
         }
         catch (Exception fault) when (fault is IOException or UnauthorizedAccessException)
         {
-            await error.WriteLineAsync($"A file could not be read or written: {fault.Message}");
+            return CouldNotRun($"A file could not be read or written: {fault.Message}");
         }
+        catch (Exception fault)
+        {
+            return CouldNotRun($"This should not have happened, and nothing was written: {fault.Message} ({fault.GetType().Name}). Please report it with the study file.");
+        }
+    }
+
+    private int CouldNotRun(string why)
+    {
+        Tell(why);
         return ExitCode.CouldNotRun;
     }
 
-    private RootCommand Commands() => new("From rheometer exports of whole blood to a study result, every value with its uncertainty. For research use only.")
+    // A message may quote a file; its lines stay lines, all else that could steer a terminal is shown as a question mark.
+    private void Tell(string message)
     {
-        Synthesize(),
-    };
+        foreach (var line in message.Split('\n')) error.Write(Plain.Text(line.TrimEnd('\r')) + "\n");
+    }
 
-    private Command Synthesize()
+    private RootCommand Commands()
     {
-        var folder = new Argument<string>("folder") { Description = "Folder to write the cohort into; made where it is not there." };
-        var seed = new Option<long>("--seed") { Description = "Seed of all random numbers.", DefaultValueFactory = _ => SyntheticCohort.RepositorySeed };
-        var replace = new Option<bool>("--replace") { Description = "Replace files of the same names." };
-        var command = new Command("synthesize", "Writes a synthetic cohort: invented people, exports with faults put in on purpose, and the truth beside.") { folder, seed, replace };
+        var folder = new Argument<string?>("folder") { Arity = ArgumentArity.ZeroOrOne };
+        folder.Validators.Add(RefuseUnknownOption);
+        var results = new Option<string?>("--output", "-o");
+        var strict = new Option<bool>("--strict");
+        var root = new RootCommand { folder, results, strict, New(), Synthesize() };
+        root.Options.OfType<HelpOption>().Single().Action = new PlainHelp(output);
+        root.SetAction((parsed, cancel) => Task.Run(
+            () =>
+            {
+                var studyFile = parsed.GetValue(folder) is { } named ? StudyLocation.Of(Full(named)) : StudyLocation.OfSyntheticCohort(workingFolder, programFolder);
+                var request = new RunRequest(studyFile, parsed.GetValue(results) is { } place ? Full(place) : null, parsed.GetValue(strict));
+                return new StudyRun(output, live).Of(request, cancel);
+            },
+            cancel));
+        return root;
+    }
+
+    private Command New()
+    {
+        var folder = new Argument<string>("folder");
+        folder.Validators.Add(RefuseUnknownOption);
+        var command = new Command(PlainHelp.New) { folder };
         command.SetAction(parsed =>
         {
-            var target = Path.GetFullPath(parsed.GetValue(folder)!, workingFolder);
-            var count = CohortFolder.Write(target, parsed.GetValue(seed), parsed.GetValue(replace));
-            output.WriteLine($"{count} files of a synthetic cohort are in {target}. No person is in them.");
+            var path = StudyFileToStartFrom.Write(Full(parsed.GetValue(folder)!));
+            output.Write($"{path} is written. Put in your own values, lay exports and tables beside it, then: hemorheo {parsed.GetValue(folder)}\n");
             return ExitCode.Done;
         });
         return command;
     }
+
+    private Command Synthesize()
+    {
+        var folder = new Argument<string>("folder");
+        folder.Validators.Add(RefuseUnknownOption);
+        var seed = new Option<long>("--seed") { DefaultValueFactory = _ => SyntheticCohort.RepositorySeed };
+        var replace = new Option<bool>("--replace");
+        var command = new Command(PlainHelp.Synthesize) { folder, seed, replace };
+        command.SetAction(parsed =>
+        {
+            var target = Full(parsed.GetValue(folder)!);
+            var count = CohortFolder.Write(target, parsed.GetValue(seed), parsed.GetValue(replace));
+            output.Write($"{count} files of a synthetic cohort are in {target}. No person is in them.\n");
+            return ExitCode.Done;
+        });
+        return command;
+    }
+
+    // Else a misspelled option would be taken for a folder.
+    private static void RefuseUnknownOption(ArgumentResult argument)
+    {
+        if (argument.Tokens is [{ Value: ['-', ..] and var word }, ..]) argument.AddError($"There is no option \"{word}\". For a folder of that name write ./{word}");
+    }
+
+    private string Full(string path) => Path.GetFullPath(path, workingFolder);
 }

@@ -1,3 +1,10 @@
 using HemoRheo.App;
 
-return await new CommandLine(Environment.CurrentDirectory, Console.Out, Console.Error).RunAsync(args, CancellationToken.None);
+using var stop = new CancellationTokenSource();
+Console.CancelKeyPress += (_, pressed) =>
+{
+    pressed.Cancel = !stop.IsCancellationRequested;
+    stop.Cancel();
+};
+var program = new CommandLine(Environment.CurrentDirectory, AppContext.BaseDirectory, Console.Out, Console.Error, live: !Console.IsOutputRedirected);
+return await program.RunAsync(args, stop.Token);

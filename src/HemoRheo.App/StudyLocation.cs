@@ -3,7 +3,8 @@ namespace HemoRheo.App;
 /// <summary>Finds the study file that a run is about.</summary>
 internal static class StudyLocation
 {
-    private const string FileName = "study.toml";
+    /// <summary>Name of a study file.</summary>
+    public const string FileName = "study.toml";
     private const string SyntheticFolder = "synthetic-cohort";
 
     /// <summary>The study file of a folder, or the file itself where one is named.</summary>

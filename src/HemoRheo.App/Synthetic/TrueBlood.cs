@@ -10,12 +10,7 @@ namespace HemoRheo.App.Synthetic;
 internal sealed record TrueBlood(double Hematocrit, double Plasma, double Fibrinogen, double InfiniteShear, double CriticalRate, double Ratio)
 {
     /// <summary>Shear stress at a shear rate in 1/s, Pa.</summary>
-    public double StressAt(double rate)
-    {
-        var s = Math.Sqrt(rate / CriticalRate);
-        var quotient = (1 + s) / (Ratio + s);
-        return rate * InfiniteShear * quotient * quotient;
-    }
+    public double StressAt(double rate) => FlowLaw.Quemada.Stress(ShearRate.FromReciprocalSeconds(rate), InfiniteShear, CriticalRate, Ratio).Pascals;
 
     /// <summary>Apparent viscosity at a shear rate in 1/s, Pa.s.</summary>
     public double ViscosityAt(double rate) => StressAt(rate) / rate;

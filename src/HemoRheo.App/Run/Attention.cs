@@ -1,0 +1,57 @@
+namespace HemoRheo.App;
+
+/// <summary>What of a result needs a person.</summary>
+internal static class Attention
+{
+    /// <summary>Whether a person is needed: a failed check, a file that could not be read, or any fault.</summary>
+    public static bool NeedsAPerson(StudyResult results) =>
+        FailedChecks(results).Any() || results.Findings.Any(finding => finding.Severity == Severity.Fault);
+
+    /// <summary>The lines that tell what needs attention.</summary>
+    public static IEnumerable<string> Lines(StudyResult results)
+    {
+        foreach (var history in results.Analyzed.Histories) yield return OfInstrument(history);
+        yield return OfSamples(results);
+        foreach (var kind in results.Findings.GroupBy(finding => finding.Kind).OrderByDescending(kind => kind.Key.Severity).ThenBy(kind => kind.Key.Code, StringComparer.Ordinal))
+        {
+            yield return OfFindings(kind.Key, [.. kind]);
+        }
+    }
+
+    private static IEnumerable<InstrumentCheck> FailedChecks(StudyResult results) =>
+        results.Analyzed.Histories.SelectMany(history => history.Checks).Where(check => check.Outcome == CheckOutcome.Fails);
+
+    private static string OfInstrument(InstrumentHistory history)
+    {
+        var failed = history.Checks.Where(check => check.Outcome == CheckOutcome.Fails).Select(check => $"{check.Name} of {check.Day:yyyy-MM-dd}").ToArray();
+        var undecided = history.Checks.Count(check => check.Outcome == CheckOutcome.CannotTell);
+        return $"instrument {history.Instrument.Name}: {Counted(history.Checks.Count, "check")}"
+            + (failed.Length > 0 ? $", {failed.Length} failed ({string.Join(", ", failed)})" : ", none failed")
+            + (undecided > 0 ? $", {undecided} too uncertain to tell" : "");
+    }
+
+    private static string OfSamples(StudyResult results)
+    {
+        var words = new[]
+        {
+            (InstrumentStatus.InOrder, "in order"),
+            (InstrumentStatus.InDoubt, "in doubt"),
+            (InstrumentStatus.Failed, "measured after a failed check"),
+            (InstrumentStatus.Unknown, "measured before any check"),
+        };
+        var counts = words
+            .Select(word => (Count: results.Samples.Count(sample => sample.Result.Status == word.Item1), Words: word.Item2))
+            .Where(one => one.Count > 0)
+            .Select(one => $"{one.Count} {one.Words}");
+        return $"{Counted(results.Samples.Count, "sample")}: {string.Join(", ", counts)}";
+    }
+
+    private static string OfFindings(FindingKind kind, IReadOnlyList<Finding> findings)
+    {
+        var where = findings[0].Where.ToString();
+        var first = where.Length == 0 ? "" : findings.Count == 1 ? $" ({where})" : $" (first: {where})";
+        return $"{kind.Severity.ToString().ToUpperInvariant(),-8}{kind.Code}, {findings.Count} times: {kind.Meaning}{first}";
+    }
+
+    private static string Counted(int count, string what) => count == 1 ? $"1 {what}" : $"{count} {what}s";
+}
