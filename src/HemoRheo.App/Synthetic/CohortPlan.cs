@@ -12,7 +12,7 @@ internal static class CohortPlan
     public const string SecondGroup = "altitude";
     public const string Instrument = "rheometer-1";
     public const string Geometry = "cup-A";
-    public const string Fluid = "oil-6";
+    public const string Fluid = "oil-5";
     public const string Capillary = "capillary-1";
     public const string Counter = "counter-1";
 

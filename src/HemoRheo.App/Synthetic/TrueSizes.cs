@@ -7,7 +7,7 @@ internal static class TrueSizes
     public const double Relative = 0.01;
     public const double FloorPascals = 0.0002;
     public const double Loading = 0.02;
-    public const double LargestBias = 0.012;
+    public const double LargestBias = 0.008;
     public const double Change = 0.07;
     public const double Day = 0.003;
     public const double CheckFilling = 0.002;
@@ -20,8 +20,8 @@ internal static class TrueSizes
     public const double Plasma = 0.010;
     public const double Hematocrit = 0.006;
     public const double HematocritShared = 0.002;
-    public const double CertifiedPascalSeconds = 0.00625;
-    public const double CertifiedAt = 25;
+    public const double CertifiedPascalSeconds = 0.00485;
+    public const double CertifiedAt = 37;
     public const double CertificateUncertainty = 0.004;
     public const double CertificateCoverage = 2;
     public const double FluidPerKelvin = 0.0220;
