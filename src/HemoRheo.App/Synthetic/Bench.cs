@@ -17,7 +17,7 @@ internal sealed class Bench(long seed, TrueInstrument instrument)
     public SimulatedRecording Measure(PlannedSample sample, TrueBlood blood, int loading)
     {
         var moment = sample.StartedAt[loading - 1];
-        var stream = new KeyedStream(seed, "loading", sample.Sample, loading == 1 ? "1" : "2");
+        var stream = RandomStream.Of(seed, $"loading of {sample.Sample}", loading);
         var error = TrueSizes.Loading * stream.Normal() + instrument.BiasAt(moment) + instrument.DayError(moment);
         var warms = sample.Fault == PlantedFault.TemperatureExcursion && loading == 1;
         double Stress(double rate, bool up, double temperature) =>
@@ -30,7 +30,7 @@ internal sealed class Bench(long seed, TrueInstrument instrument)
     {
         var moment = CohortPlan.CheckAt(week);
         var name = CheckName(week);
-        var stream = new KeyedStream(seed, "check", name);
+        var stream = RandomStream.Of(seed, $"check {name}", 1);
         var error = TrueSizes.CheckFilling * stream.Normal() + instrument.BiasAt(moment) + instrument.DayError(moment);
         double Stress(double rate, bool up, double temperature) =>
             rate * instrument.FluidViscosity * Math.Exp(error - instrument.FluidPerKelvin * (temperature - TrueSizes.CertifiedAt));
@@ -40,7 +40,7 @@ internal sealed class Bench(long seed, TrueInstrument instrument)
     /// <summary>Name of a week's check.</summary>
     public static string CheckName(int week) => $"C-{week}";
 
-    private List<SimulatedReading> Readings(KeyedStream stream, double[] rates, DateTimeOffset moment, bool warms, Func<double, bool, double, double> stressAt)
+    private List<SimulatedReading> Readings(RandomStream stream, double[] rates, DateTimeOffset moment, bool warms, Func<double, bool, double, double> stressAt)
     {
         var zero = instrument.TorqueZero(moment) * TrueSizes.StressPerTorque;
         var settled = 37 + 0.08 * stream.Normal();

@@ -51,8 +51,8 @@ internal static class CohortPlan
         };
         var first = At(day, 9, 0).AddMinutes(55 * slot);
         IReadOnlyList<DateTimeOffset> starts = slot % 2 == 0 ? [first, first.AddMinutes(25)] : [first];
-        var stream = new KeyedStream(seed, "draw", sample);
-        var age = fault == PlantedFault.TooOld ? 400 : Math.Round(stream.Uniform(35, 150));
+        var stream = RandomStream.Of(seed, $"draw of {sample}", 1);
+        var age = fault == PlantedFault.TooOld ? 400 : Math.Round(35 + 115 * stream.Uniform());
         return new(
             sample,
             Name("P", person + 1, 3),

@@ -19,7 +19,7 @@ internal sealed class CohortTables(long seed, TrueInstrument instrument)
 
     private string Row(PlannedSample sample, TrueBlood blood)
     {
-        var stream = new KeyedStream(seed, "beside", sample.Sample);
+        var stream = RandomStream.Of(seed, $"beside {sample.Sample}", 1);
         var hematocrit = blood.Hematocrit + instrument.CounterError + TrueSizes.Hematocrit * stream.Normal();
         var plasma = blood.Plasma * Math.Exp(TrueSizes.Plasma * stream.Normal());
         if (!sample.PlasmaByCapillary) plasma *= OnTheRheometer(sample.StartedAt[0]);

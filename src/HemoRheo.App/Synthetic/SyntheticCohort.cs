@@ -34,10 +34,10 @@ internal static class SyntheticCohort
     private static Dictionary<string, TrueBlood> Truth(long seed, IReadOnlyList<PlannedSample> samples)
     {
         var atFirst = samples.Where(sample => sample.Visit == 1)
-            .ToDictionary(sample => sample.Person, sample => TruePopulation.Draw(new(seed, "person", sample.Person), sample.Man, sample.Second));
+            .ToDictionary(sample => sample.Person, sample => TruePopulation.Draw(RandomStream.Of(seed, $"person {sample.Person}", 1), sample.Man, sample.Second));
         return samples.ToDictionary(
             sample => sample.Sample,
-            sample => sample.Visit == 1 ? atFirst[sample.Person] : TruePopulation.Later(atFirst[sample.Person], new(seed, "visit", sample.Sample)));
+            sample => sample.Visit == 1 ? atFirst[sample.Person] : TruePopulation.Later(atFirst[sample.Person], RandomStream.Of(seed, $"person {sample.Person}", sample.Visit)));
     }
 
     private static IEnumerable<SyntheticFile> Exports(IReadOnlyList<PlannedSample> samples, Func<PlannedSample, IEnumerable<SimulatedRecording>> measured)

@@ -1,5 +1,3 @@
-using System.Globalization;
-
 namespace HemoRheo.App.Synthetic;
 
 /// <summary>The rheometer and the lab as they truly are: what the samples of a period, a day or the whole study share.</summary>
@@ -12,9 +10,9 @@ internal sealed class TrueInstrument
     public TrueInstrument(long seed)
     {
         this.seed = seed;
-        var shared = new KeyedStream(seed, "shared");
-        firstBias = shared.Uniform(-TrueSizes.LargestBias, TrueSizes.LargestBias);
-        biasAfterAdjustment = shared.Uniform(-TrueSizes.LargestBias, TrueSizes.LargestBias);
+        var shared = RandomStream.Of(seed, "shared", 1);
+        firstBias = TrueSizes.LargestBias * (2 * shared.Uniform() - 1);
+        biasAfterAdjustment = TrueSizes.LargestBias * (2 * shared.Uniform() - 1);
         ThermometerError = TrueSizes.Thermometer * shared.Normal();
         BloodPerKelvin = TrueSizes.BloodPerKelvin + TrueSizes.BloodPerKelvinUncertainty * shared.Normal();
         FluidPerKelvin = TrueSizes.FluidPerKelvin + TrueSizes.FluidPerKelvinUncertainty * shared.Normal();
@@ -47,5 +45,5 @@ internal sealed class TrueInstrument
     /// <summary>Torque zero of a day, N.m.</summary>
     public double TorqueZero(DateTimeOffset moment) => TrueSizes.TorqueZero * Of("torque zero", moment).Normal();
 
-    private KeyedStream Of(string what, DateTimeOffset moment) => new(seed, what, moment.ToString("yyyy-MM-dd", CultureInfo.InvariantCulture));
+    private RandomStream Of(string what, DateTimeOffset moment) => RandomStream.Of(seed, $"{what} of {Written.Day(moment)}", 1);
 }

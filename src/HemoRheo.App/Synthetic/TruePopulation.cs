@@ -17,7 +17,7 @@ internal static class TruePopulation
     public const double GroupLogitRatio = -0.30;
 
     /// <summary>The blood of a person at a first visit.</summary>
-    public static TrueBlood Draw(KeyedStream stream, bool man, bool second)
+    public static TrueBlood Draw(RandomStream stream, bool man, bool second)
     {
         var hematocrit = Math.Clamp((man ? 0.462 : 0.418) + (second ? HematocritRise : 0) + 0.022 * stream.Normal(), man ? 0.40 : 0.36, man ? 0.56 : 0.53);
         var fibrinogen = Math.Clamp(2.9 + 0.45 * stream.Normal(), 2.0, 4.0);
@@ -30,7 +30,7 @@ internal static class TruePopulation
     }
 
     /// <summary>The blood of the same person some weeks later.</summary>
-    public static TrueBlood Later(TrueBlood blood, KeyedStream stream) => blood with
+    public static TrueBlood Later(TrueBlood blood, RandomStream stream) => blood with
     {
         Hematocrit = blood.Hematocrit + 0.005 * stream.Normal(),
         InfiniteShear = blood.InfiniteShear * Math.Exp(0.015 * stream.Normal()),

@@ -52,7 +52,7 @@ public sealed class CohortPlanTests
     {
         // Plausibility only: hematocrit of men 0.40 to 0.54 and women 0.36 to 0.48 L/L, plasma 1.16 to 1.40 mPa.s (usual laboratory ranges);
         // at 0.45 L/L and 37 degC 15 to 25 mPa.s at 1 1/s, 7 to 10 at 10 1/s, 4.5 to 5.5 at 100 1/s (order of magnitude of the curves of Chien and of Merrill).
-        var blood = Enumerable.Range(0, 400).Select(i => TruePopulation.Draw(new(seed, "person", $"{i}"), man: i % 2 == 0, second: false)).ToArray();
+        var blood = Enumerable.Range(0, 400).Select(i => TruePopulation.Draw(RandomStream.Of(seed, $"person {i}", 1), man: i % 2 == 0, second: false)).ToArray();
 
         Assert.All(blood, one => Assert.InRange(one.Hematocrit, 0.36, 0.54));
         Assert.All(blood, one => Assert.InRange(one.Plasma, 0.00116, 0.00140));
