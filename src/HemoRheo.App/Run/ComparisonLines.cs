@@ -18,11 +18,12 @@ internal static class ComparisonLines
         var causes = comparison.Changes.Where(change => change.What != Result).ToArray();
         foreach (var change in causes.Take(Longest)) yield return $"{change.What} {change.Name} {Kind(change)}";
         if (causes.Length > Longest) yield return $"and {causes.Length - Longest} more; all are in the pages";
-        foreach (var group in comparison.Changes.Where(change => change.What == Result).GroupBy(change => change.NearestCause))
-        {
-            yield return $"{group.Count()} results changed; nearest cause: {group.Key ?? "not known"}";
-        }
+        var groups = comparison.Changes.Where(change => change.What == Result).GroupBy(change => change.NearestCause).OrderByDescending(group => group.Count()).ToArray();
+        foreach (var group in groups.Take(Longest)) yield return $"{Results(group.Count())} changed; nearest cause: {group.Key ?? "not known"}";
+        if (groups.Length > Longest) yield return $"{Results(groups.Skip(Longest).Sum(group => group.Count()))} changed for {groups.Length - Longest} more causes";
     }
+
+    private static string Results(int count) => count == 1 ? "1 result" : $"{count} results";
 
     private static string Kind(RunChange change) => change.Before is null ? "is new" : change.After is null ? "is gone" : "changed";
 }
