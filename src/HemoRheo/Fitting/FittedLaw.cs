@@ -6,8 +6,8 @@ namespace HemoRheo;
 /// <param name="Errors">The error model.</param>
 /// <param name="Convergence">How the fit ended.</param>
 /// <param name="Parameters">Estimates on the natural scale.</param>
-/// <param name="Scaled">Estimates on the fitting scale (log or logit where bounded).</param>
-/// <param name="Covariance">Covariance of the estimates on the fitting scale, row by row; empty where there is none. With an unknown scale it is already multiplied by the scale estimated from the residuals.</param>
+/// <param name="Scaled">Estimates on the fitting scale (log or logit where bounded); minus infinity for a parameter that is held at its lower bound.</param>
+/// <param name="Covariance">Covariance of the estimates on the fitting scale, row by row, with zero rows for a parameter that is held; empty where there is none. With an unknown scale it is already multiplied by the scale estimated from the residuals.</param>
 /// <param name="StressResponse">Change of each estimate on the fitting scale when a constant stress of 1 Pa is added to every reading (linear response at the solution).</param>
 /// <param name="Residuals">Standardized residuals, (reading - law) / standard deviation, in the order of the curve's kept points.</param>
 /// <param name="Fit">Residuals held against the error model.</param>
