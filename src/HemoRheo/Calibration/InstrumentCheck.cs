@@ -31,4 +31,7 @@ public sealed record InstrumentCheck(
 {
     /// <summary>The local date of the check.</summary>
     public DateOnly Day => DateOnly.FromDateTime(At.DateTime);
+
+    /// <inheritdoc/>
+    public override string ToString() => FormattableString.Invariant($"check {Name} of {Instrument}, {Day:yyyy-MM-dd}: {100 * (Math.Exp(Error.X) - 1):+0.00;-0.00} %, {Outcome}");
 }

@@ -5,4 +5,8 @@ namespace HemoRheo;
 /// <param name="Checks">All its checks, failed ones included.</param>
 /// <param name="Periods">Its periods.</param>
 /// <param name="Findings">Findings about the history as a whole.</param>
-public sealed record InstrumentHistory(Instrument Instrument, Items<InstrumentCheck> Checks, Items<InstrumentPeriod> Periods, Items<Finding> Findings);
+public sealed record InstrumentHistory(Instrument Instrument, Items<InstrumentCheck> Checks, Items<InstrumentPeriod> Periods, Items<Finding> Findings)
+{
+    /// <inheritdoc/>
+    public override string ToString() => $"{Instrument.Name}: {Checks.Count} checks, {Periods.Count} periods, {Findings.Count} findings";
+}

@@ -23,4 +23,7 @@ public sealed record InstrumentPeriod(
 {
     /// <summary>As sources name it.</summary>
     public string Key => $"{Instrument}/{Number}";
+
+    /// <inheritdoc/>
+    public override string ToString() => FormattableString.Invariant($"period {Key}, from {From:yyyy-MM-dd}{(Until is { } end ? FormattableString.Invariant($" to {end:yyyy-MM-dd}") : "")}: {Checks.Count} checks, reads {100 * (Math.Exp(Correction.X) - 1):+0.00;-0.00} %");
 }

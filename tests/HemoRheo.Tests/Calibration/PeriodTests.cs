@@ -121,5 +121,15 @@ public class PeriodTests
         Assert.Empty(history.Findings);
     }
 
+    [Fact]
+    public void Periods_and_checks_are_shown_in_one_line()
+    {
+        var history = History(Check(0, 0.4), Check(7, 0.6), Check(14, 9), Check(21, -0.3));
+        Assert.Equal("R1: 4 checks, 2 periods, 0 findings", history.ToString());
+        Assert.Equal("period R1/1, from 2026-03-02 to 2026-03-16: 2 checks, reads +0.50 %", history.Periods[0].ToString());
+        Assert.Equal("period R1/2, from 2026-03-23: 1 checks, reads -0.30 %", history.Periods[1].ToString());
+        Assert.Equal("check C14 of R1, 2026-03-16: +9.00 %, Fails", history.Checks[2].ToString());
+    }
+
     private static double Amount(Value value, SourceKind kind, string of) => value.Parts.Single(part => part.Source == new Source(kind, of)).Amount;
 }
