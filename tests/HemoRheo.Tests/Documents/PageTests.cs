@@ -81,7 +81,7 @@ public sealed partial class PageTests
         }).OfType<string>());
     }
 
-    private static bool IsBuilt(string path) => path.Split('/')[0] is "artifacts" or "bin" or "obj" or "results";
+    private static bool IsBuilt(string path) => path.Split('/').Any(part => part is "artifacts" or "bin" or "obj" or "results");
 
     private static IEnumerable<string> Folders(string path)
     {
