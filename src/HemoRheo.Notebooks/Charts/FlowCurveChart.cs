@@ -35,7 +35,7 @@ internal static class FlowCurveChart
         model.Axes.Add(Still.Log(AxisPosition.Bottom, "shear rate, 1/s", left, right));
         model.Axes.Add(Still.Log(AxisPosition.Left, "apparent viscosity, mPa·s", heights.Min() / 1.25, heights.Max() * 1.25));
         model.Legends.Add(Still.Legend());
-        if (lowestStress is { } floor and > 0) model.Series.Add(Still.Line(new(left, 1000 * floor / left), new(right, 1000 * floor / right), Ink.Muted, LineStyle.Dot, title: "torque floor"));
+        if (lowestStress is { } floor and > 0) model.Series.Add(Still.Line(new(left, 1000 * floor / left), new(right, 1000 * floor / right), Ink.Muted, LineStyle.LongDash, 1.3, "torque floor"));
         for (var i = 0; i < loadings.Count; i++) Add(model, loadings[i], law, i);
         if (reported.Length > 0) AddReported(model, reported);
         return model;

@@ -28,8 +28,8 @@ internal static class ResidualChart
         model.Axes.Add(Still.Linear(AxisPosition.Left, "standardized residual, 1", -reach, reach));
         model.Legends.Add(Still.Legend());
         model.Series.Add(Still.Line(new(lowest, 0), new(highest, 0), Ink.Text));
-        model.Series.Add(Still.Line(new(lowest, 2), new(highest, 2), Ink.Muted, LineStyle.Dot, title: "two standard deviations"));
-        model.Series.Add(Still.Line(new(lowest, -2), new(highest, -2), Ink.Muted, LineStyle.Dot));
+        model.Series.Add(Still.Line(new(lowest, 2), new(highest, 2), Ink.Muted, LineStyle.LongDash, 1.3, "two standard deviations"));
+        model.Series.Add(Still.Line(new(lowest, -2), new(highest, -2), Ink.Muted, LineStyle.LongDash, 1.3));
         foreach (var ((loading, fit), i) in fits.Select((pair, i) => (pair, i)))
         {
             var points = fit!.Curve.Points.Zip(fit.Residuals, (point, residual) => new DataPoint(point.Rate.ReciprocalSeconds, residual)).Where(point => double.IsFinite(point.Y));

@@ -27,7 +27,7 @@ internal static class GroupSection
 
         """);
 
-    private static Markup Quantity(Measurand measurand, HematocritBasis basis) => Markup.Of($"{measurand.Name}, {measurand.Shown.Symbol}<br/><small>{Words.Of(basis)}</small>");
+    private static Markup Quantity(Measurand measurand, HematocritBasis basis) => Markup.Of($"<span class=\"w\">{measurand.Name}, {measurand.Shown.Symbol}</span><br/><small>{Words.Of(basis)}</small>");
 
     private static Markup Mean(MeasurandSummary one, GroupSummary group) => group.Mean is { } mean
         ? Markup.Of($"<td class=\"w\">{group.Used} of {group.Samples}</td><td class=\"w\">{Figures.Estimate(one.Measurand, mean)}<br/><small>{Figures.Interval(one.Measurand, mean)}</small></td>")

@@ -18,7 +18,7 @@ internal static class RangeSection
     }
 
     private static Markup Row(ReferenceRange range) => Markup.Of($"""
-        <tr><th scope="row">{range.Measurand.Name}, {range.Measurand.Shown.Symbol}<br/><small>{Words.Of(range.Basis)}{(range.Law is null ? "" : $", {range.Law}")}</small></th><td class="w">{Figures.Limits(range.Measurand, range.Limits)}</td><td class="w">{Figures.Limits(range.Measurand, range.LowerLimit)}</td><td class="w">{Figures.Limits(range.Measurand, range.UpperLimit)}</td><td class="n">{(range.Used == 0 ? Markup.Of($"declared") : Markup.Of($"{range.Used}"))}</td><td>{Marks.Reasons(range.Missing)}</td><td>{range.Method}. <small>{range.Source}</small></td></tr>
+        <tr><th scope="row"><span class="w">{range.Measurand.Name}, {range.Measurand.Shown.Symbol}</span><br/><small>{Words.Of(range.Basis)}{(range.Law is null ? "" : $", {range.Law}")}</small></th><td class="w">{Figures.Limits(range.Measurand, range.Limits)}</td><td class="w">{Figures.Limits(range.Measurand, range.LowerLimit)}</td><td class="w">{Figures.Limits(range.Measurand, range.UpperLimit)}</td><td class="n">{(range.Used == 0 ? Markup.Of($"declared") : Markup.Of($"{range.Used}"))}</td><td>{Marks.Reasons(range.Missing)}</td><td>{range.Method}. <small>{range.Source}</small></td></tr>
 
         """);
 

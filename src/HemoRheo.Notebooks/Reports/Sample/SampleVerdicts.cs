@@ -11,7 +11,7 @@ internal static class SampleVerdicts
         return Page.Section("verdicts", "Verdicts", Markup.Of($"""
             {Strip(sample, values)}
             <div class="wide"><table><caption>Values against their reference range, {edition.Law} law. An outcome of at least {Figures.Fixed(edition.Study.Analysis.Level, 2)} decides.</caption>
-            <thead><tr><th scope="col">quantity</th><th scope="col">value<br/><small>95 % interval</small></th><th scope="col">reference range</th><th scope="col">verdict</th><th scope="col" class="n">p below</th><th scope="col" class="n">p within</th><th scope="col" class="n">p above</th><th scope="col">would it change within the limits' own intervals?</th></tr></thead>
+            <thead><tr><th scope="col">quantity</th><th scope="col">value<br/><small>95 % interval</small></th><th scope="col">reference range</th><th scope="col">verdict</th><th scope="col" class="n">p below</th><th scope="col" class="n">p within</th><th scope="col" class="n">p above</th><th scope="col">would it change within<br/>the limits' own intervals?</th></tr></thead>
             <tbody>{values.Select(Row)}</tbody></table></div>
             """));
     }
@@ -28,7 +28,7 @@ internal static class SampleVerdicts
 
     private static Markup Row(JudgedValue value)
     {
-        var quantity = Markup.Of($"<th scope=\"row\">{value.Value.Measurand.Name}, {value.Value.Measurand.Shown.Symbol}<br/><small>{Words.Of(value.Value.Basis)}</small></th><td class=\"w\">{Figures.Estimate(value.Value)}<br/><small>{Figures.Interval(value.Value)}</small></td><td class=\"w\">{Figures.Limits(value.Value.Measurand, value.Range?.Limits)}</td>");
+        var quantity = Markup.Of($"<th scope=\"row\"><span class=\"w\">{value.Value.Measurand.Name}, {value.Value.Measurand.Shown.Symbol}</span><br/><small>{Words.Of(value.Value.Basis)}</small></th><td class=\"w\">{Figures.Estimate(value.Value)}<br/><small>{Figures.Interval(value.Value)}</small></td><td class=\"w\">{Figures.Limits(value.Value.Measurand, value.Range?.Limits)}</td>");
         return value.Verdict is { } verdict
             ? Markup.Of($"""
                 <tr>{quantity}<td>{Marks.Word(verdict)}{(value.Marked ? Markup.Of($"<br/><small>marked: instrument not in order</small>") : Markup.None)}</td><td class="n">{Figures.Probability(verdict.Below)}</td><td class="n">{Figures.Probability(verdict.Within)}</td><td class="n">{Figures.Probability(verdict.Above)}</td><td>{(value.ChangesWithLimits ? Markup.Of($"<b>yes</b>") : Markup.Of($"no"))}</td></tr>
