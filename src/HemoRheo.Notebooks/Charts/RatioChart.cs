@@ -7,11 +7,12 @@ namespace HemoRheo.Notebooks;
 internal static class RatioChart
 {
     private const int Row = 40;
+    private const int LongestLabels = 50;
 
     /// <summary>Height of the picture, in pixels.</summary>
     public static int Height(CohortSummary summary) => 110 + Row * Math.Max(1, Drawable(summary).Length);
 
-    /// <summary>The picture. A difference that could not be had has its row and no mark.</summary>
+    /// <summary>The picture. A quantity whose differences could not be had has no row.</summary>
     /// <param name="summary">The summary; differences on the logarithmic scale are drawn.</param>
     public static string Svg(CohortSummary summary) => Still.Svg(Model(summary), Height(summary));
 
@@ -24,8 +25,8 @@ internal static class RatioChart
         var highest = Math.Max(1.05, intervals.Select(interval => interval.Upper).DefaultIfEmpty(1).Max() * 1.02);
 
         var model = Still.Model();
-        model.Axes.Add(Still.Names([.. rows.Select(row => $"{row.Measurand.Symbol}, {Words.Short(row.Basis)}")]));
-        model.Axes.Add(Still.Log(AxisPosition.Bottom, $"ratio of means, {Labels(summary)} (unit 1; bars: 95 % interval)", lowest, highest));
+        model.Axes.Add(Still.Names([.. rows.Select(row => $"{row.Measurand.Name}, {Words.Short(row.Basis)}")]));
+        model.Axes.Add(Still.Log(AxisPosition.Bottom, $"ratio of means, {Labels(summary)} (bars: 95 % interval)", lowest, highest));
         model.Legends.Add(Still.Legend());
         model.Series.Add(Still.Line(new(1, -0.6), new(1, rows.Length - 0.4), Ink.Text, LineStyle.Dash, title: "no difference"));
         Add(model, rows, row => row.Total, -0.16, "as it is", Ink.Accent, MarkerType.Square);
@@ -33,7 +34,7 @@ internal static class RatioChart
         return model;
     }
 
-    private static MeasurandSummary[] Drawable(CohortSummary summary) => [.. summary.Measurands.Where(one => one.Measurand.Logarithmic)];
+    private static MeasurandSummary[] Drawable(CohortSummary summary) => [.. summary.Measurands.Where(one => one.Measurand.Logarithmic && (one.Total.Difference is not null || one.Adjusted?.Difference is not null))];
 
     private static void Add(PlotModel model, MeasurandSummary[] rows, Func<MeasurandSummary, GroupDifference?> question, double offset, string title, OxyColor color, MarkerType marker)
     {
@@ -46,5 +47,5 @@ internal static class RatioChart
     }
 
     private static string Labels(CohortSummary summary) =>
-        summary.Measurands.Count == 0 ? "second to first group" : $"{summary.Measurands[0].Second.Label} to {summary.Measurands[0].First.Label}";
+        summary.Measurands is [var one, ..] && one.First.Label.Length + one.Second.Label.Length <= LongestLabels ? $"{one.Second.Label} over {one.First.Label}" : "second group over first";
 }

@@ -23,7 +23,7 @@ internal static class Still
         PlotAreaBorderColor = Ink.Muted,
         PlotAreaBorderThickness = new(1, 0, 0, 1),
         Background = OxyColors.White,
-        Padding = new(8, 8, 16, 8),
+        Padding = new(8, 8, 16, 12),
         Culture = CultureInfo.InvariantCulture,
     };
 

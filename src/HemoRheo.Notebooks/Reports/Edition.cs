@@ -56,8 +56,8 @@ internal sealed class Edition
     public bool IsSetAside(JudgedSample sample) => Rates.All(rate => Find(sample, rate, Basis) is not { Value.Decidable: true });
 
     /// <summary>Findings that keep a sample's values from being decided on.</summary>
-    public static IEnumerable<Finding> Reasons(JudgedSample sample) =>
-        sample.Result.Findings.Concat(sample.Values.SelectMany(value => value.Value.Findings)).Where(finding => finding.Severity == Severity.Fault).Distinct();
+    public IEnumerable<Finding> Reasons(JudgedSample sample) =>
+        Deciding(sample).SelectMany(value => value.Value.Findings).Concat(sample.Result.Values.Count == 0 ? sample.Result.Findings : []).OrderByDescending(finding => finding.Severity).Distinct();
 
     /// <summary>A link to a sample's page from a folder.</summary>
     /// <param name="sample">Pseudonym.</param>

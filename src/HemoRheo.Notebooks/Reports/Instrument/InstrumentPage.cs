@@ -45,7 +45,7 @@ internal static class InstrumentPage
 
     private static Markup Checks(InstrumentHistory history) => Page.Section("checks", "Checks", Markup.Of($"""
         <div class="wide"><table><caption>Checks with a calibration fluid</caption>
-        <thead><tr><th scope="col">check</th><th scope="col">outcome</th><th scope="col">when</th><th scope="col">fluid<br/><small>lot</small></th><th scope="col" class="n">tempera-<br/>ture, °C</th><th scope="col" class="n">measured,<br/>mPa·s</th><th scope="col" class="n">certified<br/><small>at that temperature</small></th><th scope="col" class="n">error,<br/>%</th><th scope="col">95 % interval,<br/>%</th><th scope="col" class="n">probability<br/>within ±{Figures.Fixed(100 * history.Instrument.CheckLimit, 1)} %</th></tr></thead>
+        <thead><tr><th scope="col">check</th><th scope="col">outcome</th><th scope="col">when</th><th scope="col">fluid<br/><small>lot</small></th><th scope="col" class="n">tempera-<br/>ture, °C</th><th scope="col" class="n">measured,<br/>mPa·s</th><th scope="col" class="n">certified<br/><small>at that temperature</small></th><th scope="col" class="n">error,<br/>%</th><th scope="col" class="w">95 % interval,<br/>%</th><th scope="col" class="n">probability<br/>within ±{Figures.Fixed(100 * history.Instrument.CheckLimit, 1)} %</th></tr></thead>
         <tbody>{history.Checks.Select(Check)}</tbody></table></div>
         """));
 
@@ -54,7 +54,7 @@ internal static class InstrumentPage
         var interval = check.Error.Interval().Select(Percent);
         var outcome = Markup.Of($"{Words.Of(check.Outcome)}");
         return Markup.Of($"""
-            <tr><th scope="row">{check.Name}</th><td class="w">{(check.Outcome == CheckOutcome.Passes ? outcome : Markup.Of($"<span class=\"loud\">{outcome}</span>"))}</td><td class="w">{Figures.Moment(check.At)}</td><td>{check.Fluid.Name}<br/><small>{check.Fluid.Lot}</small></td><td class="n">{Figures.Fixed(check.Temperature.DegreesCelsius, 2)}</td><td class="n">{Viscosity(check.Measured, check.Error.StandardUncertainty)}</td><td class="n">{Viscosity(check.Expected, check.Fluid.RelativeExpandedUncertainty / check.Fluid.CoverageFactor)}</td><td class="n">{Figures.Signed(Percent(check.Error.X))}</td><td class="w">{Figures.Signed(interval.Lower)} to {Figures.Signed(interval.Upper)}</td><td class="n">{Figures.Probability(check.ProbabilityWithin)}</td></tr>
+            <tr><th scope="row">{check.Name}</th><td class="w">{(check.Outcome == CheckOutcome.Passes ? outcome : Markup.Of($"<span class=\"loud\">{outcome}</span>"))}</td><td class="w">{Figures.Moment(check.At)}</td><td class="w">{check.Fluid.Name}<br/><small>{check.Fluid.Lot}</small></td><td class="n">{Figures.Fixed(check.Temperature.DegreesCelsius, 2)}</td><td class="n">{Viscosity(check.Measured, check.Error.StandardUncertainty)}</td><td class="n">{Viscosity(check.Expected, check.Fluid.RelativeExpandedUncertainty / check.Fluid.CoverageFactor)}</td><td class="n">{Figures.Signed(Percent(check.Error.X))}</td><td class="w">{Figures.Signed(interval.Lower)} to {Figures.Signed(interval.Upper)}</td><td class="n">{Figures.Probability(check.ProbabilityWithin)}</td></tr>
 
             """);
     }

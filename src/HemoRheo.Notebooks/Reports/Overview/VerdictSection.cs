@@ -8,7 +8,9 @@ internal static class VerdictSection
     {
         var counts = (edition.Summary?.Outcomes ?? Counted(edition))
             .Where(count => count.Basis == edition.Basis || count.Basis == HematocritBasis.Native)
-            .OrderBy(count => count.Basis == edition.Basis ? 0 : 1).ToArray();
+            .GroupBy(count => (count.Measurand, count.Basis))
+            .Where(one => one.Any(count => count.Below + count.Within + count.Above + count.Undecided + count.Marked > 0))
+            .OrderBy(one => one.Key.Basis == edition.Basis ? 0 : 1).SelectMany(one => one).ToArray();
         if (counts.Length == 0) return Page.Section("verdicts", "Verdicts", Markup.Of($"<p>No value was judged: there is no reference range.</p>"));
         return Page.Section("verdicts", "Verdicts", Markup.Of($"""
             <p>A verdict says where a value lies against its reference range if one outcome is at least {Figures.Fixed(edition.Study.Analysis.Level, 2)} probable; else it is undecided. Values measured while an instrument was not in order are judged, marked and counted apart.</p>

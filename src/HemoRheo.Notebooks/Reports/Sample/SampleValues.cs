@@ -22,7 +22,7 @@ internal static class SampleValues
         var rows = values.Select(value => value.Measurand).Distinct();
         return Markup.Of($"""
             <div class="wide"><table><caption>Values by the {law} law{(law == edition.Law ? ", which decides" : "")}</caption>
-            <thead><tr><th scope="col">quantity</th>{Bases.Select(basis => Markup.Of($"<th scope=\"col\">{Words.Of(basis)}{(basis == edition.Basis ? Markup.Of($"<br/><small>decides</small>") : Markup.None)}</th>"))}<th scope="col">why not decided on</th></tr></thead>
+            <thead><tr><th scope="col">quantity</th>{Bases.Select(basis => Markup.Of($"<th scope=\"col\">{Words.Of(basis)}{(law == edition.Law && basis == edition.Basis ? Markup.Of($"<br/><small>decides</small>") : Markup.None)}</th>"))}<th scope="col">why not decided on</th></tr></thead>
             <tbody>{rows.Select(measurand => Markup.Of($"<tr><th scope=\"row\">{measurand.Name}{Unit(measurand)}</th>{Bases.Select(basis => Cell(values.FirstOrDefault(value => value.Measurand == measurand && value.Basis == basis)))}<td>{Why(values.Where(value => value.Measurand == measurand))}</td></tr>\n"))}</tbody></table></div>
             """);
     }
@@ -39,7 +39,5 @@ internal static class SampleValues
         return Markup.Of($"<td class=\"w\">{estimate} <small>{Figures.Interval(value)}</small>{between}</td>");
     }
 
-    private static Markup Why(IEnumerable<SampleValue> values) => new(string.Join("<br/>", values.Where(value => !value.Decidable)
-        .SelectMany(value => value.Findings.Where(finding => finding.Severity != Severity.Note)).Select(finding => finding.Code).Distinct()
-        .Select(code => Markup.Of($"<code>{code}</code>").Text)));
+    private static Markup Why(IEnumerable<SampleValue> values) => new(string.Join("<br/>", values.Where(value => !value.Decidable).SelectMany(WhyNot.Codes).Distinct().Select(code => Markup.Of($"<code>{code}</code>").Text)));
 }

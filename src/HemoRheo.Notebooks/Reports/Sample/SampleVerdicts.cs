@@ -20,7 +20,7 @@ internal static class SampleVerdicts
     {
         var rows = values.Where(value => value.Value.Measurand.Logarithmic && double.IsFinite(value.Value.Value.X))
             .Select(value => new StripRow($"{value.Value.Measurand.Symbol}, {Words.Short(value.Value.Basis)}", value.Range, [value], [])).ToArray();
-        return rows.Length == 0 ? Markup.None : Page.Figure(
+        return rows.All(row => row.Range is null) ? Markup.None : Page.Figure(
             RangeStripChart.Svg(rows, $"viscosity, {ShownUnits.MillipascalSecond.Symbol}", whiskers: true),
             $"Sample {sample.Sample} against its reference ranges: {string.Join("; ", values.Select(value => $"{value.Value.Measurand.Name}, {Words.Short(value.Value.Basis)}, {(value.Verdict is { } verdict ? Words.Of(verdict.Outcome) : "not judged")}"))}.",
             Markup.Of($"Each value with its 95 % interval against its reference range (band) with the limits' own 90 % intervals (darker)."));

@@ -29,7 +29,6 @@ internal static class ValueTables
         var value = judged.Value;
         var record = sample.Result.Record;
         var interval = value.Interval();
-        var why = string.Join(" ", value.Findings.Where(finding => finding.Severity != Severity.Note).Select(finding => finding.Code).Distinct());
         var limits = judged.Range?.Limits.Select(value.Measurand.ToShown);
         return
         [
@@ -37,7 +36,7 @@ internal static class ValueTables
             StudyTable.Number(value.Shown), value.Measurand.Shown.Symbol, value.Measurand.Shown.Ucum, StudyTable.Number(Figures.Uncertainty(value.Measurand, value.Value)), StudyTable.Number(value.Value.DegreesOfFreedom),
             StudyTable.Number(interval.Lower), StudyTable.Number(interval.Upper), StudyTable.Number(value.Value.X), StudyTable.Number(value.Value.StandardUncertainty),
             .. Kinds.Select(kind => StudyTable.Number(value.Value.Part(kind))),
-            StudyTable.Number(value.Interpolated is { } working ? value.Measurand.ToShown(working) : null), value.Decidable, value.Decidable ? "" : why, Words.Of(sample.Result.Status),
+            StudyTable.Number(value.Interpolated is { } working ? value.Measurand.ToShown(working) : null), value.Decidable, value.Decidable ? "" : string.Join(" ", WhyNot.Codes(value)), Words.Of(sample.Result.Status),
             judged.Verdict is { } verdict ? Words.Of(verdict.Outcome) : "", StudyTable.Number(judged.Verdict?.Below), StudyTable.Number(judged.Verdict?.Within), StudyTable.Number(judged.Verdict?.Above),
             judged.WhyNotJudged, judged.Marked, judged.ChangesWithLimits, StudyTable.Number(limits?.Lower), StudyTable.Number(limits?.Upper),
         ];
