@@ -89,7 +89,7 @@ public static class Glossary
         new("UCUM code", "Unit of the numbers in this row as its UCUM code."),
         new("lower", "Lower end of the 95 % interval with the whole budget, in the unit beside it."),
         new("upper", "Upper end of the 95 % interval with the whole budget, in the unit beside it."),
-        new("interval", "95 % interval with the whole budget, rounded, in the unit beside it."),
+        new("interval", "Interval of 95 % with the whole budget, rounded, in the unit beside it."),
         new("standard uncertainty", "Combined standard uncertainty, in the unit beside it."),
         new("relative uncertainty", "Combined standard uncertainty relative to the value.", Percent),
         new("degrees of freedom", "Effective degrees of freedom; Inf where every variance is known."),
