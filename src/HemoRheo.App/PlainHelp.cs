@@ -53,6 +53,9 @@ internal sealed class PlainHelp(TextWriter output) : SynchronousCommandLineActio
         """;
 
     /// <inheritdoc/>
+    public override bool ClearsParseErrors => true;
+
+    /// <inheritdoc/>
     public override int Invoke(ParseResult parseResult)
     {
         output.Write(parseResult.CommandResult.Command.Name switch { New => OfNew, Synthesize => OfSynthesize, _ => OfRun });

@@ -49,8 +49,10 @@ internal static class Attention
     private static string OfFindings(FindingKind kind, IReadOnlyList<Finding> findings)
     {
         var where = findings[0].Where.ToString();
-        var first = where.Length == 0 ? "" : findings.Count == 1 ? $" ({where})" : $" (first: {where})";
-        return $"{kind.Severity.ToString().ToUpperInvariant(),-8}{kind.Code}, {findings.Count} times: {kind.Meaning}{first}";
+        var severity = kind.Severity.ToString().ToUpperInvariant();
+        return findings.Count == 1
+            ? $"{severity,-8}{kind.Code}: {findings[0].Message}{(where.Length == 0 ? "" : $" ({where})")}"
+            : $"{severity,-8}{kind.Code}, {findings.Count} times: {kind.Meaning}{(where.Length == 0 ? "" : $" (first: {where})")}";
     }
 
     private static string Counted(int count, string what) => count == 1 ? $"1 {what}" : $"{count} {what}s";

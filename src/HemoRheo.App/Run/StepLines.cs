@@ -22,26 +22,27 @@ internal sealed class StepLines(TextWriter output, bool live) : IProgress<Analys
     {
         if (last is not null && last.Stage != value.Stage) EndLine();
         last = value;
-        if (live) Rewrite();
+        if (live) Rewrite(over: false);
     }
 
     /// <summary>Ends the line of the step that is under way.</summary>
     public void EndLine()
     {
         if (last is null) return;
-        if (live) Rewrite();
-        else output.Write(Line());
+        if (live) Rewrite(over: true);
+        else output.Write(Line(over: true));
         output.Write("\n");
         last = null;
         shown = 0;
     }
 
-    private void Rewrite()
+    private void Rewrite(bool over)
     {
-        var line = Line();
+        var line = Line(over);
         output.Write("\r" + line.PadRight(shown));
         shown = line.Length;
     }
 
-    private string Line() => $"{"",Column}{Plain.Text(last!.Stage)}: {last.Done} of {last.Of}";
+    // A stage that tells only its beginning is named without its count once it is over.
+    private string Line(bool over) => $"{"",Column}{Plain.Text(last!.Stage)}{(over && last.Done < last.Of ? "" : $": {last.Done} of {last.Of}")}";
 }

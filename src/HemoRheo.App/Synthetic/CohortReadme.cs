@@ -51,6 +51,8 @@ internal static class CohortReadme
         | hematocrit | {{TrueSizes.Hematocrit:F3}} L/L a sample, {{TrueSizes.HematocritShared:F3}} L/L shared |
         | plasma viscosity | {{100 * TrueSizes.Plasma:F1}} % a sample |
 
+        A cohort is one draw: made from other seeds, about one interval in twenty misses the truth, that of the effect between the groups included.
+
         Left out: points of a ramp are independent, no sample sediments or slips, and the gap's uneven shear is not simulated (rate and stress are the representative ones of ISO 3219).
 
         ## What is wrong on purpose

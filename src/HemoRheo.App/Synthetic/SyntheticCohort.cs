@@ -4,7 +4,7 @@ namespace HemoRheo.App.Synthetic;
 internal static class SyntheticCohort
 {
     /// <summary>Seed of the cohort in the repository.</summary>
-    public const long RepositorySeed = 20250310;
+    public const long RepositorySeed = 1;
 
     /// <summary>All files of the cohort, in path order.</summary>
     public static IReadOnlyList<SyntheticFile> Files(long seed)

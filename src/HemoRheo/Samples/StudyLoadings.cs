@@ -35,7 +35,7 @@ internal static class StudyLoadings
             var laws = fits.Select(all => all[i]).ToItems();
             var findings = curves[i].Findings
                 .Concat(curves[i].SetAside.SelectMany(aside => aside.Findings))
-                .Concat(laws.SelectMany(fit => fit.Findings))
+                .Concat(laws.Where(fit => fit.Law.Name == study.Analysis.DecideBy).SelectMany(fit => fit.Findings))
                 .Concat(standing.Findings)
                 .ToItems();
             return new LoadingResult(recording, curves[i], hasOther ? Screened(recording, other) : null, laws, standing, findings);
