@@ -14,29 +14,54 @@ internal static class ResultFormats
     {
         Show<Table>(table => TableMarkup.Of(table));
         Show<Finding>(finding => TableMarkup.Of(FindingsView.Table([finding])));
-        Show<Items<Finding>>(FindingsView.Of);
+        Show<Items<Finding>>(FindingsView.Of, findings => FindingsView.Count(findings));
+        ShowReadings();
+        ShowValues();
+        ShowStudies();
+        Show<InteractiveChart>(ChartMarkup.Of);
+        Show<GenericChart>(ChartMarkup.Of, _ => "chart");
+        ShowFrames();
+        Line<ShearRate>();
+        Line<ShearStress>();
+        Line<Viscosity>();
+        Line<Temperature>();
+        Line<Hematocrit>();
+        Line<Interval>();
+    }
+
+    private static void ShowReadings()
+    {
         Show<Study>(StudyView.Of);
         Show<StudyReadings>(ReadingsView.Of);
         Show<FlowCurve>(CurveView.Of);
         Show<FittedLaw>(FitView.Of);
+        Show<LoadingResult>(LoadingView.Of, loading => loading.Curve.ToString());
+        Show<InstrumentHistory>(history => HistoryView.Of([history]), history => $"instrument {history.Instrument.Name}: {history.Checks.Count} checks");
+        Show<Items<InstrumentHistory>>(HistoryView.Of, histories => $"{histories.Count} instruments, {histories.Sum(history => history.Checks.Count)} checks");
+        Show<Items<InstrumentCheck>>(checks => TableMarkup.Of(HistoryView.Table(checks)), checks => $"{checks.Count} checks");
+    }
+
+    private static void ShowValues()
+    {
+        Show<Estimate>(EstimateView.Of);
         Show<SampleResult>(SampleView.Of);
         Show<JudgedSample>(SampleView.Of);
         Show<SampleValue>(BudgetView.Of);
-        Show<JudgedValue>(BudgetView.Of);
-        Show<Items<SampleValue>>(values => TableMarkup.Of(ValuesView.Table(values)));
-        Show<Items<JudgedValue>>(values => TableMarkup.Of(ValuesView.Table(values)));
-        Show<Items<InstrumentCheck>>(checks => TableMarkup.Of(HistoryView.Table(checks)));
-        Show<InstrumentHistory>(history => HistoryView.Of([history]));
-        Show<Items<InstrumentHistory>>(HistoryView.Of);
-        Show<ReferenceRange>(range => RangesView.Of([range]));
-        Show<Items<ReferenceRange>>(RangesView.Of);
+        Show<JudgedValue>(BudgetView.Of, value => $"{value.Value}: {(value.Verdict is { } verdict ? Words.Of(verdict.Outcome) : "not judged")}");
+        Show<Items<SampleValue>>(values => TableMarkup.Of(ValuesView.Table(values)), values => $"{values.Count} values");
+        Show<Items<JudgedValue>>(values => TableMarkup.Of(ValuesView.Table(values)), values => $"{values.Count} values");
+    }
+
+    private static void ShowStudies()
+    {
+        Show<StudyPool>(PoolView.Of, pool => $"pool of {pool.Laws.Count} laws, {pool.Slopes.Count} slopes");
+        Show<Items<LawEvidence>>(laws => TableMarkup.Of(PoolView.Laws(laws)), laws => $"evidence for {laws.Count} laws");
+        Show<ReferenceRange>(range => RangesView.Of([range]), range => $"reference range of {range.Measurand.Name}, {Words.Of(range.Basis)}: {range.Limits.Select(range.Measurand.ToShown)} {range.Measurand.Shown}");
+        Show<Items<ReferenceRange>>(RangesView.Of, ranges => $"{ranges.Count} reference ranges");
         Show<StudyResult>(ResultView.Of);
-        Show<CohortSummary>(SummaryView.Of);
-        Show<RunRecord>(LedgerView.Of);
+        Show<CohortSummary>(SummaryView.Of, summary => $"{summary.Study} by {summary.By}: {summary.Measurands.Count} measurands");
+        Show<RunRecord>(LedgerView.Of, record => $"run of {record.Study}: {record.Results.Count} numbers, digest {record.ResultDigest}");
         Show<RunComparison>(LedgerView.Of);
-        Show<InteractiveChart>(ChartMarkup.Of);
-        Show<GenericChart>(ChartMarkup.Of, _ => "chart");
-        ShowFrames();
     }
 
     private static void ShowFrames()
@@ -52,5 +77,12 @@ internal static class ResultFormats
         Formatter.Register<T>((value, writer) => writer.Write(markup(value).Text), Html);
         Formatter.Register<T>((value, writer) => writer.Write(line?.Invoke(value) ?? value.ToString() ?? ""), Plain);
         Formatter.SetPreferredMimeTypesFor(typeof(T), Html, Plain);
+    }
+
+    private static void Line<T>()
+        where T : struct
+    {
+        Formatter.Register<T>((value, writer) => writer.Write(value.ToString()), Plain);
+        Formatter.SetPreferredMimeTypesFor(typeof(T), Plain);
     }
 }

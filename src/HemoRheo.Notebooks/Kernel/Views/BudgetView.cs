@@ -42,7 +42,7 @@ internal static class BudgetView
     private static Cell Amount(double amount) => Cell.Rounded(amount, amount == 0 ? "0" : amount < 0 ? $"-{Rounding.Uncertainty(-amount)}" : Rounding.Uncertainty(amount));
 
     private static BudgetLine[] Lines(Value value) => [.. value.Parts.GroupBy(part => part.Source.Kind)
-        .Select(kind => new BudgetLine(Name(kind.Key, [.. kind.Select(part => part.Source.Of).Distinct()]), value.Part(kind.Key)!.Value, kind.Min(part => part.DegreesOfFreedom), kind.First().Source.Shared))
+        .Select(kind => new BudgetLine(Name(kind.Key, [.. kind.Select(part => part.Source.Of).Distinct()]), value.Part(kind.Key)!.Value, value.Only(source => source.Kind == kind.Key).DegreesOfFreedom, kind.First().Source.Shared))
         .OrderByDescending(line => Math.Abs(line.Amount))];
 
     private static string Name(SourceKind kind, string[] of) => of switch { [""] => kind.Words(), [var one] => $"{kind.Words()} of {one}", _ => $"{kind.Words()} ({of.Length} parts)" };

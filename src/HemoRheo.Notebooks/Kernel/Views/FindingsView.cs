@@ -15,6 +15,14 @@ internal static class FindingsView
     /// <summary>The same, folded where there are many.</summary>
     public static Markup Folded(Items<Finding> findings) => findings.Count == 0 ? Markup.Of($"<p>No findings.</p>\n") : TableMarkup.Folded(Table(findings), Count(findings));
 
+    /// <summary>How many of each kind, for a whole study.</summary>
+    public static Markup ByKind(Items<Finding> findings)
+    {
+        var kinds = findings.GroupBy(finding => finding.Kind).OrderByDescending(kind => kind.Key.Severity).ThenByDescending(kind => kind.Count());
+        var table = HemoRheo.Table.Of("severity", "code", "count", "meaning", "what to do").WithRows(kinds, kind => [Words.Of(kind.Key.Severity), kind.Key.Code, kind.Count(), kind.Key.Meaning, kind.Key.WhatToDo]);
+        return findings.Count == 0 ? Of(findings) : Markup.Of($"<details open><summary>{Count(findings)}</summary>{TableMarkup.Of(table)}</details>\n");
+    }
+
     /// <summary>How many of each severity, e.g. <c>3 findings: 1 fault, 2 warnings</c>.</summary>
     public static string Count(IReadOnlyCollection<Finding> findings)
     {

@@ -3,7 +3,7 @@ namespace HemoRheo.Notebooks;
 /// <summary>Reference ranges, one row each.</summary>
 internal static class RangesView
 {
-    public static Table Table(IEnumerable<ReferenceRange> ranges) => HemoRheo.Table.Of("measurand", "law", "basis", "lower limit", "lower limit from", "lower limit to", "upper limit", "upper limit from", "upper limit to", "unit", "n", "method", "source").WithRows(
+    public static Table Table(IEnumerable<ReferenceRange> ranges) => HemoRheo.Table.Of("measurand", "law", "basis", "lower limit", "lower limit from", "lower limit to", "upper limit", "upper limit from", "upper limit to", "unit", "n").WithRows(
         ranges,
         range =>
         [
@@ -14,11 +14,12 @@ internal static class RangesView
             .. Limit(range, range.Limits.Upper, range.UpperLimit),
             range.Measurand.Shown.Symbol,
             range.Used,
-            range.Method,
-            range.Source,
         ]);
 
-    public static Markup Of(IEnumerable<ReferenceRange> ranges) => Markup.Of($"{TableMarkup.Of(Table(ranges), "Reference ranges, with the limits' own 90 % intervals")}<p><i>{ResearchUse.Caution}</i></p>\n");
+    public static Markup Of(IReadOnlyCollection<ReferenceRange> ranges) => Markup.Of($"""
+        {TableMarkup.Of(Table(ranges), "Reference ranges, with the limits' own 90 % intervals")}<ul>{ranges.Select(range => $"{range.Method}. {range.Source}").Distinct().Select(method => Markup.Of($"<li>{method}</li>"))}</ul>
+        <p><i>{ResearchUse.Caution}</i></p>
+        """);
 
     private static Cell[] Limit(ReferenceRange range, double limit, Interval? own)
     {

@@ -24,7 +24,7 @@ internal static class ResultView
         });
 
     public static Markup Of(StudyResult result) => Markup.Of($"""
-        {TableMarkup.Of(Table(result), $"{result}; verdicts on values by {result.Study.Analysis.DecideBy}")}{FindingsView.Folded(result.Findings)}<p><i>{ResearchUse.Caution}</i></p>
+        {TableMarkup.Of(Table(result), $"{result}; verdicts on values by {result.Study.Analysis.DecideBy}")}{FindingsView.ByKind(result.Findings)}<p><i>{ResearchUse.Caution}</i></p>
         """);
 
     private static int Count(JudgedValue[] values, Outcome outcome) => values.Count(value => value.Verdict?.Outcome == outcome);

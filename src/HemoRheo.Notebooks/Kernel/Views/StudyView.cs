@@ -19,6 +19,7 @@ internal static class StudyView
         new("ramp analyzed", Words.Of(study.Analysis.Ramp)),
         new("standard hematocrit", $"{study.Standard.Hematocrit}, decided by {Words.Of(study.Standard.DecideBy.Basis())}"),
         new("level of a verdict", string.Create(CultureInfo.InvariantCulture, $"{study.Analysis.Level:P0}")),
-        new("groups", string.Join(", ", study.Groups.Select(group => group.Controls ? $"{group.Label} (controls)" : group.Label))),
+        new("groups", string.Join(", ", study.Groups.Select(group => group.Label))),
+        new("reference ranges from", string.Join(", ", study.Groups.Where(group => group.Controls).Select(group => group.Label))),
     ];
 }

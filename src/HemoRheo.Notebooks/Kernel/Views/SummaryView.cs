@@ -3,8 +3,8 @@ namespace HemoRheo.Notebooks;
 /// <summary>Two groups side by side, measurand by measurand.</summary>
 internal static class SummaryView
 {
-    public static Table Groups(CohortSummary summary) => Table.Of("measurand", "law", "basis", "group", "samples", "n", "set aside", "reasons", "mean", "lower", "upper", "unit").WithRows(
-        summary.Measurands.SelectMany(one => new[] { (one, group: one.First), (one, group: one.Second) }),
+    private static Table Groups(IEnumerable<MeasurandSummary> measurands) => Table.Of("measurand", "law", "basis", "group", "samples", "n", "set aside", "reasons", "mean", "lower", "upper", "unit").WithRows(
+        measurands.SelectMany(one => new[] { (one, group: one.First), (one, group: one.Second) }),
         row =>
         [
             row.one.Measurand.Name,
@@ -19,8 +19,8 @@ internal static class SummaryView
             row.one.Measurand.Shown.Symbol,
         ]);
 
-    public static Table Differences(CohortSummary summary) => Table.Of("measurand", "law", "basis", "question", "ratio", "ratio lower", "ratio upper", "probability", "method", "reason").WithRows(
-        summary.Measurands.Where(one => one.Measurand.Logarithmic).SelectMany(one => new[] { one.Total, one.Adjusted }.OfType<GroupDifference>().Select(difference => (one, difference))),
+    private static Table Differences(IEnumerable<MeasurandSummary> measurands) => Table.Of("measurand", "law", "basis", "question", "ratio", "ratio lower", "ratio upper", "probability", "method", "reason").WithRows(
+        measurands.Where(one => one.Measurand.Logarithmic).SelectMany(one => new[] { one.Total, one.Adjusted }.OfType<GroupDifference>().Select(difference => (one, difference))),
         row =>
         [
             row.one.Measurand.Name,
@@ -33,10 +33,15 @@ internal static class SummaryView
             row.difference.WhyNot,
         ]);
 
-    public static Markup Of(CohortSummary summary) => Markup.Of($"""
-        {TableMarkup.Of(Groups(summary), $"{summary.Study} by {summary.By}: means with 95 % intervals")}{TableMarkup.Of(Differences(summary), "Second group over first, with 95 % intervals")}<ul>{summary.Cautions.Select(caution => Markup.Of($"<li>{caution}</li>"))}</ul>
-        {FindingsView.Folded(summary.Findings)}<p><i>{ResearchUse.Caution}</i></p>
-        """);
+    public static Markup Of(CohortSummary summary)
+    {
+        var compared = summary.Measurands.Where(one => one.Total.Difference is not null).ToArray();
+        var others = summary.Measurands.Except(compared).ToArray();
+        return Markup.Of($"""
+            {TableMarkup.Of(Groups(compared), $"{summary.Study} by {summary.By}: means with 95 % intervals")}{TableMarkup.Of(Differences(compared), "Second group over first, with 95 % intervals")}{TableMarkup.Folded(Groups(others), $"{others.Length} that could not be compared")}{TableMarkup.Folded(Differences(others), "and why not")}<ul>{summary.Cautions.Select(caution => Markup.Of($"<li>{caution}</li>"))}</ul>
+            {FindingsView.Folded(summary.Findings)}<p><i>{ResearchUse.Caution}</i></p>
+            """);
+    }
 
     private static Cell[] Shown(Value? value, Func<double, double> toShown)
     {
