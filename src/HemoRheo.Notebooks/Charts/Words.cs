@@ -64,6 +64,9 @@ internal static class Words
         _ => "the data cannot be fitted",
     };
 
+    /// <summary>A quantity with its unit, where it has one.</summary>
+    public static string WithUnit(Measurand measurand) => measurand.Shown.Symbol == "1" ? measurand.Name : $"{measurand.Name}, {measurand.Shown.Symbol}";
+
     /// <summary>The basis whose values a rule makes.</summary>
     public static HematocritBasis Basis(this StandardisingRule rule) => rule == StandardisingRule.StudySlope ? HematocritBasis.StandardBySlope : HematocritBasis.StandardByPlasma;
 }

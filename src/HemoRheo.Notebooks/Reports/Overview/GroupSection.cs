@@ -6,17 +6,17 @@ internal static class GroupSection
     /// <summary>The section; one line where there is no summary.</summary>
     public static Markup Write(Edition edition)
     {
-        if (edition.Summary is not { Measurands.Count: > 0 } summary) return Page.Section("groups", "Groups side by side", Markup.Of($"<p>The study compares no groups.</p>"));
+        if (edition.Summary is not { Measurands.Count: > 0 } given) return Page.Section("groups", "Groups side by side", Markup.Of($"<p>The study compares no groups.</p>"));
+        var summary = given with { Measurands = given.Measurands.OrderBy(one => one.Law == edition.Law ? 0 : 1).ThenBy(one => one.Basis == edition.Basis ? 0 : 1).ToItems() };
         var first = summary.Measurands[0].First.Label;
         var second = summary.Measurands[0].Second.Label;
-        var rows = summary.Measurands.OrderBy(one => one.Law == edition.Law ? 0 : 1).ThenBy(one => one.Basis == edition.Basis ? 0 : 1);
         return Page.Section("groups", summary.By == "group" ? "Groups side by side" : $"Groups side by side, by {summary.By}", Markup.Of($"""
             <p>Ratios are {second} over {first}. The ratio as it is asks how the groups differ as they are; the ratio adjusted for hematocrit asks how they would differ at one hematocrit, knowing that hematocrit is measured with error. Intervals hold the scatter among people and the uncertainty that samples share.</p>
             {Picture(summary, first, second)}
             <div class="wide"><table><caption>Means by group and their ratio</caption>
             <thead><tr><th scope="col" rowspan="2">quantity</th><th scope="colgroup" colspan="2">{first}</th><th scope="colgroup" colspan="2">{second}</th><th scope="col" rowspan="2">ratio as it is<br/><small>95 % interval, p</small></th><th scope="col" rowspan="2">ratio adjusted<br/><small>95 % interval, p</small></th></tr>
             <tr><th scope="col"><small>n of measured</small></th><th scope="col">mean <small>95 % interval</small></th><th scope="col"><small>n of measured</small></th><th scope="col">mean <small>95 % interval</small></th></tr></thead>
-            <tbody>{rows.Select(one => Row(one, edition.Law))}</tbody></table></div>
+            <tbody>{summary.Measurands.Select(one => Row(one, edition.Law))}</tbody></table></div>
             <div class="wide"><table><caption>Who is not counted, and why</caption>
             <thead><tr><th scope="col">quantity</th><th scope="col">group</th><th scope="col" class="n">measured</th><th scope="col" class="n">counted</th><th scope="col" class="n">marked</th><th scope="col">set aside, by code of the finding</th></tr></thead>
             <tbody>{Aside(summary)}</tbody></table></div>
@@ -45,7 +45,7 @@ internal static class GroupSection
             : Markup.Of($"<tr>{quantity}{Mean(one, one.First)}{Mean(one, one.Second)}{Ratio(one, one.Total)}{Ratio(one, one.Adjusted)}</tr>\n");
     }
 
-    private static Markup Quantity(Measurand measurand, HematocritBasis basis) => Markup.Of($"<span class=\"w\">{measurand.Name}{(measurand.Shown.Symbol == "1" ? "" : $", {measurand.Shown.Symbol}")}</span><br/><small>{Words.Of(basis)}</small>");
+    private static Markup Quantity(Measurand measurand, HematocritBasis basis) => Markup.Of($"<span class=\"w\">{Words.WithUnit(measurand)}</span><br/><small>{Words.Of(basis)}</small>");
 
     private static Markup Mean(MeasurandSummary one, GroupSummary group) => group.Mean is { } mean
         ? Markup.Of($"<td class=\"w\">{group.Used} of {group.Samples}</td><td class=\"w\">{Figures.Estimate(one.Measurand, mean)}<br/><small>{Figures.Interval(one.Measurand, mean)}</small></td>")

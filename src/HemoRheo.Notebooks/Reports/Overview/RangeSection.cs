@@ -6,19 +6,23 @@ internal static class RangeSection
     /// <summary>The section.</summary>
     public static Markup Write(Edition edition)
     {
-        var ranges = edition.Results.Ranges;
-        if (ranges.Count == 0) return Page.Section("ranges", "Reference ranges", Markup.Of($"<p>There is no reference range: too few controls, and none declared. Nothing is judged.</p>"));
+        var ranges = edition.Results.Ranges.OrderBy(range => range.Basis == edition.Basis ? 0 : 1).ToArray();
+        var methods = ranges.Select(Method).Distinct().ToList();
+        if (ranges.Length == 0) return Page.Section("ranges", "Reference ranges", Markup.Of($"<p>There is no reference range: too few controls, and none declared. Nothing is judged.</p>"));
         return Page.Section("ranges", "Reference ranges", Markup.Of($"""
             <p>Limits from this study's controls hold for this study's instruments, handling and people. Each limit has an interval of its own; where a verdict would change within it, the sample's page says so.</p>
             <div class="wide"><table><caption>Reference ranges</caption>
-            <thead><tr><th scope="col">quantity</th><th scope="col">limits</th><th scope="col">lower limit<br/><small>90 % interval</small></th><th scope="col">upper limit<br/><small>90 % interval</small></th><th scope="col" class="n">controls<br/>used</th><th scope="col">left out</th><th scope="col">method and source</th></tr></thead>
-            <tbody>{ranges.Select(Row)}</tbody></table></div>
+            <thead><tr><th scope="col">quantity</th><th scope="col" class="n">limits</th><th scope="col" class="n">lower limit<br/><small>90 % interval</small></th><th scope="col" class="n">upper limit<br/><small>90 % interval</small></th><th scope="col" class="n">controls<br/>used</th><th scope="col">left out</th><th scope="col">method</th></tr></thead>
+            <tbody>{ranges.Select(range => Row(range, methods.IndexOf(Method(range)) + 1))}</tbody></table></div>
+            <ol class="quiet">{methods.Select(method => Markup.Of($"<li>{method}</li>"))}</ol>
             {Strips(edition)}
             """));
     }
 
-    private static Markup Row(ReferenceRange range) => Markup.Of($"""
-        <tr><th scope="row"><span class="w">{range.Measurand.Name}, {range.Measurand.Shown.Symbol}</span><br/><small>{Words.Of(range.Basis)}{(range.Law is null ? "" : $", {range.Law}")}</small></th><td class="w">{Figures.Limits(range.Measurand, range.Limits)}</td><td class="w">{Figures.Limits(range.Measurand, range.LowerLimit)}</td><td class="w">{Figures.Limits(range.Measurand, range.UpperLimit)}</td><td class="n">{(range.Used == 0 ? Markup.Of($"declared") : Markup.Of($"{range.Used}"))}</td><td>{Marks.Reasons(range.Missing)}</td><td>{range.Method}. <small>{range.Source}</small></td></tr>
+    private static string Method(ReferenceRange range) => $"{range.Method}. {range.Source}";
+
+    private static Markup Row(ReferenceRange range, int method) => Markup.Of($"""
+        <tr><th scope="row"><span class="w">{Words.WithUnit(range.Measurand)}</span><br/><small>{Words.Of(range.Basis)}{(range.Law is null ? "" : $", {range.Law}")}</small></th><td class="n">{Figures.Limits(range.Measurand, range.Limits)}</td><td class="n">{Figures.Limits(range.Measurand, range.LowerLimit)}</td><td class="n">{Figures.Limits(range.Measurand, range.UpperLimit)}</td><td class="n">{(range.Used == 0 ? Markup.Of($"declared") : Markup.Of($"{range.Used}"))}</td><td>{Marks.Reasons(range.Missing)}</td><td>{method}</td></tr>
 
         """);
 

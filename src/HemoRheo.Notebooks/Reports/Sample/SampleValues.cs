@@ -23,11 +23,9 @@ internal static class SampleValues
         return Markup.Of($"""
             <div class="wide"><table><caption>Values by the {law} law{(law == edition.Law ? ", which decides" : "")}</caption>
             <thead><tr><th scope="col">quantity</th>{Bases.Select(basis => Markup.Of($"<th scope=\"col\">{Words.Of(basis)}{(law == edition.Law && basis == edition.Basis ? Markup.Of($"<br/><small>decides</small>") : Markup.None)}</th>"))}<th scope="col">why not decided on</th></tr></thead>
-            <tbody>{rows.Select(measurand => Markup.Of($"<tr><th scope=\"row\">{measurand.Name}{Unit(measurand)}</th>{Bases.Select(basis => Cell(values.FirstOrDefault(value => value.Measurand == measurand && value.Basis == basis)))}<td>{Why(values.Where(value => value.Measurand == measurand))}</td></tr>\n"))}</tbody></table></div>
+            <tbody>{rows.Select(measurand => Markup.Of($"<tr><th scope=\"row\">{Words.WithUnit(measurand)}</th>{Bases.Select(basis => Cell(values.FirstOrDefault(value => value.Measurand == measurand && value.Basis == basis)))}<td>{Why(values.Where(value => value.Measurand == measurand))}</td></tr>\n"))}</tbody></table></div>
             """);
     }
-
-    private static string Unit(Measurand measurand) => measurand.Shown.Symbol == "1" ? "" : $", {measurand.Shown.Symbol}";
 
     private static Markup Cell(SampleValue? value)
     {

@@ -28,7 +28,7 @@ internal static class SampleVerdicts
 
     private static Markup Row(JudgedValue value)
     {
-        var quantity = Markup.Of($"<th scope=\"row\"><span class=\"w\">{value.Value.Measurand.Name}, {value.Value.Measurand.Shown.Symbol}</span><br/><small>{Words.Of(value.Value.Basis)}</small></th><td class=\"w\">{Figures.Estimate(value.Value)}<br/><small>{Figures.Interval(value.Value)}</small></td><td class=\"w\">{Figures.Limits(value.Value.Measurand, value.Range?.Limits)}</td>");
+        var quantity = Markup.Of($"<th scope=\"row\"><span class=\"w\">{Words.WithUnit(value.Value.Measurand)}</span><br/><small>{Words.Of(value.Value.Basis)}</small></th><td class=\"w\">{Figures.Estimate(value.Value)}<br/><small>{Figures.Interval(value.Value)}</small></td><td class=\"w\">{Figures.Limits(value.Value.Measurand, value.Range?.Limits)}</td>");
         return value.Verdict is { } verdict
             ? Markup.Of($"""
                 <tr>{quantity}<td>{Marks.Word(verdict)}{(value.Marked ? Markup.Of($"<br/><small>marked: instrument not in order</small>") : Markup.None)}</td><td class="n">{Figures.Probability(verdict.Below)}</td><td class="n">{Figures.Probability(verdict.Within)}</td><td class="n">{Figures.Probability(verdict.Above)}</td><td>{(value.ChangesWithLimits ? Markup.Of($"<b>yes</b>") : Markup.Of($"no"))}</td></tr>
