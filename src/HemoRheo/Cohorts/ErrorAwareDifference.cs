@@ -14,37 +14,19 @@ namespace HemoRheo;
 /// </remarks>
 internal sealed record ErrorAwareDifference(double Difference, double Slope, double Scatter, double SlopeUncertainty, double MeanDistance, int DegreesOfFreedom)
 {
-    internal const string TooCoarse = "hematocrit is measured too coarsely to adjust";
-
-    /// <summary>The difference, or null where q is below three times its standard error or there are too few.</summary>
+    /// <summary>The difference, or null where x scatters too little beyond its error or there are too few.</summary>
     internal static ErrorAwareDifference? Of(WithinGroup first, WithinGroup second, double variance)
     {
-        var df = first.Count + second.Count - 2;
-        if (df < 2) return null;
-        var xx = (first.Xx + second.Xx) / df;
-        var xy = (first.Xy + second.Xy) / df;
-        var q = xx - variance;
-        if (q <= 0 || q < 3 * xx * Math.Sqrt(2.0 / df)) return null;
-        var slope = xy / q;
-        var residual = (first.Residual(slope) + second.Residual(slope)) / (df - 1);
+        if (first.Count + second.Count < 4 || ErrorAwareSlope.Of([first, second], variance) is not { Usable: true } within) return null;
         var distance = second.MeanX - first.MeanX;
-        var scatter = Math.Sqrt(residual * (1.0 / first.Count + 1.0 / second.Count));
-        return new(second.MeanY - first.MeanY - slope * distance, slope, scatter, Math.Sqrt(SlopeVariance(residual, q, slope, variance, df)), distance, df - 1);
+        var scatter = Math.Sqrt(within.Residual * (1.0 / first.Count + 1.0 / second.Count));
+        return new(second.MeanY - first.MeanY - within.Slope * distance, within.Slope, scatter, Math.Sqrt(within.Variance), distance, within.DegreesOfFreedom);
     }
 
     /// <summary>How many standard errors the groups' own slopes lie apart; null where a group cannot show its slope.</summary>
     internal static double? SlopesApart(WithinGroup first, double firstVariance, WithinGroup second, double secondVariance) =>
-        Own(first, firstVariance) is var (a, va) && Own(second, secondVariance) is var (b, vb) ? Math.Abs(a - b) / Math.Sqrt(va + vb) : null;
+        Own(first, firstVariance) is { } a && Own(second, secondVariance) is { } b ? Math.Abs(a.Slope - b.Slope) / Math.Sqrt(a.Variance + b.Variance) : null;
 
-    private static (double Slope, double Variance)? Own(WithinGroup group, double variance)
-    {
-        var df = group.Count - 1;
-        var q = group.Xx / df - variance;
-        if (df < 3 || q <= 0) return null;
-        var slope = group.Xy / df / q;
-        return (slope, SlopeVariance(group.Residual(slope) / (df - 1), q, slope, variance, df));
-    }
-
-    private static double SlopeVariance(double residual, double q, double slope, double variance, int df) =>
-        (residual / q + (residual * variance + slope * slope * variance * variance) / (q * q)) / df;
+    private static ErrorAwareSlope? Own(WithinGroup group, double variance) =>
+        group.Count >= 4 && ErrorAwareSlope.Of([group], variance) is { TrueScatter: > 0 } slope ? slope : null;
 }

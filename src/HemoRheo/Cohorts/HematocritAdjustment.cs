@@ -20,7 +20,7 @@ internal static class HematocritAdjustment
 
         var (insideA, insideB) = (a.Within, b.Within);
         var variance = ((insideA.Count - 1) * a.Variance + (insideB.Count - 1) * b.Variance) / (insideA.Count + insideB.Count - 2);
-        if (ErrorAwareDifference.Of(insideA, insideB, variance) is not { } adjusted) return Refused(ErrorAwareDifference.TooCoarse, name);
+        if (ErrorAwareDifference.Of(insideA, insideB, variance) is not { } adjusted) return Refused(ErrorAwareSlope.TooCoarse, name);
         var difference = WithParts(adjusted, question, (first.Group, a), (second.Group, b));
         var method = string.Create(CultureInfo.InvariantCulture,
             $"{Plain}; {insideA.Count} and {insideB.Count} people{Without(a, b)}; slope {adjusted.Slope:G4} +- {adjusted.SlopeUncertainty:G2} per L/L, hematocrit known to {Math.Sqrt(variance):G2} L/L; {Source}");

@@ -17,11 +17,12 @@ internal static class SlopePool
             return new(law, measurand, 0, 0, 0, 0, people.Length, $"only {people.Length} people have both values and stand in groups; a slope needs three more people than groups");
         }
 
-        var points = people.Select(person => person.Point).ToArray();
-        var aware = WithinGroupRegression.Fit(points, people.Average(person => person.ErrorVariance));
-        var plain = WithinGroupRegression.Fit(points, 0);
+        var groups = people.GroupBy(person => person.Point.Group)
+            .Select(group => WithinGroup.Of([.. group.Select(person => person.Point.X)], [.. group.Select(person => person.Point.Y)])).ToArray();
+        var aware = ErrorAwareSlope.Of(groups, people.Average(person => person.ErrorVariance));
+        var plain = ErrorAwareSlope.Of(groups, 0);
         return aware.Usable
             ? new(law, measurand, aware.Slope, Math.Sqrt(aware.Variance), aware.DegreesOfFreedom, plain.Slope, people.Length, null)
-            : new(law, measurand, 0, 0, 0, plain.Slope, people.Length, WithinGroupRegression.TooCoarse);
+            : new(law, measurand, 0, 0, 0, plain.Slope, people.Length, ErrorAwareSlope.TooCoarse);
     }
 }

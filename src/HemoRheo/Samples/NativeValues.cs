@@ -8,7 +8,7 @@ internal static class NativeValues
 
     /// <summary>Whether a loading may be used without a reservation.</summary>
     public static bool Sound(LoadingResult loading, FittedLaw fit) =>
-        fit.Usable && loading.Curve.Findings.All(finding => finding.Severity != Severity.Fault) && loading.Curve.MeanTemperature is not null;
+        fit.Usable && !loading.Recording.HasFault && loading.Curve.Findings.All(finding => finding.Severity != Severity.Fault) && loading.Curve.MeanTemperature is not null;
 
     /// <summary>One value a measurand, where any loading has a usable fit.</summary>
     public static IEnumerable<SampleValue> Of(Study study, string sample, IReadOnlyList<LoadingResult> loadings, MeasurandSet set, LawEvidence evidence)

@@ -58,7 +58,7 @@ public static class SampleFindings
         "shown-beside", Severity.Note,
         "Shown beside the value that is decided on: the study file decides by another law or rule.",
         "The study file.",
-        "Nothing.");
+        "Look at the value that is decided on.");
 
     /// <summary>There is no temperature in the readings.</summary>
     public static FindingKind NoTemperature { get; } = new(

