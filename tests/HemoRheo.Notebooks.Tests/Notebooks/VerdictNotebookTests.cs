@@ -108,6 +108,6 @@ public sealed partial class VerdictNotebookTests(VerdictNotebook notebook) : ICl
     [GeneratedRegex("(src|href)=[\"']?(https?:)?//", RegexOptions.IgnoreCase)]
     private static partial Regex RemoteReference();
 
-    [GeneratedRegex("https?://|127\\.0\\.0\\.1|iopub|/tmp/|/home/|/root|/Users/|[A-Za-z]:\\\\\\\\|dotnet-interactive|\"execution\"")]
+    [GeneratedRegex("https?://|127\\.0\\.0\\.1|iopub|/(tmp|home|root|Users)/|[A-Za-z]:\\\\\\\\|dotnet-interactive|\"execution\"")]
     private static partial Regex MachineTrace();
 }

@@ -3,7 +3,8 @@ namespace HemoRheo.Tests.Architecture;
 /// <summary>The rooms of src/HemoRheo in the order of the pipeline, and which others each may use. DEVELOPERS.md prints this table; a test holds both equal.</summary>
 internal static class Rooms
 {
-    private static readonly string[] Floor = ["Units", "Findings", "Tables", "Numerics", "Uncertainty", "Decisions"];
+    /// <summary>The rooms every other room stands on.</summary>
+    public static IReadOnlyList<string> Floor { get; } = ["Units", "Findings", "Tables", "Numerics", "Uncertainty", "Decisions"];
 
     public static IReadOnlyList<Room> All { get; } =
     [
@@ -19,14 +20,14 @@ internal static class Rooms
         new("FlowLaws", [.. Floor], "data, solver"),
         new("Fitting", [.. Floor, "Rheometry", "FlowLaws"], "reading files"),
         new("Calibration", [.. Floor, "Studies", "Exports", "Rheometry", "FlowLaws", "Fitting"], "samples of people"),
-        new("Screening", [.. Floor, "Studies", "Exports", "Rheometry", "Calibration"], "deleting, smoothing, interpolating"),
+        new("Screening", [.. Floor, "Studies", "Exports", "Rheometry"], "deleting, smoothing, interpolating"),
         new("Derived", [.. Floor, "Rheometry", "FlowLaws", "Fitting"], "fitting again"),
-        new("Pooling", [.. Floor, "Studies", "Rheometry", "FlowLaws", "Fitting", "Derived"], "deciding on a sample"),
+        new("Pooling", [.. Floor, "Rheometry", "FlowLaws", "Fitting", "Derived"], "deciding on a sample"),
         new("Hematocrit", [.. Floor, "Studies", "Derived", "Pooling"], "clamping silently"),
         new("Samples", [.. Floor, "Studies", "Exports", "Rheometry", "FlowLaws", "Fitting", "Calibration", "Screening", "Derived", "Pooling", "Hematocrit"], "statistics across samples"),
         new("ReferenceRanges", [.. Floor, "Studies", "Exports", "Calibration", "Derived", "Pooling", "Samples"], "drawing"),
-        new("Cohorts", [.. Floor, "Studies", "Exports", "Calibration", "Derived", "Pooling", "Samples", "ReferenceRanges"], "drawing"),
-        new("Ledger", [.. Floor, "Studies", "Exports", "Rheometry", "FlowLaws", "Fitting", "Calibration", "Derived", "Pooling", "Samples", "ReferenceRanges", "Cohorts"], "changing a result"),
+        new("Cohorts", [.. Floor, "Studies", "Exports", "Derived", "Samples", "ReferenceRanges"], "drawing"),
+        new("Ledger", [.. Floor, "Studies", "Exports", "FlowLaws", "Fitting", "Calibration", "Derived", "Pooling", "Samples", "ReferenceRanges", "Cohorts"], "changing a result"),
     ];
 
     /// <summary>The table as DEVELOPERS.md prints it.</summary>
