@@ -72,7 +72,7 @@ internal static class RangeStripChart
 
     private static (MarkerType Marker, OxyColor Color, bool Hollow, string Words) Style(Outcome? outcome, bool marked) => (outcome, marked) switch
     {
-        (_, true) => (MarkerType.Cross, Ink.Text, false, "instrument not in order"),
+        (_, true) => (MarkerType.Cross, Ink.Muted, false, "instrument not in order"),
         (Outcome.Within, _) => (MarkerType.Circle, Ink.Accent, false, "within"),
         (Outcome.Below, _) => (MarkerType.Square, Ink.Alert, false, "below"),
         (Outcome.Above, _) => (MarkerType.Triangle, Ink.Alert, false, "above"),

@@ -110,7 +110,7 @@ internal static class Still
         var series = new ScatterSeries
         {
             MarkerType = marker,
-            MarkerSize = size,
+            MarkerSize = marker == MarkerType.Triangle ? 1.3 * size : size,
             MarkerFill = hollow ? OxyColors.White : color,
             MarkerStroke = hollow || open ? color : OxyColors.White,
             MarkerStrokeThickness = hollow || open ? 1.6 : 0.7,

@@ -13,7 +13,7 @@ internal static class Marks
     public static Markup Verdict(JudgedValue? value) => value switch
     {
         null => Markup.Of($"no value"),
-        { Verdict: { } verdict } => Markup.Of($"{Word(verdict)} <small>{Figures.Probability(Largest(verdict))}</small>{(value.Marked ? Markup.Of($" <small>marked</small>") : Markup.None)}"),
+        { Verdict: { } verdict } => Markup.Of($"{Word(verdict)} <small>{Figures.Probability(Largest(verdict))}</small>"),
         _ => Markup.Of($"not judged"),
     };
 

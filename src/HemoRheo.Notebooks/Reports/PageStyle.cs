@@ -28,6 +28,7 @@ internal static class PageStyle
         th,td{text-align:left;vertical-align:top;padding:.28rem .9rem .28rem 0;border-bottom:1px solid var(--line)}
         thead th{vertical-align:bottom;border-bottom:2px solid var(--text);font-weight:600}
         tbody th{font-weight:600}
+        .samples td:nth-child(2){min-width:11rem}
         table code{white-space:nowrap}
         tfoot th,tfoot td{border-top:2px solid var(--text);border-bottom:none;font-weight:600}
         .n{text-align:right;white-space:nowrap}

@@ -5,8 +5,8 @@ internal static class SamplesSection
 {
     /// <summary>The section.</summary>
     public static Markup Write(Edition edition) => Page.Section("samples", "All samples", Markup.Of($"""
-        <div class="wide"><table><caption>Viscosity at hematocrit {edition.Study.Standard.Hematocrit.ToString()} in {ShownUnits.MillipascalSecond.Symbol}, {edition.Law} law, with its 95 % interval and verdict</caption>
-        <thead><tr><th scope="col">sample</th><th scope="col">group<br/><small>visit</small></th><th scope="col" class="n">hematocrit<br/><small>L/L</small></th><th scope="col" class="n">loadings</th>{edition.Rates.Select(rate => Markup.Of($"<th scope=\"col\">at {rate.Rate.ToString()}</th>"))}<th scope="col">instrument</th><th scope="col" class="n">findings</th></tr></thead>
+        <div class="wide"><table class="samples"><caption>Viscosity at hematocrit {edition.Study.Standard.Hematocrit.ToString()} in {ShownUnits.MillipascalSecond.Symbol}, {edition.Law} law, with its 95 % interval and verdict</caption>
+        <thead><tr><th scope="col">sample<br/><small>instrument, if not in order</small></th><th scope="col">group<br/><small>visit, loadings</small></th><th scope="col" class="n">hematocrit<br/><small>L/L</small></th>{edition.Rates.Select(rate => Markup.Of($"<th scope=\"col\">at {rate.Rate.ToString()}</th>"))}<th scope="col" class="n">findings</th></tr></thead>
         <tbody>{edition.Results.Samples.Select(sample => Row(edition, sample))}</tbody></table></div>
         """));
 
@@ -14,10 +14,12 @@ internal static class SamplesSection
     {
         var record = sample.Result.Record;
         return Markup.Of($"""
-            <tr><th scope="row" class="w">{edition.SampleLink(sample.Sample)}</th><td>{edition.GroupOf(sample)}{(record is null ? Markup.Of($"<small>not in the samples table</small>") : Markup.Of($"<br/><small>visit {record.Visit}</small>"))}</td><td class="n">{(record?.Hematocrit is { } hematocrit ? Figures.Fixed(hematocrit.LiterPerLiter, 3) : Figures.Nothing)}</td><td class="n">{sample.Result.Loadings.Count}</td>{edition.Rates.Select(rate => Cell(edition.Find(sample, rate, edition.Basis)))}<td>{Marks.Status(sample.Result.Status)}</td><td class="n">{sample.Result.Findings.Count}</td></tr>
+            <tr><th scope="row" class="w">{edition.SampleLink(sample.Sample)}{Standing(sample)}</th><td>{edition.GroupOf(sample)}{(record is null ? Markup.Of($"<small>not in the samples table</small>") : Markup.Of($"<br/><small class=\"w\">visit {record.Visit}, {Figures.Count(sample.Result.Loadings.Count, "loading")}</small>"))}</td><td class="n">{(record?.Hematocrit is { } hematocrit ? Figures.Fixed(hematocrit.LiterPerLiter, 3) : Figures.Nothing)}</td>{edition.Rates.Select(rate => Cell(edition.Find(sample, rate, edition.Basis)))}<td class="n">{sample.Result.Findings.Count}</td></tr>
 
             """);
     }
+
+    private static Markup Standing(JudgedSample sample) => sample.Result.Status == InstrumentStatus.InOrder ? Markup.None : Markup.Of($"<br/><small>{Marks.Status(sample.Result.Status)}</small>");
 
     private static Markup Cell(JudgedValue? value) => value switch
     {
