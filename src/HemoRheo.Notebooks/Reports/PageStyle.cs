@@ -33,7 +33,7 @@ internal static class PageStyle
         tfoot th,tfoot td{border-top:2px solid var(--text);border-bottom:none;font-weight:600}
         .n{text-align:right;white-space:nowrap}
         .w{white-space:nowrap}
-        td small,th small{color:var(--quiet);font-weight:400;font-size:.8rem}
+        td small,th small{color:var(--quiet);font-weight:400;font-size:.92em}
         .loud{font-weight:700}
         .loud::before{content:"\25B8\00A0";color:var(--alert)}
         figure{margin:1rem 0}

@@ -9,7 +9,7 @@ internal static class EvidenceSection
         var pool = edition.Results.Analyzed.Pool;
         return Page.Section("laws", "What only the whole study can tell", Markup.Of($"""
             <h3>Laws</h3>
-            <ul class="look">{pool.Laws.Select(law => Markup.Of($"<li><b>{law.Law}</b>{(law.Law == edition.Law ? " (decides)" : "")}: {law.Words} <span class=\"quiet\">{Figures.Count(law.Curves, "curve")}, chi-square {Figures.Fixed(law.ChiSquare, 1)} for {law.DegreesOfFreedom} degrees of freedom (p {Figures.Probability(law.Probability)}); pattern of mean residuals p {Figures.Probability(law.PatternProbability)}.</span></li>\n"))}</ul>
+            <ul class="look">{pool.Laws.OrderBy(law => law.Law == edition.Law ? 0 : 1).Select(law => Markup.Of($"<li>{law.Words}{(law.Law == edition.Law ? Markup.Of($" <b>This law decides.</b>") : Markup.None)}</li>\n"))}</ul>
             <h3>Between loadings</h3>
             <ul class="look">{pool.Scatter.Where(scatter => scatter.Law == edition.Law).Select(Scatter)}</ul>
             <h3>Slope of the logarithm of viscosity against hematocrit</h3>
