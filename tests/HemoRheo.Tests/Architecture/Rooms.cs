@@ -26,7 +26,7 @@ internal static class Rooms
         new("Hematocrit", [.. Floor, "Studies", "Derived", "Pooling"], "clamping silently"),
         new("Samples", [.. Floor, "Studies", "Exports", "Rheometry", "FlowLaws", "Fitting", "Calibration", "Screening", "Derived", "Pooling", "Hematocrit"], "statistics across samples"),
         new("ReferenceRanges", [.. Floor, "Studies", "Exports", "Calibration", "Derived", "Pooling", "Samples"], "drawing"),
-        new("Cohorts", [.. Floor, "Studies", "Exports", "Derived", "Samples", "ReferenceRanges"], "drawing"),
+        new("Cohorts", [.. Floor, "Studies", "Exports", "Derived", "Pooling", "Samples", "ReferenceRanges"], "drawing"),
         new("Ledger", [.. Floor, "Studies", "Exports", "FlowLaws", "Fitting", "Calibration", "Derived", "Pooling", "Samples", "ReferenceRanges", "Cohorts"], "changing a result"),
     ];
 
