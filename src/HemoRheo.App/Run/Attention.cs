@@ -3,6 +3,8 @@ namespace HemoRheo.App;
 /// <summary>What of a result needs a person.</summary>
 internal static class Attention
 {
+    private const int ToldEach = 3;
+
     /// <summary>Whether a person is needed: a failed check, a file that could not be read, or any fault.</summary>
     public static bool NeedsAPerson(StudyResult results) =>
         FailedChecks(results).Any() || results.Findings.Any(finding => finding.Severity == Severity.Fault);
@@ -14,7 +16,7 @@ internal static class Attention
         yield return OfSamples(results);
         foreach (var kind in results.Findings.GroupBy(finding => finding.Kind).OrderByDescending(kind => kind.Key.Severity).ThenBy(kind => kind.Key.Code, StringComparer.Ordinal))
         {
-            yield return OfFindings(kind.Key, [.. kind]);
+            foreach (var line in OfFindings(kind.Key, [.. kind])) yield return line;
         }
     }
 
@@ -46,14 +48,15 @@ internal static class Attention
         return $"{Counted(results.Samples.Count, "sample")}: {string.Join(", ", counts)}";
     }
 
-    private static string OfFindings(FindingKind kind, IReadOnlyList<Finding> findings)
+    private static IEnumerable<string> OfFindings(FindingKind kind, IReadOnlyList<Finding> findings)
     {
-        var where = findings[0].Where.ToString();
-        var severity = kind.Severity.ToString().ToUpperInvariant();
-        return findings.Count == 1
-            ? $"{severity,-8}{kind.Code}: {findings[0].Message}{(where.Length == 0 ? "" : $" ({where})")}"
-            : $"{severity,-8}{kind.Code}, {findings.Count} times: {kind.Meaning}{(where.Length == 0 ? "" : $" (first: {where})")}";
+        var head = $"{kind.Severity.ToString().ToUpperInvariant(),-8}{kind.Code}";
+        return findings.Count <= ToldEach
+            ? findings.Select(finding => $"{head}: {finding.Message}{Place("", finding)}")
+            : [$"{head}, {findings.Count} times: {kind.Meaning}{Place("first: ", findings[0])}"];
     }
+
+    private static string Place(string word, Finding finding) => finding.Where.ToString() is { Length: > 0 } where ? $" ({word}{where})" : "";
 
     private static string Counted(int count, string what) => count == 1 ? $"1 {what}" : $"{count} {what}s";
 }
