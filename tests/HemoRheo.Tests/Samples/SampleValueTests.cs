@@ -1,0 +1,160 @@
+namespace HemoRheo.Tests.Samples;
+
+public sealed class SampleValueTests
+{
+    private static readonly Study Study = TestStudy.With(TestStudy.Rheometer with { TorqueFloor = 1e-10, CheckEvery = TimeSpan.FromDays(30), CheckLimit = 0.2 }) with
+    {
+        Screening = TestStudy.Plain.Screening with { LongestSinceDraw = TimeSpan.FromHours(8) },
+    };
+
+    private static readonly Measurand At10 = Measurand.Viscosity(10.PerSecond());
+
+    [Fact]
+    public void A_bias_that_is_not_corrected_is_a_contribution_of_its_own()
+    {
+        var corrected = Native(Study, Pair());
+        var left = Native(Study with { Analysis = Study.Analysis with { CorrectBias = false } }, Pair());
+        var bias = left.Value.Part(SourceKind.Bias)!.Value;
+        Assert.Null(corrected.Value.Part(SourceKind.Bias));
+        Assert.Equal(corrected.Value.X - left.Value.X, bias, 1e-12);
+        Assert.InRange(bias, -0.023, -0.018);
+        Assert.True(left.Value.StandardUncertainty > corrected.Value.StandardUncertainty);
+    }
+
+    [Fact]
+    public void Without_replicates_and_declaration_a_value_is_shown_and_not_decided_on()
+    {
+        var value = Native(Study, [InventedBlood.Casson("S-1", 1, 0.41)]);
+        Assert.False(value.Decidable);
+        Assert.Contains(value.Findings, finding => finding.Code == "loading-scatter-unknown");
+        var declared = Native(Study with { Errors = Study.Errors with { DeclaredLoading = 0.02 } }, [InventedBlood.Casson("S-1", 1, 0.41)]);
+        Assert.True(declared.Decidable);
+        Assert.Equal(0.02, declared.Value.Part(SourceKind.Loading)!.Value, 1e-12);
+    }
+
+    [Fact]
+    public void A_rate_outside_the_kept_rates_is_extrapolated_and_not_decided_on()
+    {
+        var study = Study with { Analysis = Study.Analysis with { StandardRates = [new(0.5), new(10), new(1000)] } };
+        var sample = Evaluate(study, Pair()).Samples[0];
+        foreach (var rate in new[] { 0.5, 1000 })
+        {
+            var value = sample.Find("Casson", Measurand.Viscosity(rate.PerSecond()), HematocritBasis.Native)!;
+            Assert.False(value.Decidable);
+            Assert.Null(value.Interpolated);
+            Assert.Contains(value.Findings, finding => finding.Code == "extrapolated");
+        }
+
+        Assert.True(sample.Find("Casson", At10, HematocritBasis.Native)!.Decidable);
+    }
+
+    [Fact]
+    public void The_value_between_readings_stands_beside_the_fitted_one()
+    {
+        var value = Native(Study, Pair());
+        Assert.Equal(value.Value.X, value.Interpolated!.Value, 0.02);
+    }
+
+    [Fact]
+    public void A_cut_recording_is_left_out_where_another_loading_is_whole_and_never_decided_on_alone()
+    {
+        var fault = new FindingKind("cut", Severity.Fault, "Cut.", "Cut.", "Cut.").At(Where.Nowhere, "Cut.");
+        var cut = InventedBlood.Casson("S-1", 2, 0.41, 1.5) with { Findings = [fault] };
+        Recording[] others = [InventedBlood.Casson("S-2", 1, 0.44), InventedBlood.Casson("S-2", 2, 0.44, 1.02)];
+        var beside = Native(Study, [InventedBlood.Casson("S-1", 1, 0.41), cut, .. others]);
+        var whole = Native(Study, [InventedBlood.Casson("S-1", 1, 0.41), .. others]);
+        Assert.Equal(whole.Value.X, beside.Value.X);
+        Assert.True(beside.Decidable);
+
+        var alone = Native(Study, [cut, .. others]);
+        Assert.False(alone.Decidable);
+        Assert.Contains(alone.Findings, finding => finding.Code == "loading-faulty");
+    }
+
+    [Fact]
+    public void A_sample_without_hematocrit_has_native_values_only_and_says_so()
+    {
+        var sample = Evaluate(Study, Pair(), InventedBlood.Record("S-1", 0.41) with { Hematocrit = null }).Samples[0];
+        Assert.Contains(sample.Findings, finding => finding.Code == "no-hematocrit");
+        Assert.All(sample.Values, value => Assert.Equal(HematocritBasis.Native, value.Basis));
+        Assert.NotEmpty(sample.Values);
+    }
+
+    [Fact]
+    public void Plasma_measured_on_another_device_gets_no_correction_from_the_rheometer()
+    {
+        var own = Evaluate(Study, Pair(), InventedBlood.Record("S-1", 0.41)).Samples[0];
+        var other = Evaluate(Study, Pair(), InventedBlood.Record("S-1", 0.41, plasmaInstrument: "capillary")).Samples[0];
+        var measurand = Measurand.RelativeViscosity(10.PerSecond());
+        var (a, b) = (own.Find("Casson", measurand, HematocritBasis.Native)!.Value, other.Find("Casson", measurand, HematocritBasis.Native)!.Value);
+
+        // On one instrument the calibration cancels in the ratio; on two it stays.
+        Assert.Equal(0, a.Part(SourceKind.Calibration)!.Value, 1e-15);
+        Assert.Equal(0, a.Part(SourceKind.Certificate)!.Value, 1e-15);
+        Assert.Equal(0.002, b.Part(SourceKind.Certificate)!.Value, 1e-12);
+        Assert.NotEqual(a.X, b.X);
+    }
+
+    [Fact]
+    public void A_hematocrit_outside_the_power_rule_is_shown_and_not_decided_on()
+    {
+        var value = Evaluate(Study, Pair(), InventedBlood.Record("S-1", 0.25)).Samples[0].Find("Casson", At10, HematocritBasis.StandardByPlasma)!;
+        Assert.False(value.Decidable);
+        Assert.Contains(value.Findings, finding => finding.Code == "outside-power-rule");
+    }
+
+    [Fact]
+    public void Blood_measured_before_the_first_check_is_not_calibrated()
+    {
+        var early = InventedBlood.CheckTime.AddDays(-2);
+        Recording[] pair = [InventedBlood.Casson("S-1", 1, 0.41, at: early), InventedBlood.Casson("S-1", 2, 0.41, 1.02, at: early)];
+        var sample = Evaluate(Study, pair).Samples[0];
+        Assert.Equal(InstrumentStatus.Unknown, sample.Status);
+        var value = sample.Find("Casson", At10, HematocritBasis.Native)!;
+        Assert.False(value.Decidable);
+        Assert.Contains(value.Findings, finding => finding.Code == "not-calibrated");
+        Assert.Null(value.Value.Part(SourceKind.Calibration));
+    }
+
+    [Fact]
+    public void A_law_that_the_whole_study_contradicts_is_shown_and_not_decided_on()
+    {
+        Recording[] blood = [.. Enumerable.Range(1, 20).SelectMany(i => new[] { InventedBlood.Quemada($"S-{i:00}", 1, 0.38 + 0.006 * i), InventedBlood.Quemada($"S-{i:00}", 2, 0.38 + 0.006 * i, 1.02) })];
+        var analyzed = Evaluate(TestStudy.Readings(Study, InventedBlood.Checks(), blood, blood.Select(recording => recording.Sample).Distinct().Select(sample => InventedBlood.Record(sample, 0.44))));
+        Assert.False(analyzed.Pool.Laws.First(law => law.Law == "Casson").Fits);
+        Assert.True(analyzed.Pool.Laws.First(law => law.Law == "Quemada").Fits);
+        Assert.All(analyzed.Samples, sample => Assert.False(sample.Find("Casson", At10, HematocritBasis.Native)!.Decidable));
+        Assert.Contains(analyzed.Pool.Findings, finding => finding.Code == "law-does-not-fit");
+    }
+
+    [Fact]
+    public void A_yield_stress_is_said_to_be_an_extrapolation_and_carries_the_torque_zero()
+    {
+        var study = Study with { Instruments = [Study.Instruments[0] with { TorqueZero = 5e-8 }], Analysis = Study.Analysis with { Laws = ["Casson"] } };
+        var sample = Evaluate(study, Pair()).Samples[0];
+        var yieldStress = sample.Find("Casson", Measurand.CassonYieldStress, HematocritBasis.Native)!;
+        Assert.Contains(yieldStress.Findings, finding => finding.Code == "yield-stress-extrapolated");
+        var atHundred = sample.Find("Casson", Measurand.Viscosity(100.PerSecond()), HematocritBasis.Native)!;
+        double OfItsDay(SampleValue value) => value.Value.Parts.Single(part => part.Source == new Source(SourceKind.TorqueZero, "R1/2026-03-03")).Amount;
+        Assert.True(OfItsDay(yieldStress) > 20 * Math.Abs(OfItsDay(atHundred)), $"yield stress {OfItsDay(yieldStress):G3}, viscosity at 100 1/s {OfItsDay(atHundred):G3}");
+    }
+
+    [Fact]
+    public void The_order_of_recordings_changes_no_bit_of_any_value()
+    {
+        Recording[] blood = [.. Pair(), InventedBlood.Casson("S-2", 1, 0.44), InventedBlood.Casson("S-2", 2, 0.44, 0.99), InventedBlood.Casson("S-3", 1, 0.47)];
+        SampleRecord[] records = [InventedBlood.Record("S-1", 0.41), InventedBlood.Record("S-2", 0.44), InventedBlood.Record("S-3", 0.47)];
+        var forward = Evaluate(TestStudy.Readings(Study, InventedBlood.Checks(), blood, records));
+        var backward = Evaluate(TestStudy.Readings(Study, InventedBlood.Checks().Reverse(), blood.GroupBy(recording => recording.Sample).Reverse().SelectMany(sample => sample), records.Reverse()));
+        Assert.Equal(forward.Samples.SelectMany(sample => sample.Values.Select(value => value.Value)), backward.Samples.SelectMany(sample => sample.Values.Select(value => value.Value)));
+    }
+
+    private static Recording[] Pair() => [InventedBlood.Casson("S-1", 1, 0.41), InventedBlood.Casson("S-1", 2, 0.41, 1.02)];
+
+    private static SampleValue Native(Study study, IEnumerable<Recording> blood) => Evaluate(study, blood).Samples[0].Find("Casson", At10, HematocritBasis.Native)!;
+
+    private static AnalyzedStudy Evaluate(Study study, IEnumerable<Recording> blood, SampleRecord? record = null) =>
+        Evaluate(TestStudy.Readings(study, InventedBlood.Checks(), blood, [record ?? InventedBlood.Record("S-1", 0.41)]));
+
+    private static AnalyzedStudy Evaluate(StudyReadings readings) => readings.Study.Evaluate(readings, cancel: TestContext.Current.CancellationToken);
+}
