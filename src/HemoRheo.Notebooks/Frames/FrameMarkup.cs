@@ -30,8 +30,8 @@ internal static class FrameMarkup
             var keys = frame.RowKeys.ToArray();
             var shown = Enumerable.Range(0, keys.Length).Where(row => keys.Length <= First + Last + 1 || row < First || row >= keys.Length - Last);
             return Markup.Of($"""
-                <table><thead><tr><th></th>{frame.ColumnKeys.Select(key => Markup.Of($"<th>{FrameCell.Text(key)}</th>"))}</tr></thead><tbody>
-                {shown.Select(row => Markup.Of($"{Gap(row, keys.Length, columns.Length)}<tr><th>{FrameCell.Text(keys[row])}</th>{columns.Select(column => FrameCell.Of(column.TryGetAt(row) is { HasValue: true } value ? value.Value : null))}</tr>\n"))}</tbody></table>
+                <div style="overflow-x:auto"><table><thead><tr><th></th>{frame.ColumnKeys.Select(key => Markup.Of($"<th>{FrameCell.Text(key)}</th>"))}</tr></thead><tbody>
+                {shown.Select(row => Markup.Of($"{Gap(row, keys.Length, columns.Length)}<tr><th>{FrameCell.Text(keys[row])}</th>{columns.Select(column => FrameCell.Of(column.TryGetAt(row) is { HasValue: true } value ? value.Value : null))}</tr>\n"))}</tbody></table></div>
                 <p>{keys.Length} rows x {columns.Length} columns</p>
                 """);
         }

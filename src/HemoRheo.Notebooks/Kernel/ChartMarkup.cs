@@ -20,7 +20,7 @@ internal static class ChartMarkup
         var json = GenericChart.toFigureJson(figure).Replace("<", "\\u003c", StringComparison.Ordinal);
         var script = new Markup($$"""
             <script>(function(){var f={{json}};
-            var draw=function(){var d=document.getElementById('{{id}}');if(d){d.innerHTML='';Plotly.newPlot(d,f.data,f.layout,f.config);} };
+            var draw=function(){var d=document.getElementById('{{id}}');if(d){d.innerHTML='';Plotly.newPlot(d,f.data,f.layout,{displaylogo:false,modeBarButtonsToRemove:["select2d","lasso2d","autoScale2d"]});} };
             if(window.Plotly)draw();else(window.hrPlots=window.hrPlots||[]).push(draw);})();</script>
             """);
         return Markup.Of($"<div id=\"{id}\">{still}</div>{script}");

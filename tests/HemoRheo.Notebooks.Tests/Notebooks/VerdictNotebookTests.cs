@@ -31,7 +31,7 @@ public sealed partial class VerdictNotebookTests(VerdictNotebook notebook) : ICl
     [Fact]
     public void A_sample_has_its_verdicts_with_three_probabilities_and_the_caution()
     {
-        var html = Showing("results[\"S-0042\"]", "text/html");
+        var html = Showing("results[\"S-0070\"]", "text/html");
 
         Assert.Contains(">p below</th>", html, StringComparison.Ordinal);
         Assert.Contains(">p within</th>", html, StringComparison.Ordinal);

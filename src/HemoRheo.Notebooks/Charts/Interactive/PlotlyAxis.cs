@@ -24,7 +24,7 @@ internal sealed class PlotlyAxis(Axis axis)
     {
         var properties = new Dictionary<string, object>
         {
-            ["title"] = new { text = PlotlyFigure.Escaped(axis.Title) },
+            ["title"] = new { text = PlotlyFigure.Escaped(axis.Title), font = new { size = 13 }, standoff = 8 },
             ["type"] = Logarithmic ? "log" : axis is DateTimeAxis ? "date" : "linear",
             ["range"] = Range(),
             ["gridcolor"] = PlotlyFigure.Css(Ink.Grid),

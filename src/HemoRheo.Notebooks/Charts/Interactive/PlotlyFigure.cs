@@ -1,3 +1,4 @@
+using System.Globalization;
 using OxyPlot;
 using OxyPlot.Annotations;
 using OxyPlot.Series;
@@ -9,8 +10,6 @@ namespace HemoRheo.Notebooks;
 /// <remarks>Property names are those of plotly.js. A text in a point's Tag is shown when the pointer is on it.</remarks>
 internal static class PlotlyFigure
 {
-    private static readonly string[] NotNeeded = ["select2d", "lasso2d", "autoScale2d"];
-
     /// <summary>The figure.</summary>
     /// <param name="model">The picture.</param>
     /// <param name="height">Its height, in pixels.</param>
@@ -18,9 +17,10 @@ internal static class PlotlyFigure
     {
         ((IPlotModel)model).Update(true);
         var axes = new PlotlyAxes(model);
-        var grounds = model.Annotations.OfType<RectangleAnnotation>().Select(box => Ground(box, axes));
+        var boxes = model.Annotations.OfType<RectangleAnnotation>().ToArray();
+        var grounds = boxes.Select(box => Ground(box, axes)).Concat(boxes.Where(box => !string.IsNullOrEmpty(box.Text)).Select(box => Text(box, axes)));
         var traces = grounds.Concat(model.Series.Select(series => Of(series, axes))).ToArray();
-        return GenericChart.setConfig(Config(), GenericChart.setLayout(Layout(axes, height), GenericChart.ofTraceObjects<IEnumerable<Trace>>(false, traces)));
+        return GenericChart.setLayout(Layout(axes, height), GenericChart.ofTraceObjects<IEnumerable<Trace>>(false, traces));
     }
 
     private static Trace Of(Series series, PlotlyAxes axes) => series switch
@@ -65,18 +65,30 @@ internal static class PlotlyFigure
         return trace;
     }
 
+    private static Trace Text(RectangleAnnotation box, PlotlyAxes axes)
+    {
+        var (left, right) = axes.X.Within(box.MinimumX, box.MaximumX);
+        var (bottom, top) = axes.Y.Within(box.MinimumY, box.MaximumY);
+        var trace = new Trace("scatter");
+        trace.SetProperty("mode", "text");
+        trace.SetProperty("text", new[] { Escaped(box.Text) });
+        trace.SetProperty("showlegend", false);
+        trace.SetProperty("hoverinfo", "skip");
+        Place(trace, [new((left + right) / 2, bottom + 0.05 * (top - bottom))], axes);
+        return trace;
+    }
+
     private static Trace Points(ScatterSeries points, PlotlyAxes axes)
     {
         var trace = Named(points, "markers");
         var open = points.MarkerType is MarkerType.Cross or MarkerType.Plus;
-        var hollow = !open && points.MarkerFill == OxyColors.White;
         Place(trace, [.. points.Points.Select(point => new DataPoint(point.X, point.Y))], axes);
         trace.SetProperty("marker", new
         {
-            symbol = Symbol(points.MarkerType) + (hollow ? "-open" : ""),
+            symbol = Symbol(points.MarkerType),
             size = 2 * points.MarkerSize,
-            color = Css(open || hollow ? points.MarkerStroke : points.MarkerFill),
-            line = new { width = open ? 1.6 : 0.7, color = Css(points.MarkerStroke) },
+            color = Css(open ? points.MarkerStroke : points.MarkerFill),
+            line = new { width = points.MarkerStrokeThickness, color = Css(points.MarkerStroke) },
         });
         if (points.Points.Any(point => point.Tag is string))
         {
@@ -121,31 +133,22 @@ internal static class PlotlyFigure
     {
         var layout = new Plotly.NET.Layout();
         layout.SetProperty("width", Still.Width);
-        layout.SetProperty("height", height + 30);
+        layout.SetProperty("height", height + 40);
         layout.SetProperty("xaxis", axes.X.Properties());
         layout.SetProperty("yaxis", axes.Y.Properties());
         layout.SetProperty("font", new { family = "Arial, sans-serif", size = 13, color = Css(Ink.Text) });
-        layout.SetProperty("legend", new { orientation = "h", x = 0, y = -70.0 / height, yanchor = "top", font = new { size = 12 } });
-        layout.SetProperty("margin", new { l = 70, r = 20, t = 30, b = 60 });
+        layout.SetProperty("legend", new { orientation = "h", x = 0, yref = "container", y = 0, yanchor = "bottom", font = new { size = 12 } });
+        layout.SetProperty("margin", new { l = 70, r = 20, t = 30, b = 95 });
         layout.SetProperty("hovermode", "closest");
         layout.SetProperty("plot_bgcolor", "white");
         layout.SetProperty("paper_bgcolor", "white");
         return layout;
     }
 
-    private static Config Config()
-    {
-        var config = new Config();
-        config.SetProperty("displaylogo", false);
-        config.SetProperty("showSendToCloud", false);
-        config.SetProperty("modeBarButtonsToRemove", NotNeeded);
-        return config;
-    }
-
     /// <summary>Labels take a few tags of markup, so text from files must not look like one.</summary>
     public static string Escaped(string? text) => (text ?? "").Replace("&", "&amp;", StringComparison.Ordinal).Replace("<", "&lt;", StringComparison.Ordinal).Replace("\n", "<br>", StringComparison.Ordinal);
 
-    public static string Css(OxyColor color) => color.IsInvisible() ? "rgba(0,0,0,0)" : $"#{color.R:x2}{color.G:x2}{color.B:x2}";
+    public static string Css(OxyColor color) => string.Create(CultureInfo.InvariantCulture, $"rgba({color.R},{color.G},{color.B},{color.A / 255.0:0.###})");
 
     private static string Dash(LineStyle style) => style switch { LineStyle.Dash => "dash", LineStyle.Dot => "dot", LineStyle.DashDot => "dashdot", _ => "solid" };
 

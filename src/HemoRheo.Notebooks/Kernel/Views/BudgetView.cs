@@ -15,8 +15,8 @@ internal static class BudgetView
             [
                 line.Name,
                 Amount(factor * line.Amount),
-                Amount(100 * line.Amount * line.Amount / value.Value.Variance),
-                line.DegreesOfFreedom,
+                Share(100 * line.Amount * line.Amount / value.Value.Variance),
+                Cell.Rounded(line.DegreesOfFreedom, Figures.Freedom(line.DegreesOfFreedom)),
                 line.Shared,
             ]);
     }
@@ -32,7 +32,7 @@ internal static class BudgetView
     {
         var u = value.Value.StandardUncertainty;
         var size = value.Measurand.Logarithmic ? $"{Rounding.Uncertainty(100 * u)} %" : $"{Rounding.Uncertainty(u / value.Measurand.Shown.Factor)} {value.Measurand.Shown}";
-        return $"Together: standard uncertainty {size}, {Rounding.Digits(value.Value.DegreesOfFreedom, 3)} degrees of freedom.";
+        return $"Together: standard uncertainty {size}, {Figures.Freedom(value.Value.DegreesOfFreedom)} degrees of freedom.";
     }
 
     private static string Verdict(JudgedValue value) => value.Verdict is { } verdict
@@ -40,6 +40,8 @@ internal static class BudgetView
         : $"Not judged: {value.WhyNotJudged}";
 
     private static Cell Amount(double amount) => Cell.Rounded(amount, amount == 0 ? "0" : amount < 0 ? $"-{Rounding.Uncertainty(-amount)}" : Rounding.Uncertainty(amount));
+
+    private static Cell Share(double percent) => Cell.Rounded(percent, percent < 0.1 ? "< 0.1" : Figures.Fixed(percent, 1));
 
     private static BudgetLine[] Lines(Value value) => [.. value.Parts.GroupBy(part => part.Source.Kind)
         .Select(kind => new BudgetLine(Name(kind.Key, [.. kind.Select(part => part.Source.Of).Distinct()]), value.Part(kind.Key)!.Value, value.Only(source => source.Kind == kind.Key).DegreesOfFreedom, kind.First().Source.Shared))
