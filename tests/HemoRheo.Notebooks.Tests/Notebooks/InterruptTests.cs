@@ -1,5 +1,6 @@
 namespace HemoRheo.Notebooks.Tests;
 
+[Collection(OneKernelAtATime.Name)]
 public sealed class InterruptTests
 {
     /// <summary>Starts the kernel as a notebook does, loads the package, runs a long cell, interrupts it, and runs another cell.</summary>

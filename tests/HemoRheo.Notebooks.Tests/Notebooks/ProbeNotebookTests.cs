@@ -2,6 +2,7 @@ using System.Text.RegularExpressions;
 
 namespace HemoRheo.Notebooks.Tests;
 
+[Collection(OneKernelAtATime.Name)]
 public sealed partial class ProbeNotebookTests(ProbeNotebook probe) : IClassFixture<ProbeNotebook>
 {
     [Fact]

@@ -2,6 +2,7 @@ using System.Text.RegularExpressions;
 
 namespace HemoRheo.Notebooks.Tests;
 
+[Collection(OneKernelAtATime.Name)]
 public sealed partial class VerdictNotebookTests(VerdictNotebook notebook) : IClassFixture<VerdictNotebook>
 {
     private const int Charts = 7;
