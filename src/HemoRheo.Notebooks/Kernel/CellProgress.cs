@@ -11,21 +11,12 @@ internal sealed class CellProgress : IProgress<AnalysisProgress>, IDisposable
     private static readonly TimeSpan Pause = TimeSpan.FromMilliseconds(200);
 
     private readonly Lock _gate = new();
-    private readonly long _started = Stopwatch.GetTimestamp();
     private readonly DisplayedValue _shown;
-    private readonly TimeSpan _pause;
-    private long _last;
+    private long _last = Stopwatch.GetTimestamp();
     private bool _ended;
 
     public CellProgress(KernelInvocationContext context)
-        : this(context, Pause)
     {
-    }
-
-    internal CellProgress(KernelInvocationContext context, TimeSpan pause)
-    {
-        _pause = pause;
-        _last = _started;
         _shown = context.Display(Html(Markup.Of($"<progress></progress> starting")), "text/html");
     }
 
@@ -34,7 +25,7 @@ internal sealed class CellProgress : IProgress<AnalysisProgress>, IDisposable
     {
         lock (_gate)
         {
-            if (_ended || Stopwatch.GetElapsedTime(_last) < _pause) return;
+            if (_ended || Stopwatch.GetElapsedTime(_last) < Pause) return;
             _last = Stopwatch.GetTimestamp();
             _shown.Update(Html(Markup.Of($"<progress value=\"{value.Done}\" max=\"{Math.Max(1, value.Of)}\"></progress> {value.Stage}: {value.Done} of {value.Of}")));
         }
