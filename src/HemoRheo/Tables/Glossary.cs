@@ -9,7 +9,6 @@ public static class Glossary
     private static readonly Unit Warmth = ShownUnits.DegreeCelsius;
     private static readonly Unit Share = ShownUnits.LiterPerLiter;
     private static readonly Unit Grams = new(Quantity.Concentration, "g/L", "g/L", 1);
-    private static readonly Unit Hours = new(Quantity.Time, "h", "h", 3600);
     private static readonly Unit Seconds = new(Quantity.Time, "s", "s", 1);
     private static readonly Unit Percent = new(Quantity.Fraction, "%", "%", 0.01);
 
@@ -18,7 +17,6 @@ public static class Glossary
     [
         // Lineage: where a thing was read.
         new("file", "Path of the file below the study's folder."),
-        new("sheet", "Sheet of a workbook."),
         new("line", "Line of the file, counted from 1."),
         new("column", "Column of the line, counted from 1."),
         new("layout", "Declared layout that the file was read by."),
@@ -46,8 +44,6 @@ public static class Glossary
         new("loading", "Number of the filling of the gap, counted from 1."),
         new("loadings", "How many fillings of the gap."),
         new("started at", "Date and time of the recording's start with offset, ISO 8601."),
-        new("drawn at", "Date and time the blood was drawn with offset, ISO 8601."),
-        new("since draw", "Time from the draw to the measurement.", Hours),
         new("day", "Local date, ISO 8601."),
 
         // Readings and curves.
@@ -58,8 +54,6 @@ public static class Glossary
         new("shear rate", "Shear rate at the inner wall.", Rate),
         new("shear stress", "Shear stress at the inner wall, as read.", Stress),
         new("viscosity", "Apparent viscosity: shear stress over shear rate.", Thickness),
-        new("fitted stress", "Shear stress that the fitted law gives at this shear rate.", Stress),
-        new("residual", "Reading less fitted law, over the standard deviation of the error model."),
         new("elapsed", "Time since the recording's start.", Seconds),
         new("temperature", "Temperature of the sample as read.", Warmth),
 
@@ -127,8 +121,6 @@ public static class Glossary
         // Blood.
         new("hematocrit", "Volume fraction of red cells.", Share),
         new("counter", "Method or counter that measured the hematocrit."),
-        new("plasma viscosity", "Viscosity of the sample's plasma.", Thickness),
-        new("plasma temperature", "Temperature at which the plasma was measured.", Warmth),
         new("fibrinogen", "Fibrinogen concentration of the plasma.", Grams),
 
         // Instruments and checks.
@@ -146,10 +138,7 @@ public static class Glossary
         new("check outcome", "What the check says: passes, fails, or cannot tell."),
         new("probability within", "Probability that the error lies within the limit."),
         new("period", "Number of the instrument's period between calibrations, counted from 1."),
-        new("from", "Start of the period with offset, ISO 8601."),
-        new("until", "End of the period with offset, ISO 8601; empty while it lasts."),
         new("checks", "How many checks."),
-        new("correction", "Mean of the period's checks, measured over expected less one, that values are divided by.", Percent),
         new("status", "Instrument status: in order, in doubt, failed or unknown."),
         new("reason", "The reason, in one sentence."),
 
