@@ -18,20 +18,9 @@ internal static class Words
         _ => "cannot tell",
     };
 
-    public static string Of(Outcome outcome) => outcome switch
-    {
-        Outcome.Below => "below",
-        Outcome.Within => "within",
-        Outcome.Above => "above",
-        _ => "undecided",
-    };
+    public static string Of(Outcome outcome) => outcome.Words();
 
-    public static string Of(HematocritBasis basis) => basis switch
-    {
-        HematocritBasis.Native => "native hematocrit",
-        HematocritBasis.StandardByPlasma => "standard hematocrit, plasma rule",
-        _ => "standard hematocrit, slope rule",
-    };
+    public static string Of(HematocritBasis basis) => basis.Words();
 
     public static string Short(HematocritBasis basis) => basis switch
     {

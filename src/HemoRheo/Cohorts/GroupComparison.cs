@@ -31,7 +31,7 @@ internal static class GroupComparison
         var (firstSummary, secondSummary) = (GroupMaking.Of(first, question, a), GroupMaking.Of(second, question, b));
         findings.AddRange(new[] { firstSummary, secondSummary }
             .Where(group => group.Mean is null)
-            .Select(group => CohortFindings.GroupTooSmall.At(Where.Nowhere, $"{question.Measurand.Name}, {question.Basis}: {group.WhyNoMean}", group.Used, 2)));
+            .Select(group => CohortFindings.GroupTooSmall.At(Where.Nowhere, $"{question.Measurand.Name}, {question.Basis.Words()}: {group.WhyNoMean}", group.Used, 2)));
         var total = GroupDifferences.Total(firstSummary, secondSummary);
         GroupDifference? adjusted = null;
         if (question.Basis == HematocritBasis.Native)

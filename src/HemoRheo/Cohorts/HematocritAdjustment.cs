@@ -23,7 +23,7 @@ internal static class HematocritAdjustment
         if (ErrorAwareDifference.Of(insideA, insideB, variance) is not { } adjusted) return Refused(ErrorAwareSlope.TooCoarse, name);
         var difference = WithParts(adjusted, question, (first.Group, a), (second.Group, b));
         var method = string.Create(CultureInfo.InvariantCulture,
-            $"{Plain}; {insideA.Count} and {insideB.Count} people{Without(a, b)}; slope {adjusted.Slope:G4} +- {adjusted.SlopeUncertainty:G2} per L/L, hematocrit known to {Math.Sqrt(variance):G2} L/L; {Source}");
+            $"{Plain}; {insideA.Count} and {insideB.Count} people{Without(a, b)}; slope {adjusted.Slope:G4} ± {adjusted.SlopeUncertainty:G2} per L/L, hematocrit known to {Math.Sqrt(variance):G2} L/L; {Source}");
         return (new(GroupDifferences.AdjustedQuestion, difference, GroupDifferences.TwoSided(difference), method, null), Slopes(name, insideA, a.Variance, insideB, b.Variance));
     }
 

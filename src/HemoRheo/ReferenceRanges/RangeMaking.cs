@@ -19,7 +19,7 @@ internal static class RangeMaking
         var controls = GroupValues.Of(analyzed, question, person => codes.Contains(person.GroupCode));
         var (range, kind, reason) = FromControls(analyzed.Study, question, controls);
         if (range is not null) return new(question, range, null, []);
-        var message = $"{question.Measurand.Name}, {question.Basis}, {question.Law}: {reason} {(declared is null ? "There is no range." : "The declared limits are used instead.")}";
+        var message = $"{question.Measurand.Name}, {question.Basis.Words()}, {question.Law}: {reason} {(declared is null ? "There is no range." : "The declared limits are used instead.")}";
         return new(question, declared, declared is null ? reason : null, [kind!.At(Where.Nowhere, message, controls.People.Count, FewestControls)]);
     }
 

@@ -31,7 +31,7 @@ public static class ValueJudging
     {
         if (range.Measurand != value.Measurand) return $"The range is of {range.Measurand.Name}, the value of {value.Measurand.Name}.";
         if (range.Law is not null && range.Law != value.Law) return $"The range rests on values by {range.Law}, this value is by {value.Law}.";
-        return range.Basis == value.Basis ? null : $"The range speaks of {range.Basis} values, this value is {value.Basis}.";
+        return range.Basis == value.Basis ? null : $"The range speaks of values at {range.Basis.Words()}, this value is at {value.Basis.Words()}.";
     }
 
     private static IEnumerable<Interval> Corners(ReferenceRange range) =>

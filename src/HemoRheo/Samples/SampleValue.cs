@@ -21,5 +21,5 @@ public sealed record SampleValue(Measurand Measurand, string Law, HematocritBasi
     public Interval Interval(double level = 0.95) => Value.Interval(level).Select(Measurand.ToShown);
 
     /// <inheritdoc/>
-    public override string ToString() => string.Create(System.Globalization.CultureInfo.InvariantCulture, $"{Measurand.Name}, {Basis}, {Law}: {Shown:G5} {Measurand.Shown} ({Interval().Lower:G5} to {Interval().Upper:G5})");
+    public override string ToString() => string.Create(System.Globalization.CultureInfo.InvariantCulture, $"{Measurand.Name}, {Basis.Words()}, {Law}: {Shown:G5} {Measurand.Shown} ({Interval().Lower:G5} to {Interval().Upper:G5})");
 }

@@ -97,6 +97,9 @@ public sealed record Value(double X, Items<Contribution> Parts)
     /// <summary>The probability that the quantity lies above a limit on the working scale.</summary>
     public double ProbabilityAbove(double limit) => Probability(X - limit);
 
+    /// <inheritdoc/>
+    public override string ToString() => string.Create(System.Globalization.CultureInfo.InvariantCulture, $"{X:G6} ± {StandardUncertainty:G2} (working scale, {Parts.Count} contributions, largest: {(Parts.Count == 0 ? "none" : Parts.MaxBy(part => Math.Abs(part.Amount)).Source)})");
+
     private double Probability(double margin)
     {
         var u = StandardUncertainty;

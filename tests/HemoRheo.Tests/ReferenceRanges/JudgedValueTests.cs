@@ -44,7 +44,7 @@ public sealed class JudgedValueTests
         {
             (Range() with { Measurand = new ViscosityAtRate(new(100)) }, "viscosity at 100 1/s"),
             (Range() with { Law = "Quemada" }, "Quemada"),
-            (Range() with { Basis = HematocritBasis.StandardByPlasma }, "StandardByPlasma"),
+            (Range() with { Basis = HematocritBasis.StandardByPlasma }, "standard hematocrit, plasma rule"),
         })
         {
             var judged = value.JudgedBy(range);
