@@ -45,6 +45,14 @@ public static class CalibrationFindings
         "All readings were set aside, or they do not follow one viscosity: a bubble, a wrong fluid, a slipping geometry.",
         "Look at the curve of the check, then check again.");
 
+    /// <summary>The recording of a check has a fault.</summary>
+    public static FindingKind RecordingFaulty { get; } = new(
+        "check-recording-faulty",
+        Severity.Fault,
+        "The recording of the check has a fault of its own, so the check vouches for nothing and is not counted.",
+        "A file cut in the middle, or an export and a table that disagree.",
+        "Mend what the fault names, export again; check again if that cannot be done.");
+
     /// <summary>The instrument of checks is not declared.</summary>
     public static FindingKind InstrumentUnknown { get; } = new(
         "check-instrument-unknown",

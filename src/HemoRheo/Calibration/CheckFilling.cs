@@ -16,5 +16,5 @@ internal sealed record CheckFilling(Recording Recording, int Recordings)
 
     private static Recording Together(Recording[] recordings) => recordings.Length == 1
         ? recordings[0]
-        : recordings[0] with { Readings = recordings.SelectMany(recording => recording.Readings).Select((reading, i) => reading with { Number = i + 1 }).ToItems() };
+        : recordings[0] with { Readings = recordings.SelectMany(recording => recording.Readings).Select((reading, i) => reading with { Number = i + 1 }).ToItems(), Findings = recordings.SelectMany(recording => recording.Findings).ToItems() };
 }

@@ -18,6 +18,11 @@ internal sealed record CheckReading(InstrumentCheck? Check, Finding? Fault)
             return Without(CalibrationFindings.FluidUnknown.At(where, $"Check '{recording.Sample}' {named}; declared: {declared}."));
         }
 
+        if (recording.HasFault)
+        {
+            return Without(CalibrationFindings.RecordingFaulty.At(where, $"Check '{recording.Sample}': {recording.Findings.First(finding => finding.Severity == Severity.Fault && finding.Where.Point is null).Message}"));
+        }
+
         var raw = recording.ToCurve(study, study.Analysis.Ramp);
         var curve = raw.WithFindings(TorqueFloor.Judge(raw, study));
         if (curve.Points.Count == 0) return Without(CalibrationFindings.FitUnusable.At(where, $"Check '{recording.Sample}' keeps none of {recording.Readings.Count} readings."));
@@ -49,7 +54,7 @@ internal sealed record CheckReading(InstrumentCheck? Check, Finding? Fault)
         var expected = fluid.ViscosityAt(temperature);
         var error = new Value(fit.Scaled[0] - Math.Log(expected.PascalSeconds), CheckBudget.Of(instrument, recording, fluid, temperature, fit).ToItems());
         var name = recording.Loading == 1 ? recording.Sample : Invariant($"{recording.Sample}/{recording.Loading}");
-        var findings = fit.Curve.SetAside.SelectMany(aside => aside.Findings).Concat(fit.Curve.Findings).Concat(fit.Findings).Concat(OwnFindings(instrument, recording, fit));
+        var findings = recording.Findings.Concat(fit.Curve.SetAside.SelectMany(aside => aside.Findings)).Concat(fit.Curve.Findings).Concat(fit.Findings).Concat(OwnFindings(instrument, recording, fit));
         return new InstrumentCheck(
             name, instrument.Name, fluid, recording.StartedAt, temperature, measured, expected, error, instrument.CheckLimit, CheckOutcome.CannotTell, 0, fit, findings.ToItems()).Judged(study.Analysis.Level);
     }

@@ -1,6 +1,6 @@
 namespace HemoRheo;
 
-/// <summary>A period of an instrument between calibrations: from its first passed check to the failure or adjustment that ends it.</summary>
+/// <summary>A period of an instrument between calibrations: from its first check that did not fail to the failure or adjustment that ends it.</summary>
 /// <param name="Instrument">Name of the instrument.</param>
 /// <param name="Number">Number of the period, from 1.</param>
 /// <param name="From">Its first check.</param>

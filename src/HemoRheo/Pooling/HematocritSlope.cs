@@ -6,7 +6,7 @@ namespace HemoRheo;
 /// <param name="Slope">Slope of the log value per L/L.</param>
 /// <param name="StandardUncertainty">Its standard uncertainty.</param>
 /// <param name="DegreesOfFreedom">Its degrees of freedom.</param>
-/// <param name="Plain">The plain regression slope, which hematocrit's error makes too flat.</param>
+/// <param name="Plain">The plain regression slope, which hematocrit's error makes too flat; 0 where hematocrit does not vary within groups.</param>
 /// <param name="People">People it rests on.</param>
 /// <param name="WhyNot">Why it cannot be used; null where it can.</param>
 /// <remarks>Source: Fuller 1987, Measurement Error Models (known error variance).</remarks>

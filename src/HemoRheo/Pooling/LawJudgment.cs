@@ -12,6 +12,7 @@ internal static class LawJudgment
     private const double Certain = 1e-3;
     private const double ReducedThatMatters = 2;
     private const double PatternThatMatters = 1.0 / 3;
+    private const double LeastVariance = 1e-18;
 
     /// <summary>The evidence for one law.</summary>
     /// <param name="law">The law.</param>
@@ -52,7 +53,7 @@ internal static class LawJudgment
             var slice = residuals[(place * residuals.Length / places)..((place + 1) * residuals.Length / places)];
             double n = slice.Length;
             var mean = slice.Average(item => item.Residual);
-            var variance = slice.Sum(item => (item.Residual - mean) * (item.Residual - mean)) / (n - 1);
+            var variance = Math.Max(LeastVariance, slice.Sum(item => (item.Residual - mean) * (item.Residual - mean)) / (n - 1));
             statistic += n * mean * mean / variance;
             largest = Math.Max(largest, Math.Abs(mean) / Math.Sqrt(variance));
             smallest = Math.Min(smallest, n);

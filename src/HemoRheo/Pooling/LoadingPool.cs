@@ -11,6 +11,9 @@ internal static class LoadingPool
 {
     private const double Floor = 0.1;
 
+    // A relative scatter below 1e-9 is rounding: recordings that were entered twice, not blood that was loaded twice.
+    private const double NoVariance = 1e-18;
+
     /// <summary>The scatter of loadings for measurands taken together.</summary>
     /// <param name="law">Name of the law.</param>
     /// <param name="measurands">The measurands, all logarithmic.</param>
@@ -19,7 +22,7 @@ internal static class LoadingPool
     public static LoadingScatter Pool(string law, Items<Measurand> measurands, IReadOnlyList<FitValueSet[]> samples, double? declared)
     {
         var df = samples.Sum(loadings => loadings.Length - 1);
-        if (df == 0) return Declared(law, measurands, declared);
+        if (df == 0) return Declared(law, measurands, declared, "no sample was loaded twice");
 
         var size = measurands.Count;
         var scatter = Matrix<double>.Build.Dense(size, size);
@@ -32,6 +35,13 @@ internal static class LoadingPool
                 scatter += (set.X - mean).OuterProduct(set.X - mean);
                 fits += (loadings.Length - 1.0) / loadings.Length * set.Columns * set.Columns.Transpose();
             }
+        }
+
+        if (scatter.Diagonal().Maximum() / df <= NoVariance)
+        {
+            var copies = PoolingFindings.LoadingsAlike.At(Where.Nowhere, $"{law}, {measurands[0].Name}{(size > 1 ? " and others" : "")}: {df + samples.Count} loadings of {samples.Count} samples differ by nothing.");
+            var instead = Declared(law, measurands, declared, "replicate loadings differ by nothing");
+            return instead with { Findings = instead.Findings.With([copies]) };
         }
 
         var columns = Columns(scatter / df, fits / df, df, out var atFloor);
@@ -62,12 +72,12 @@ internal static class LoadingPool
         return columns;
     }
 
-    private static LoadingScatter Declared(string law, Items<Measurand> measurands, double? declared)
+    private static LoadingScatter Declared(string law, Items<Measurand> measurands, double? declared, string why)
     {
         var columns = declared is { } scatter ? [new ScatterColumn(Enumerable.Repeat(scatter, measurands.Count).ToItems(), double.PositiveInfinity)] : Items<ScatterColumn>.None;
         var finding = declared is { } known
-            ? PoolingFindings.LoadingDeclared.At(Where.Nowhere, string.Create(System.Globalization.CultureInfo.InvariantCulture, $"{law}: no sample was loaded twice; the declared scatter of {100 * known:G3} % between loadings is used."), known)
-            : PoolingFindings.LoadingUnknown.At(Where.Nowhere, $"{law}: no sample was loaded twice and no scatter between loadings is declared.");
+            ? PoolingFindings.LoadingDeclared.At(Where.Nowhere, string.Create(System.Globalization.CultureInfo.InvariantCulture, $"{law}: {why}; the declared scatter of {100 * known:G3} % between loadings is used."), known)
+            : PoolingFindings.LoadingUnknown.At(Where.Nowhere, $"{law}: {why} and no scatter between loadings is declared.");
         return new(law, measurands, columns, 0, [finding]);
     }
 }

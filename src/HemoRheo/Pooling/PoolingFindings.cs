@@ -6,14 +6,14 @@ public static class PoolingFindings
     /// <summary>No sample has two loadings, so the declared scatter is used.</summary>
     public static FindingKind LoadingDeclared { get; } = new(
         "loading-scatter-declared", Severity.Warning,
-        "No sample was loaded twice; the scatter between loadings is the one the study file declares.",
+        "No replicate loadings show how loadings scatter; the scatter between loadings is the one the study file declares.",
         "Every sample was measured once.",
         "Load a tenth of the samples twice, at least ten of them.");
 
     /// <summary>No sample has two loadings and nothing is declared.</summary>
     public static FindingKind LoadingUnknown { get; } = new(
         "loading-scatter-unknown", Severity.Fault,
-        "No sample was loaded twice and the study file declares no scatter between loadings, so the largest part of most budgets is missing.",
+        "No replicate loadings show how loadings scatter and the study file declares no scatter between them, so the largest part of most budgets is missing.",
         "Every sample was measured once.",
         "Load some samples twice, or declare the scatter in the study file with its basis.");
 
@@ -24,6 +24,13 @@ public static class PoolingFindings
         "Few replicates, or loadings that repeat very well.",
         "Nothing, or load more samples twice.",
         "Simulated with the budget, this project");
+
+    /// <summary>Replicate loadings have the same values.</summary>
+    public static FindingKind LoadingsAlike { get; } = new(
+        "loadings-alike", Severity.Warning,
+        "Replicate loadings have one and the same value to nine digits, which no two fillings have; they show no scatter between loadings.",
+        "One recording copied under the number of a second loading.",
+        "See the export files of the replicates.");
 
     /// <summary>The study's curves together contradict a law.</summary>
     public static FindingKind LawDoesNotFit { get; } = new(

@@ -3,6 +3,8 @@ namespace HemoRheo;
 /// <summary>The study's slope of a log value against hematocrit.</summary>
 internal static class SlopePool
 {
+    private const double NoVariance = 1e-18;
+
     /// <summary>The slope within groups, knowing hematocrit's error.</summary>
     /// <param name="law">Name of the law.</param>
     /// <param name="measurand">The measurand.</param>
@@ -20,9 +22,9 @@ internal static class SlopePool
         var groups = people.GroupBy(person => person.Point.Group)
             .Select(group => WithinGroup.Of([.. group.Select(person => person.Point.X)], [.. group.Select(person => person.Point.Y)])).ToArray();
         var aware = ErrorAwareSlope.Of(groups, people.Average(person => person.ErrorVariance));
-        var plain = ErrorAwareSlope.Of(groups, 0);
+        var plain = ErrorAwareSlope.Of(groups, 0) is { TrueScatter: > NoVariance } known ? known.Slope : 0;
         return aware.Usable
-            ? new(law, measurand, aware.Slope, Math.Sqrt(aware.Variance), aware.DegreesOfFreedom, plain.Slope, people.Length, null)
-            : new(law, measurand, 0, 0, 0, plain.Slope, people.Length, ErrorAwareSlope.TooCoarse);
+            ? new(law, measurand, aware.Slope, Math.Sqrt(aware.Variance), aware.DegreesOfFreedom, plain, people.Length, null)
+            : new(law, measurand, 0, 0, 0, plain, people.Length, ErrorAwareSlope.TooCoarse);
     }
 }

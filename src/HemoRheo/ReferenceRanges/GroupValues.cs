@@ -39,8 +39,9 @@ internal sealed record GroupValues(Items<PersonValue> People, int Samples, Items
     {
         if (sample.Status != InstrumentStatus.InOrder) return RangeFindings.InstrumentNotInOrder.Code;
         var value = Find(sample, question);
-        if (value is null || !double.IsFinite(value.Value.X)) return RangeFindings.ValueMissing.Code;
-        if (value.Decidable) return null;
+        if (value is null) return RangeFindings.ValueMissing.Code;
+        if (sample.StatusOf(value) != InstrumentStatus.InOrder) return RangeFindings.InstrumentNotInOrder.Code;
+        if (value.Decidable) return double.IsFinite(value.Value.X) ? null : RangeFindings.ValueNotDecidable.Code;
         return value.Findings.MaxBy(finding => finding.Severity)?.Code ?? RangeFindings.ValueNotDecidable.Code;
     }
 

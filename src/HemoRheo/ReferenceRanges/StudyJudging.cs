@@ -39,7 +39,7 @@ public static class StudyJudging
 
     private static JudgedValue Judged(Study study, SampleResult sample, SampleValue value, Dictionary<Question, RangeAnswer> answers)
     {
-        var marked = sample.Status != InstrumentStatus.InOrder;
+        var marked = sample.StatusOf(value) != InstrumentStatus.InOrder;
         if (!answers.TryGetValue(Question.Of(value), out var answer)) return new(value, null, null, WhyNotAsked(study, value), false, marked);
         return answer.Range is { } range
             ? value.JudgedBy(range, study.Analysis.Level, marked)

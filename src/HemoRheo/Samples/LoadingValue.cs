@@ -27,25 +27,8 @@ internal static class LoadingValue
             (1, temperature is { } at ? BloodCoefficient(study, at) : Value.Exact(0))]);
     }
 
-    /// <summary>Log plasma viscosity of a sample at 37 degC; null where it was not measured or its temperature is not stated.</summary>
-    public static Value? Plasma(Study study, SampleRecord record, DateTimeOffset measuredAt, IReadOnlyDictionary<string, InstrumentHistory> histories)
-    {
-        if (record.PlasmaViscosity is not { } viscosity || record.PlasmaTemperature is not { } temperature) return null;
-        var own = new Value(Math.Log(viscosity.PascalSeconds), [new(new(SourceKind.Plasma, record.Sample), study.Blood.PlasmaUncertainty)]);
-        if (record.PlasmaInstrument is { } name && histories.TryGetValue(name, out var history))
-        {
-            var at = record.PlasmaMeasuredAt ?? measuredAt;
-            var day = string.Create(System.Globalization.CultureInfo.InvariantCulture, $"{name}/{DateOnly.FromDateTime(at.DateTime):yyyy-MM-dd}");
-            return Value.Combine([
-                (1, own),
-                (1, Corrected(study, history.At(at), day)),
-                (1, ToBody(temperature, study.Blood.PlasmaPerKelvin, history.Instrument.Thermometer, name))]);
-        }
-
-        return own with { X = own.X + study.Blood.PlasmaPerKelvin * (temperature.DegreesCelsius - Temperature.Body.DegreesCelsius) };
-    }
-
-    private static Value Corrected(Study study, InstrumentStanding standing, string day)
+    /// <summary>What the correction of an instrument adds to a log value of a day.</summary>
+    public static Value Corrected(Study study, InstrumentStanding standing, string day)
     {
         if (standing.Period is not { } period) return Value.Exact(0);
         var correction = -1 * period.Correction;
@@ -53,7 +36,8 @@ internal static class LoadingValue
         return correction.With(new(new(SourceKind.Day, day), period.Scatter, period.ScatterEstimate, period.ScatterDegreesOfFreedom));
     }
 
-    private static Value ToBody(Temperature read, double perKelvin, double thermometer, string instrument) => new(
+    /// <summary>What moving a log value from the temperature read to 37 degC adds.</summary>
+    public static Value ToBody(Temperature read, double perKelvin, double thermometer, string instrument) => new(
         perKelvin * (read.DegreesCelsius - Temperature.Body.DegreesCelsius),
         [new(new(SourceKind.Thermometer, instrument), perKelvin * thermometer)]);
 

@@ -23,15 +23,20 @@ internal static class NativeValues
             var measurand = set.Measurands[i];
             var inside = measurand is ViscosityAtRate viscosity ? chosen.Where(item => item.Loading.Curve.Covers(viscosity.Rate)).ToArray() : chosen;
             var used = inside.Length > 0 ? inside : chosen;
-            var findings = Findings(study, sample, set, measurand, evidence, used, sound.Length > 0, inside.Length > 0).ToItems();
+            var value = Combined(study, sample, set, i, used);
+            var findings = Findings(study, sample, set, measurand, evidence, used, sound.Length > 0, inside.Length > 0).Concat(AtBound(sample, measurand, value)).ToItems();
             yield return new(
                 measurand, set.Law.Name, HematocritBasis.Native,
-                Combined(study, sample, set, i, used),
+                value,
                 measurand is ViscosityAtRate at ? Interpolated(study, at.Rate, used.Select(item => item.Loading)) : null,
                 findings.All(finding => finding.Severity != Severity.Fault && finding.Kind != SampleFindings.ShownBeside),
                 findings);
         }
     }
+
+    private static IEnumerable<Finding> AtBound(string sample, Measurand measurand, Value value) => double.IsFinite(value.X)
+        ? []
+        : [SampleFindings.ValueAtBound.At(new(Sample: sample), $"{measurand.Name} is {measurand.ToSi(value.X).ToString(System.Globalization.CultureInfo.InvariantCulture)}: a loading's fit holds it at its bound.")];
 
     private static Value Combined(Study study, string sample, MeasurandSet set, int index, IReadOnlyList<(LoadingResult Loading, FittedLaw Fit)> used)
     {
@@ -73,7 +78,7 @@ internal static class NativeValues
         foreach (var (loading, fit) in used)
         {
             var place = where with { Loading = loading.Recording.Loading };
-            if (loading.Standing.Period is null) yield return SampleFindings.NotCalibrated.At(place, loading.Standing.Reason);
+            if (loading.Standing.Period is null) yield return SampleFindings.NotCalibrated.At(place, SampleFindings.WhyNotCalibrated(loading.Standing));
             if (loading.Curve.MeanTemperature is null) yield return SampleFindings.NoTemperature.At(place, "No kept reading carries a temperature.");
             if (fit.Fit.Probability is < CurveContradicts and var p)
             {

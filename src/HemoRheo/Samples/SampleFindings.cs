@@ -32,6 +32,13 @@ public static class SampleFindings
         "Low-rate readings lie below the torque floor.",
         "Measure to 1 1/s or lower with a more sensitive geometry.");
 
+    /// <summary>The number is held at its bound.</summary>
+    public static FindingKind ValueAtBound { get; } = new(
+        "value-at-bound", Severity.Fault,
+        "The number ended at its bound in the fit of a loading, where its logarithm and its uncertainty do not exist; it is shown and not decided on.",
+        "Blood without a measurable yield stress, or no readings at low shear rates.",
+        "Report that none was found, with the lowest kept shear rate.");
+
     /// <summary>No usable fit.</summary>
     public static FindingKind NoUsableFit { get; } = new(
         "no-usable-fit", Severity.Fault,
@@ -102,4 +109,7 @@ public static class SampleFindings
         "The study's slope against hematocrit cannot be used, so no value is moved to the standard hematocrit by it.",
         "Too few people, or hematocrit measured too coarsely.",
         "Use the plasma power rule.");
+
+    /// <summary>Why a standing has no correction.</summary>
+    internal static string WhyNotCalibrated(InstrumentStanding standing) => standing.Findings.Count > 0 ? standing.Findings[0].Message : standing.Reason;
 }

@@ -4,14 +4,14 @@ namespace HemoRheo;
 internal static class StandardValues
 {
     /// <summary>Values made from the native ones.</summary>
-    public static IEnumerable<SampleValue> Of(Study study, SampleRecord? record, IReadOnlyList<SampleValue> native, Value? plasma, IReadOnlyList<HematocritSlope> slopes)
+    public static IEnumerable<SampleValue> Of(Study study, SampleRecord? record, IReadOnlyList<SampleValue> native, PlasmaValue? plasma, IReadOnlyList<HematocritSlope> slopes)
     {
         var counter = study.Counters.FirstOrDefault(known => known.Name == record?.Counter);
         foreach (var value in native.Where(value => value.Measurand is ViscosityAtRate))
         {
             if (plasma is not null)
             {
-                yield return value with { Measurand = Measurand.RelativeViscosity(((ViscosityAtRate)value.Measurand).Rate), Value = value.Value - plasma, Interpolated = value.Interpolated - plasma.X };
+                yield return Relative(record!.Sample, value, plasma);
             }
 
             if (record?.Hematocrit is not { } hematocrit || counter is null) continue;
@@ -21,7 +21,15 @@ internal static class StandardValues
         }
     }
 
-    private static SampleValue ByPlasma(Study study, string sample, Hematocrit hematocrit, Counter counter, SampleValue native, Value plasma)
+    private static SampleValue Relative(string sample, SampleValue native, PlasmaValue plasma)
+    {
+        var added = plasma.Findings(sample).ToArray();
+        return new(
+            Measurand.RelativeViscosity(((ViscosityAtRate)native.Measurand).Rate), native.Law, native.Basis, native.Value - plasma.Value,
+            native.Interpolated - plasma.Value.X, native.Decidable && added.Length == 0, native.Findings.With(added));
+    }
+
+    private static SampleValue ByPlasma(Study study, string sample, Hematocrit hematocrit, Counter counter, SampleValue native, PlasmaValue plasma)
     {
         var range = StandardHematocritRule.PowerRuleRange;
         var k = study.Standard.Hematocrit.LiterPerLiter / hematocrit.LiterPerLiter;
@@ -29,9 +37,9 @@ internal static class StandardValues
             ? []
             : [SampleFindings.OutsidePowerRule.At(new(Sample: sample), FormattableString.Invariant($"Hematocrit {hematocrit}; the rule is used from {range.Lower} to {range.Upper} L/L."), hematocrit.LiterPerLiter, hematocrit.LiterPerLiter < range.Lower ? range.Lower : range.Upper)];
         return Standardised(
-            study, sample, native, HematocritBasis.StandardByPlasma, StandardisingRule.PlasmaPower, outside,
-            StandardHematocritRule.ByPlasma(native.Value, plasma, sample, hematocrit, study.Standard.Hematocrit, counter),
-            native.Interpolated * k + (1 - k) * plasma.X);
+            study, sample, native, HematocritBasis.StandardByPlasma, StandardisingRule.PlasmaPower, outside.Concat(plasma.Findings(sample)),
+            StandardHematocritRule.ByPlasma(native.Value, plasma.Value, sample, hematocrit, study.Standard.Hematocrit, counter),
+            native.Interpolated * k + (1 - k) * plasma.Value.X);
     }
 
     private static SampleValue BySlope(Study study, string sample, Hematocrit hematocrit, Counter counter, SampleValue native, HematocritSlope slope) => Standardised(

@@ -25,7 +25,8 @@ public static class StudyEvaluation
 
         var native = samples.ToDictionary(sample => sample.Name, sample => sets.SelectMany(set => NativeValues.Of(study, sample.Name, sample.Loadings, set, evidence[set.Law.Name])).ToArray());
         cancel.ThrowIfCancellationRequested();
-        var slopes = Slopes(study, readings, records, samples.Select(sample => (sample.Name, sample.Loadings)), native).ToItems();
+        var inOrder = samples.Where(sample => sample.Loadings.All(loading => loading.Standing.Status == InstrumentStatus.InOrder)).Select(sample => sample.Name).ToArray();
+        var slopes = StudySlopes.Of(study, readings, inOrder, native).ToItems();
 
         var results = new List<SampleResult>();
         foreach (var (name, own) in samples)
@@ -41,7 +42,7 @@ public static class StudyEvaluation
 
     private static SampleResult Result(Study study, string name, Items<LoadingResult> loadings, SampleRecord? record, SampleValue[] native, Items<HematocritSlope> slopes, IReadOnlyDictionary<string, InstrumentHistory> histories)
     {
-        var plasma = record is null ? null : LoadingValue.Plasma(study, record, loadings[0].Recording.StartedAt, histories);
+        var plasma = record is null ? null : PlasmaValue.Of(study, record, loadings[0].Recording.StartedAt, histories);
         var values = native.Concat(StandardValues.Of(study, record, native, plasma, slopes)).ToItems();
         var where = new Where(Sample: name);
         var own = new List<Finding>();
@@ -51,8 +52,8 @@ public static class StudyEvaluation
         if (values.All(value => value.Law != study.Analysis.DecideBy)) own.Add(SampleFindings.NoUsableFit.At(where, $"No loading has a usable fit of {study.Analysis.DecideBy}."));
         // What a law shown beside cannot describe stays with its values; only the law that decides speaks for the sample.
         var decided = values.Where(value => value.Law == study.Analysis.DecideBy).SelectMany(value => value.Findings).Where(finding => finding.Kind != SampleFindings.ShownBeside);
-        var findings = own.Concat(loadings.SelectMany(loading => loading.Findings)).Concat(decided).Distinct().ToItems();
-        return new(name, record, loadings, values, loadings.Max(loading => loading.Standing.Status), findings);
+        var findings = own.Concat(loadings.SelectMany(loading => loading.Findings)).Concat(plasma?.Standing?.Findings ?? []).Concat(decided).Distinct().ToItems();
+        return new(name, record, loadings, values, loadings.Max(loading => loading.Standing.Status), findings, plasma?.Standing?.Status);
     }
 
     private static LoadingScatter Scatter(Study study, FlowLaw law, Items<Measurand> measurands, IEnumerable<Items<LoadingResult>> samples)
@@ -63,24 +64,6 @@ public static class StudyEvaluation
                 .Where(item => item.Set is not null).Select(item => item.Set!.ShiftedBy(item.Shift)).ToArray())
             .Where(sets => sets.Length > 1).ToArray();
         return LoadingPool.Pool(law.Name, measurands, replicates, study.Errors.DeclaredLoading);
-    }
-
-    private static IEnumerable<HematocritSlope> Slopes(
-        Study study, StudyReadings readings, IReadOnlyDictionary<string, SampleRecord> records,
-        IEnumerable<(string Name, Items<LoadingResult> Loadings)> samples, IReadOnlyDictionary<string, SampleValue[]> native)
-    {
-        var strata = readings.People.ToDictionary(person => person.Id, person => person.GroupCode);
-        var inOrder = samples.Where(sample => sample.Loadings.All(loading => loading.Standing.Status == InstrumentStatus.InOrder)).Select(sample => sample.Name).ToArray();
-        foreach (var law in study.Analysis.Laws)
-        {
-            foreach (var measurand in study.Analysis.StandardRates.Select(Measurand.Viscosity))
-            {
-                yield return SlopePool.Pool(law, measurand, [.. inOrder
-                    .Select(name => (Record: records.GetValueOrDefault(name), Value: native[name].FirstOrDefault(value => value.Law == law && value.Measurand == measurand)))
-                    .Where(item => item.Record?.Hematocrit is not null && item.Value is not null && item.Value.Findings.All(finding => finding.Severity != Severity.Fault || finding.Kind == PoolingFindings.LawDoesNotFit))
-                    .Select(item => (item.Record!.Person, strata.GetValueOrDefault(item.Record.Person, ""), item.Record.Hematocrit!.Value.LiterPerLiter, study.Counters.FirstOrDefault(counter => counter.Name == item.Record.Counter)?.Uncertainty ?? 0, item.Value!.Value.X))]);
-            }
-        }
     }
 
     private static IEnumerable<Finding> PoolFindings(Study study, IEnumerable<MeasurandSet> sets, IEnumerable<LawEvidence> evidence, IEnumerable<HematocritSlope> slopes)

@@ -145,4 +145,21 @@ public class CheckTests
     private static double Amount(SourceKind kind) => Assert.Single(History(Check(0, 1)).Checks).Error.Part(kind)!.Value;
 
     private static Contribution Part(InstrumentCheck check, SourceKind kind, string of) => check.Error.Parts.Single(part => part.Source == new Source(kind, of));
+
+    [Fact]
+    public void A_check_whose_recording_has_a_fault_is_not_counted_and_says_why()
+    {
+        var cut = Check(7, 2.9) with { Findings = [ExportFindings.FileCut.At(new("checks/C7.csv", Line: 9), "The block ends in the middle.")] };
+        var history = History(Check(0, 0.4), cut, Check(14, 0.6));
+        Assert.Equal(["C0", "C14"], history.Checks.Select(check => check.Name));
+        var finding = Assert.Single(history.Findings);
+        Assert.Equal(("check-recording-faulty", "Check 'C7': The block ends in the middle."), (finding.Code, finding.Message));
+    }
+
+    [Fact]
+    public void What_was_found_while_a_check_was_read_stays_with_it()
+    {
+        var odd = ExportFindings.NotANumber.At(new("checks/C0.csv", Line: 9, Point: 3), "A word in a column of numbers.");
+        Assert.Contains(odd, Assert.Single(History(Declared, Check(0, 0.4) with { Findings = [odd] }).Checks).Findings);
+    }
 }

@@ -42,6 +42,20 @@ public sealed class LawJudgmentTests
         Assert.Equal(0, evidence.Curves);
     }
 
+    [Fact]
+    public void Curves_copied_ten_times_show_their_pattern_and_no_number_is_lost()
+    {
+        var right = JudgeCopies(rate => Math.Pow(Math.Sqrt(0.005) + Math.Sqrt(0.0033 * rate), 2));
+        Assert.True(right.Fits);
+        Assert.InRange(right.PatternProbability, 0.999, 1);
+        var wrong = JudgeCopies(rate => rate * 0.0031 * Math.Pow((1 + Math.Sqrt(rate / 2.5)) / (0.22 + Math.Sqrt(rate / 2.5)), 2));
+        Assert.False(wrong.Fits);
+        Assert.InRange(wrong.PatternProbability, 0, 1e-6);
+    }
+
+    private static LawEvidence JudgeCopies(Func<double, double> stress) =>
+        LawJudgment.Judge(FlowLaw.Casson, Fits.OfAll([.. Enumerable.Repeat(FlowCurve.Of(Rates, [.. Rates.Select(stress)]), 10)], FlowLaw.Casson, Declared));
+
     private static LawEvidence Judge(FlowLaw law, Func<Random, double[]> truth, int study, int curves, double noise)
     {
         var random = new Xoshiro256StarStar(77 + 1000 * study, false);

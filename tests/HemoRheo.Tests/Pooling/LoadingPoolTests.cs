@@ -36,6 +36,16 @@ public sealed class LoadingPoolTests
         Assert.Equal(0.01, column.DegreesOfFreedom, 1e-12);
     }
 
+    [Theory]
+    [InlineData(0.02, "loading-scatter-declared", 1)]
+    [InlineData(null, "loading-scatter-unknown", 0)]
+    public void Replicates_that_are_copies_show_no_scatter_and_say_so(double? declared, string code, int columns)
+    {
+        var scatter = LoadingPool.Pool("Casson", [Two[0]], Pairs(0.003, (-5.2, -5.2), (-5.1, -5.1)), declared);
+        Assert.Equal([code, "loadings-alike"], scatter.Findings.Select(finding => finding.Code));
+        Assert.Equal(columns, scatter.Columns.Count);
+    }
+
     [Fact]
     public void Known_scatter_is_recovered_over_many_replicates()
     {

@@ -61,4 +61,11 @@ public sealed class SlopePoolTests
         var points = Enumerable.Range(0, 40).Select(i => ($"P{i / 2}", "a", 0.36 + 0.008 * (i / 2), 0.001, -4.4 + 0.02 * (i / 2))).ToArray();
         Assert.Equal(20, SlopePool.Pool("none", At10, points).People);
     }
+
+    [Fact]
+    public void One_hematocrit_for_everybody_gives_numbers_all_the_same()
+    {
+        var pooled = SlopePool.Pool("none", At10, [.. Enumerable.Range(0, 30).Select(i => ($"P{i}", "a", 0.45, 0.006, -4.4 + 0.01 * i))]);
+        Assert.Equal((0.0, 0.0, "hematocrit is measured too coarsely to adjust"), (pooled.Slope, pooled.Plain, pooled.WhyNot));
+    }
 }

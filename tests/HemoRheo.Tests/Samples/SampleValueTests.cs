@@ -140,6 +140,68 @@ public sealed class SampleValueTests
     }
 
     [Fact]
+    public void A_recording_copied_as_a_second_loading_does_not_stop_the_study()
+    {
+        var copied = InventedBlood.Casson("S-1", 1, 0.41);
+        var analyzed = Evaluate(Study, [copied, copied with { Loading = 2 }]);
+        Assert.Contains(analyzed.Pool.Findings, finding => finding.Code == "loadings-alike");
+        Assert.False(analyzed.Samples[0].Find("Casson", At10, HematocritBasis.Native)!.Decidable);
+    }
+
+    [Fact]
+    public void A_yield_stress_at_its_bound_is_shown_and_not_decided_on_and_spoils_no_pool()
+    {
+        Recording[] blood = [Thickening("S-1", 1), Thickening("S-1", 2), InventedBlood.Casson("S-2", 1, 0.44), InventedBlood.Casson("S-2", 2, 0.44, 1.02)];
+        var analyzed = Evaluate(TestStudy.Readings(Study, InventedBlood.Checks(), blood, [InventedBlood.Record("S-1", 0.41), InventedBlood.Record("S-2", 0.44)]));
+        var yieldStress = analyzed.Samples[0].Find("Casson", Measurand.CassonYieldStress, HematocritBasis.Native)!;
+        Assert.Equal(0, yieldStress.Si);
+        Assert.False(yieldStress.Decidable);
+        Assert.Contains(yieldStress.Findings, finding => finding.Code == "value-at-bound");
+        Assert.All(analyzed.Samples.SelectMany(sample => sample.Values).Where(value => value != yieldStress), value => Assert.True(double.IsFinite(value.Value.X) && double.IsFinite(value.Value.StandardUncertainty), value.ToString()));
+        Assert.All(analyzed.Pool.Scatter.SelectMany(scatter => scatter.Columns).SelectMany(column => column.Amounts), amount => Assert.True(double.IsFinite(amount)));
+
+        var result = analyzed.Judge(cancel: TestContext.Current.CancellationToken);
+        var record = RunRecord.Of(result, analyzed.Study.Summarize(result).By("group"));
+        Assert.True(RunRecord.FromJson(record.ToJson()).ComparedWith(record).Identical);
+    }
+
+    [Fact]
+    public void One_check_without_scatter_says_why_it_gives_no_correction()
+    {
+        var analyzed = Evaluate(TestStudy.Readings(Study, InventedBlood.Checks()[..1], Pair(), [InventedBlood.Record("S-1", 0.41)]));
+        var finding = Assert.Single(analyzed.Samples[0].Find("Casson", At10, HematocritBasis.Native)!.Findings.Select(finding => (finding.Code, finding.Message)).Where(finding => finding.Code == "not-calibrated").Distinct());
+        Assert.Equal("Instrument 'R1' has one check a period and no declared scatter; its values cannot be corrected.", finding.Message);
+    }
+
+    [Fact]
+    public void Plasma_from_an_instrument_that_nothing_vouches_for_is_not_decided_on_and_marks_what_it_enters()
+    {
+        var early = InventedBlood.Record("S-1", 0.41) with { PlasmaMeasuredAt = InventedBlood.CheckTime.AddDays(-1) };
+        var sample = Evaluate(Study, Pair(), early).Samples[0];
+        var native = sample.Find("Casson", At10, HematocritBasis.Native)!;
+        Assert.True(native.Decidable);
+        Assert.Equal(InstrumentStatus.InOrder, sample.StatusOf(native));
+        foreach (var value in new[] { sample.Find("Casson", At10, HematocritBasis.StandardByPlasma)!, sample.Find("Casson", Measurand.RelativeViscosity(10.PerSecond()), HematocritBasis.Native)! })
+        {
+            Assert.False(value.Decidable);
+            Assert.Contains(value.Findings, finding => finding.Code == "not-calibrated");
+            Assert.Equal(InstrumentStatus.Unknown, sample.StatusOf(value));
+        }
+
+        Assert.Contains(sample.Findings, finding => finding.Code == "instrument-not-checked");
+    }
+
+    [Fact]
+    public void Plasma_from_an_instrument_in_doubt_marks_the_values_it_enters_and_no_others()
+    {
+        var late = InventedBlood.Record("S-1", 0.41) with { PlasmaMeasuredAt = InventedBlood.CheckTime.AddDays(60) };
+        var judged = Evaluate(Study, Pair(), late).Judge(cancel: TestContext.Current.CancellationToken).Samples[0];
+        Assert.Equal(InstrumentStatus.InDoubt, judged.Result.PlasmaStatus);
+        Assert.All(judged.Values, value => Assert.Equal(value.Value.Basis == HematocritBasis.StandardByPlasma || value.Value.Measurand is RelativeViscosityAtRate, value.Marked));
+        Assert.Contains(judged.Result.Findings, finding => finding.Code == "instrument-check-overdue");
+    }
+
+    [Fact]
     public void The_order_of_recordings_changes_no_bit_of_any_value()
     {
         Recording[] blood = [.. Pair(), InventedBlood.Casson("S-2", 1, 0.44), InventedBlood.Casson("S-2", 2, 0.44, 0.99), InventedBlood.Casson("S-3", 1, 0.47)];
@@ -148,6 +210,9 @@ public sealed class SampleValueTests
         var backward = Evaluate(TestStudy.Readings(Study, InventedBlood.Checks().Reverse(), blood.GroupBy(recording => recording.Sample).Reverse().SelectMany(sample => sample), records.Reverse()));
         Assert.Equal(forward.Samples.SelectMany(sample => sample.Values.Select(value => value.Value)), backward.Samples.SelectMany(sample => sample.Values.Select(value => value.Value)));
     }
+
+    private static Recording Thickening(string sample, int loading) =>
+        TestStudy.Blood(sample, TestStudy.Rates.Select((rate, i) => TestStudy.Reading(i + 1, rate, 0.0035 * Math.Pow(rate, 1.01) * (i % 2 == 0 ? 1.002 : 0.998), 37.1)), loading, InventedBlood.BloodTime);
 
     private static Recording[] Pair() => [InventedBlood.Casson("S-1", 1, 0.41), InventedBlood.Casson("S-1", 2, 0.41, 1.02)];
 
