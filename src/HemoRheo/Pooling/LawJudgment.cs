@@ -1,4 +1,4 @@
-using MathNet.Numerics.Distributions;
+using MathNet.Numerics;
 
 namespace HemoRheo;
 
@@ -24,7 +24,7 @@ internal static class LawJudgment
         var chiSquare = free.Sum(fit => fit.Fit.ChiSquare);
         var df = free.Sum(fit => fit.Fit.DegreesOfFreedom);
         var known = free[0].Errors.ScaleKnown;
-        var probability = known ? 1 - ChiSquared.CDF(df, chiSquare) : 1;
+        var probability = known ? SpecialFunctions.GammaUpperRegularized(df / 2.0, chiSquare / 2) : 1;
         var (pattern, largest) = Pattern(free, law.Parameters.Count);
         var reduced = chiSquare / df;
         var patterned = pattern < Certain && largest > PatternThatMatters;
@@ -32,13 +32,15 @@ internal static class LawJudgment
         var fitsTheStudy = !patterned && !oversized;
         var numbers = string.Create(
             System.Globalization.CultureInfo.InvariantCulture,
-            $"{free.Length} curves, chi-square {chiSquare:F0} on {df} degrees of freedom{(known ? FormattableString.Invariant($" (p = {probability:G2})") : "")}, mean residual up to {largest:F2} standard deviations at one place (p = {pattern:G2})");
+            $"{free.Length} curves, chi-square {chiSquare:F0} on {df} degrees of freedom{(known ? $" ({Shown(probability)})" : "")}, mean residual up to {largest:F2} standard deviations at one place ({Shown(pattern)})");
         var words = patterned ? $"{law.Name} does not fit: the residuals have a common pattern; {numbers}."
             : oversized ? $"{law.Name} does not fit within the declared errors; {numbers}."
             : known && probability < Certain ? $"{law.Name} fits, but the scatter is larger than declared; {numbers}."
             : $"{law.Name} fits; {numbers}.";
         return new(law.Name, free.Length, chiSquare, df, probability, pattern, fitsTheStudy, words);
     }
+
+    private static string Shown(double probability) => probability < 1e-4 ? "p below 0.0001" : string.Create(System.Globalization.CultureInfo.InvariantCulture, $"p = {probability:G2}");
 
     private static (double Probability, double Largest) Pattern(IReadOnlyList<FittedLaw> fits, int parameters)
     {
@@ -60,6 +62,7 @@ internal static class LawJudgment
         }
 
         // Residuals of a fit are orthogonal to its gradients, so their means live in as many dimensions fewer as there are parameters.
-        return (1 - FisherSnedecor.CDF(places - parameters, smallest - 1, statistic / places), largest);
+        var (above, below) = (places - parameters, smallest - 1);
+        return (SpecialFunctions.BetaRegularized(below / 2, above / 2.0, below / (below + above * statistic / places)), largest);
     }
 }
