@@ -13,6 +13,7 @@ internal static class LawJudgment
     private const double ReducedThatMatters = 2;
     private const double PatternThatMatters = 1.0 / 3;
     private const double LeastVariance = 1e-18;
+    private const int FewestCurves = 8;
 
     /// <summary>The evidence for one law.</summary>
     /// <param name="law">The law.</param>
@@ -25,14 +26,16 @@ internal static class LawJudgment
         var df = free.Sum(fit => fit.Fit.DegreesOfFreedom);
         var known = free[0].Errors.ScaleKnown;
         var probability = known ? SpecialFunctions.GammaUpperRegularized(df / 2.0, chiSquare / 2) : 1;
-        var (pattern, largest) = Pattern(free, law.Parameters.Count);
+        var places = Places(free);
+        var searched = free.Length >= FewestCurves && places > law.Parameters.Count;
+        var (pattern, largest) = searched ? Pattern(free, places, law.Parameters.Count) : (1, 0);
         var reduced = chiSquare / df;
         var patterned = pattern < Certain && largest > PatternThatMatters;
         var oversized = known && probability < Certain && reduced > ReducedThatMatters;
         var fitsTheStudy = !patterned && !oversized;
         var numbers = string.Create(
             System.Globalization.CultureInfo.InvariantCulture,
-            $"{free.Length} curves, chi-square {chiSquare:F0} on {df} degrees of freedom{(known ? $" ({Shown(probability)})" : "")}, mean residual up to {largest:F2} standard deviations at one place ({Shown(pattern)})");
+            $"{free.Length} curves, chi-square {chiSquare:F0} on {df} degrees of freedom{(known ? $" ({Shown(probability)})" : "")}, {(searched ? FormattableString.Invariant($"mean residual up to {largest:F2} standard deviations at one place ({Shown(pattern)})") : "too few to look for a common pattern of residuals")}");
         var words = patterned ? $"{law.Name} does not fit: the residuals have a common pattern; {numbers}."
             : oversized ? $"{law.Name} does not fit within the declared errors; {numbers}."
             : known && probability < Certain ? $"{law.Name} fits, but the scatter is larger than declared; {numbers}."
@@ -42,11 +45,11 @@ internal static class LawJudgment
 
     private static string Shown(double probability) => probability < 1e-4 ? "p below 0.0001" : string.Create(System.Globalization.CultureInfo.InvariantCulture, $"p = {probability:G2}");
 
-    private static (double Probability, double Largest) Pattern(IReadOnlyList<FittedLaw> fits, int parameters)
+    private static int Places(IReadOnlyCollection<FittedLaw> fits) => (int)Math.Round((double)fits.Sum(fit => fit.Residuals.Count) / fits.Count);
+
+    private static (double Probability, double Largest) Pattern(IReadOnlyList<FittedLaw> fits, int places, int parameters)
     {
         var residuals = fits.SelectMany((fit, curve) => fit.Residuals.Select((residual, i) => (Curve: curve, Rate: fit.Curve.Points[i].Rate.ReciprocalSeconds, Residual: residual))).OrderBy(item => item.Rate).ToArray();
-        var places = (int)Math.Round((double)residuals.Length / fits.Count);
-        if (places <= parameters || fits.Count < 8) return (1, 0);
         var statistic = 0.0;
         var largest = 0.0;
         var smallest = double.PositiveInfinity;

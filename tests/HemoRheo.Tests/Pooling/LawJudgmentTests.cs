@@ -35,6 +35,14 @@ public sealed class LawJudgmentTests
     }
 
     [Fact]
+    public void Too_few_curves_for_a_pattern_are_said_and_no_probability_is_invented()
+    {
+        var evidence = Judge(FlowLaw.Casson, Casson, 1, 7, 0.01);
+        Assert.Contains("too few to look for a common pattern", evidence.Words, StringComparison.Ordinal);
+        Assert.DoesNotContain("mean residual", evidence.Words, StringComparison.Ordinal);
+    }
+
+    [Fact]
     public void A_study_without_usable_curves_says_nothing_of_a_law()
     {
         var evidence = LawJudgment.Judge(FlowLaw.Casson, []);
