@@ -9,4 +9,8 @@ namespace HemoRheo;
 /// <param name="PatternProbability">Probability of mean residuals as large at the same places along the curves if the law is right, whatever the size of the errors.</param>
 /// <param name="Fits">Whether the law may be decided by.</param>
 /// <param name="Words">The judgment in one sentence.</param>
-public sealed record LawEvidence(string Law, int Curves, double ChiSquare, int DegreesOfFreedom, double Probability, double PatternProbability, bool Fits, string Words);
+public sealed record LawEvidence(string Law, int Curves, double ChiSquare, int DegreesOfFreedom, double Probability, double PatternProbability, bool Fits, string Words)
+{
+    /// <summary>The kind of finding that keeps its values from being decided on; null where it fits.</summary>
+    internal FindingKind? Unfit => Fits ? null : Curves == 0 ? PoolingFindings.LawNotJudged : PoolingFindings.LawDoesNotFit;
+}

@@ -22,7 +22,7 @@ internal static class LoadingPool
     public static LoadingScatter Pool(string law, Items<Measurand> measurands, IReadOnlyList<FitValueSet[]> samples, double? declared)
     {
         var df = samples.Sum(loadings => loadings.Length - 1);
-        if (df == 0) return Declared(law, measurands, declared, "no sample was loaded twice");
+        if (df == 0) return Declared(law, measurands, declared, "no sample has two loadings without a fault");
 
         var size = measurands.Count;
         var scatter = Matrix<double>.Build.Dense(size, size);
@@ -51,7 +51,7 @@ internal static class LoadingPool
         return new(law, measurands, columns.ToItems(), df, findings);
     }
 
-    private static List<ScatterColumn> Columns(Matrix<double> scatter, Matrix<double> fits, int df, out bool atFloor)
+    private static List<ScatterColumn> Columns(Matrix<double> scatter, Matrix<double> fits, int df, out int atFloor)
     {
         var outer = scatter.Evd(Symmetricity.Symmetric);
         var roots = outer.EigenValues.Real();
@@ -59,12 +59,12 @@ internal static class LoadingPool
         var half = Matrix<double>.Build.DenseOfColumnVectors(kept.Select(i => outer.EigenVectors.Column(i) * Math.Sqrt(roots[i])));
         var inverse = Matrix<double>.Build.DenseOfColumnVectors(kept.Select(i => outer.EigenVectors.Column(i) / Math.Sqrt(roots[i])));
         var inner = (inverse.Transpose() * (scatter - fits) * inverse).Evd(Symmetricity.Symmetric);
-        atFloor = false;
+        atFloor = 0;
         var columns = new List<ScatterColumn>();
         for (var k = 0; k < kept.Length; k++)
         {
             var share = inner.EigenValues[k].Real;
-            atFloor |= share < Floor;
+            if (share < Floor) atFloor++;
             share = Math.Clamp(share, Floor, 1);
             columns.Add(new((half * inner.EigenVectors.Column(k) * Math.Sqrt(share)).ToItems(), df * share * share));
         }

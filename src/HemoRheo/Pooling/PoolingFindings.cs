@@ -20,7 +20,7 @@ public static class PoolingFindings
     /// <summary>The estimate of loading scatter is held at its floor.</summary>
     public static FindingKind LoadingFloor { get; } = new(
         "loading-scatter-at-floor", Severity.Note,
-        "Replicate loadings differ by little more than their fits' own errors; the loading part is held at a tenth of the replicate variance.",
+        "In some pattern across the measurands replicate loadings differ by no more than their fits' own errors; that pattern's part is held at a tenth of the replicate variance, so that it is not taken for nothing.",
         "Few replicates, or loadings that repeat very well.",
         "Nothing, or load more samples twice.",
         "Simulated with the budget, this project");
@@ -39,6 +39,13 @@ public static class PoolingFindings
         "Blood does not follow the law over these shear rates, or the declared error of readings is far too small.",
         "Decide by a law that the evidence allows; compare the fitted values with those interpolated from the readings.",
         "Pooled chi-square and mean residual pattern over the study");
+
+    /// <summary>No curve could be used to judge a law.</summary>
+    public static FindingKind LawNotJudged { get; } = new(
+        "law-not-judged", Severity.Fault,
+        "No curve without a fault could be used to judge this law, so nothing is decided by it.",
+        "Exports or the samples table could not be read, or every loading has a fault.",
+        "Mend what the other findings name, then run again.");
 
     /// <summary>Residuals are larger than declared, without a pattern.</summary>
     public static FindingKind ScatterLargerThanDeclared { get; } = new(

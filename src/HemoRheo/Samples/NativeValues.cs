@@ -67,7 +67,7 @@ internal static class NativeValues
         if (!anySound) yield return SampleFindings.LoadingFaulty.At(where, "No loading is free of faults; the value is shown and not decided on.");
         if (!inside) yield return SampleFindings.Extrapolated.At(where, $"{measurand.Name} lies outside the kept shear rates.", (measurand as ViscosityAtRate)?.Rate.ReciprocalSeconds);
         if (measurand is ViscosityAtRate && set.Law.Name != study.Analysis.DecideBy) yield return SampleFindings.ShownBeside.At(where, $"The study decides by {study.Analysis.DecideBy}.");
-        if (!evidence.Fits) yield return PoolingFindings.LawDoesNotFit.At(where, evidence.Words);
+        if (evidence.Unfit is { } unfit) yield return unfit.At(where, evidence.Words);
         if (set.Scatter.Columns.Count == 0) yield return PoolingFindings.LoadingUnknown.At(where, "The scatter between loadings is not known.");
         if (measurand == Measurand.CassonYieldStress)
         {

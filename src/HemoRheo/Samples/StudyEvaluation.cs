@@ -72,7 +72,7 @@ public static class StudyEvaluation
         foreach (var finding in sets.SelectMany(set => set.Scatter.Findings)) yield return finding;
         foreach (var law in evidence.Where(law => law.Law == study.Analysis.DecideBy))
         {
-            if (!law.Fits) yield return PoolingFindings.LawDoesNotFit.At(Where.Nowhere, law.Words, law.PatternProbability);
+            if (law.Unfit is { } unfit) yield return unfit.At(Where.Nowhere, law.Words, law.PatternProbability);
             else if (law.Probability < 1e-3) yield return PoolingFindings.ScatterLargerThanDeclared.At(Where.Nowhere, law.Words, law.ChiSquare / law.DegreesOfFreedom, 1);
         }
     }
