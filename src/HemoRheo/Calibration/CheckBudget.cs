@@ -10,7 +10,7 @@ internal static class CheckBudget
 {
     internal static IEnumerable<Contribution> Of(Instrument instrument, Recording recording, CalibrationFluid fluid, Temperature temperature, FittedLaw fit)
     {
-        yield return new(new(SourceKind.Certificate, fluid.Lot), -fluid.RelativeExpandedUncertainty / fluid.CoverageFactor);
+        yield return new(new(SourceKind.Certificate, $"{fluid.Name}, {fluid.Lot}"), -fluid.RelativeExpandedUncertainty / fluid.CoverageFactor);
         if (!fluid.IsWater)
         {
             yield return new(new(SourceKind.FluidBeta, fluid.Name), (temperature.DegreesCelsius - fluid.At.DegreesCelsius) * fluid.PerKelvinUncertainty);
@@ -19,7 +19,7 @@ internal static class CheckBudget
         yield return new(new(SourceKind.Thermometer, instrument.Name), fluid.PerKelvinAt(temperature) * instrument.Thermometer);
         if (fit.Curve.StressPerTorque is { } stressPerTorque && instrument.TorqueZero > 0)
         {
-            yield return new(new(SourceKind.TorqueZero, DayOf(instrument, recording.Day)), fit.StressResponse[0] * stressPerTorque * instrument.TorqueZero);
+            yield return new(new(SourceKind.TorqueZero, InstrumentDay.Key(instrument.Name, recording.Day)), fit.StressResponse[0] * stressPerTorque * instrument.TorqueZero);
         }
 
         var filling = Invariant($"{recording.Sample}/{recording.Loading}");
@@ -28,7 +28,4 @@ internal static class CheckBudget
             ? new(new(SourceKind.Fit, filling + "/0"), size)
             : new(new(SourceKind.Fit, filling + "/0"), size, "fit of " + filling, fit.Fit.DegreesOfFreedom);
     }
-
-    /// <summary>An instrument's day as sources name it.</summary>
-    internal static string DayOf(Instrument instrument, DateOnly day) => Invariant($"{instrument.Name}/{day:yyyy-MM-dd}");
 }

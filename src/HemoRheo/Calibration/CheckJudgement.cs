@@ -21,7 +21,7 @@ internal static class CheckJudgement
     /// <summary>The check judged again with the scatter of checks beyond their fits in its budget, and the finding of its outcome.</summary>
     internal static InstrumentCheck Settled(this InstrumentCheck check, Instrument instrument, CheckScatter? scatter, double level)
     {
-        var error = scatter is null ? check.Error : check.Error.With(scatter.OfCheck(CheckBudget.DayOf(instrument, check.Day)));
+        var error = scatter is null ? check.Error : check.Error.With(scatter.OfCheck(InstrumentDay.Key(instrument.Name, check.Day)));
         var settled = (check with { Error = error }).Judged(level);
         return settled with { Findings = settled.Findings.With(settled.OutcomeFindings()) };
     }

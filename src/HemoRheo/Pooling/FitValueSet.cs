@@ -11,6 +11,12 @@ internal sealed class FitValueSet(Vector<double> x, Matrix<double> columns)
 
     public Matrix<double> Columns => columns;
 
+    /// <summary>Whether the fit tells every one of them to better than a factor: standard uncertainty of the logarithm at most a half.</summary>
+    public bool Identified => Enumerable.Range(0, columns.RowCount).All(row => columns.Row(row).L2Norm() <= FarthestUncertainty);
+
+    /// <summary>The largest standard uncertainty of a logarithm at which a value still says something of its size.</summary>
+    internal const double FarthestUncertainty = 0.5;
+
     /// <summary>The same with a number added to every measurand.</summary>
     public FitValueSet ShiftedBy(double amount) => new(x + amount, columns);
 

@@ -10,6 +10,7 @@ namespace HemoRheo;
 internal static class LoadingPool
 {
     private const double Floor = 0.1;
+    private const int FewReplicates = 3;
 
     // A relative scatter below 1e-9 is rounding: recordings that were entered twice, not blood that was loaded twice.
     private const double NoVariance = 1e-18;
@@ -45,10 +46,11 @@ internal static class LoadingPool
         }
 
         var columns = Columns(scatter / df, fits / df, df, out var atFloor);
-        Items<Finding> findings = atFloor
-            ? [PoolingFindings.LoadingFloor.At(Where.Nowhere, $"{law}, {measurands[0].Name}{(size > 1 ? " and others" : "")}: the loading part is held at its floor; it was pooled from {df} degrees of freedom.")]
-            : [];
-        return new(law, measurands, columns.ToItems(), df, findings);
+        var name = $"{law}, {measurands[0].Name}{(size > 1 ? " and others" : "")}";
+        var findings = new List<Finding>();
+        if (atFloor > 0) findings.Add(PoolingFindings.LoadingFloor.At(Where.Nowhere, $"{name}: {atFloor} of {columns.Count} patterns across the measurands are held at the floor; pooled from {df} degrees of freedom."));
+        if (df < FewReplicates) findings.Add(PoolingFindings.LoadingFew.At(Where.Nowhere, $"{name}: the scatter between loadings rests on {df} degrees of freedom, so intervals are very wide.", df, FewReplicates));
+        return new(law, measurands, columns.ToItems(), df, findings.ToItems());
     }
 
     private static List<ScatterColumn> Columns(Matrix<double> scatter, Matrix<double> fits, int df, out int atFloor)

@@ -17,6 +17,21 @@ public static class PoolingFindings
         "Every sample was measured once.",
         "Load some samples twice, or declare the scatter in the study file with its basis.");
 
+    /// <summary>Replicate loadings that do not tell a measurand take no part in its scatter.</summary>
+    public static FindingKind LoadingsNotIdentified { get; } = new(
+        "loadings-not-identified", Severity.Note,
+        "Replicate loadings whose readings do not tell a measurand take no part in its scatter between loadings.",
+        "Blood without a yield stress that these shear rates could show.",
+        "Look at the value's own finding; measure to lower rates.");
+
+    /// <summary>The loading scatter rests on very few replicates.</summary>
+    public static FindingKind LoadingFew { get; } = new(
+        "loading-replicates-few", Severity.Warning,
+        "The scatter between loadings is pooled from fewer than three degrees of freedom; intervals are honest and very wide.",
+        "One or two samples were loaded twice.",
+        "Load a tenth of the samples twice, at least ten of them.",
+        "Simulated with the budget, this project");
+
     /// <summary>The estimate of loading scatter is held at its floor.</summary>
     public static FindingKind LoadingFloor { get; } = new(
         "loading-scatter-at-floor", Severity.Note,

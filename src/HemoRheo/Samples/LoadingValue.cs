@@ -12,7 +12,7 @@ internal static class LoadingValue
     {
         var terms = new List<(double, Value)> { (1, value.ToValue(fit)), (1, Shift(study, loading)) };
         var response = value.StressResponse(fit) * (loading.Curve.StressPerTorque ?? 0) * TorqueZero(study, loading.Recording.Instrument);
-        if (response != 0) terms.Add((1, new(0, [new(new(SourceKind.TorqueZero, InstrumentDay(loading.Recording)), response)])));
+        if (response != 0) terms.Add((1, new(0, [new(new(SourceKind.TorqueZero, InstrumentDay.Key(loading.Recording.Instrument, loading.Recording.Day)), response)])));
         return Value.Combine(terms);
     }
 
@@ -22,7 +22,7 @@ internal static class LoadingValue
         var recording = loading.Recording;
         var temperature = loading.Curve.MeanTemperature;
         return Value.Combine([
-            (1, Corrected(study, loading.Standing, InstrumentDay(recording))),
+            (1, Corrected(study, loading.Standing, InstrumentDay.Key(recording.Instrument, recording.Day))),
             (1, temperature is { } read ? ToBody(read, study.Blood.PerKelvin, Thermometer(study, recording.Instrument), recording.Instrument) : Value.Exact(0)),
             (1, temperature is { } at ? BloodCoefficient(study, at) : Value.Exact(0))]);
     }
@@ -45,8 +45,6 @@ internal static class LoadingValue
         0,
         [new(new(SourceKind.BloodBeta, ""), (read.DegreesCelsius - Temperature.Body.DegreesCelsius) * study.Blood.PerKelvinUncertainty)]);
 
-    private static string InstrumentDay(Recording recording) =>
-        string.Create(System.Globalization.CultureInfo.InvariantCulture, $"{recording.Instrument}/{recording.Day:yyyy-MM-dd}");
 
     private static double Thermometer(Study study, string instrument) => study.Instruments.FirstOrDefault(known => known.Name == instrument)?.Thermometer ?? 0;
 

@@ -24,7 +24,9 @@ internal static class NativeValues
             var inside = measurand is ViscosityAtRate viscosity ? chosen.Where(item => item.Loading.Curve.Covers(viscosity.Rate)).ToArray() : chosen;
             var used = inside.Length > 0 ? inside : chosen;
             var value = Combined(study, sample, set, i, used);
-            var findings = Findings(study, sample, set, measurand, evidence, used, sound.Length > 0, inside.Length > 0).Concat(AtBound(sample, measurand, value)).ToItems();
+            var findings = Findings(study, sample, set, measurand, evidence, used, sound.Length > 0, inside.Length > 0)
+                .Concat(LeftOut(sample, measurand, loadings, used))
+                .Concat(AtBound(sample, measurand, value)).ToItems();
             yield return new(
                 measurand, set.Law.Name, HematocritBasis.Native,
                 value,
@@ -33,6 +35,10 @@ internal static class NativeValues
                 findings);
         }
     }
+
+    private static IEnumerable<Finding> LeftOut(string sample, Measurand measurand, IEnumerable<LoadingResult> loadings, IReadOnlyList<(LoadingResult Loading, FittedLaw Fit)> used) => loadings
+        .Where(loading => used.All(item => !ReferenceEquals(item.Loading, loading)))
+        .Select(loading => SampleFindings.LoadingLeftOut.At(new(Sample: sample, Loading: loading.Recording.Loading), $"Loading {loading.Recording.Loading} takes no part in {measurand.Name}."));
 
     private static IEnumerable<Finding> AtBound(string sample, Measurand measurand, Value value) => double.IsFinite(value.X)
         ? []
@@ -80,6 +86,12 @@ internal static class NativeValues
             var place = where with { Loading = loading.Recording.Loading };
             if (loading.Standing.Period is null) yield return SampleFindings.NotCalibrated.At(place, SampleFindings.WhyNotCalibrated(loading.Standing));
             if (loading.Curve.MeanTemperature is null) yield return SampleFindings.NoTemperature.At(place, "No kept reading carries a temperature.");
+            var uncertainty = Math.Sqrt(measurand.From(fit)!.Columns(fit).Sum(column => column * column));
+            if (uncertainty > FitValueSet.FarthestUncertainty)
+            {
+                yield return SampleFindings.NotIdentified.At(place, string.Create(System.Globalization.CultureInfo.InvariantCulture, $"{measurand.Name}: the fit knows it to a factor of {Math.Exp(uncertainty):G3}."), uncertainty, FitValueSet.FarthestUncertainty);
+            }
+
             if (fit.Fit.Probability is < CurveContradicts and var p)
             {
                 yield return SampleFindings.CurveDoesNotFit.At(place, string.Create(System.Globalization.CultureInfo.InvariantCulture, $"{set.Law.Name}: chi-square {fit.Fit.ChiSquare:F1} on {fit.Fit.DegreesOfFreedom} degrees of freedom, p = {p:G2}."), p, CurveContradicts);

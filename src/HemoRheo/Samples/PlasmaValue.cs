@@ -1,5 +1,3 @@
-using static System.FormattableString;
-
 namespace HemoRheo;
 
 /// <summary>Log plasma viscosity of a sample at 37 degC, with its budget and what vouches for it.</summary>
@@ -19,7 +17,7 @@ internal sealed record PlasmaValue(Value Value, InstrumentStanding? Standing)
         if (record.PlasmaInstrument is { } name && histories.TryGetValue(name, out var history))
         {
             var at = record.PlasmaMeasuredAt ?? bloodAt;
-            var day = Invariant($"{name}/{DateOnly.FromDateTime(at.DateTime):yyyy-MM-dd}");
+            var day = InstrumentDay.Key(name, DateOnly.FromDateTime(at.DateTime));
             var standing = history.At(at);
             return new(
                 Value.Combine([

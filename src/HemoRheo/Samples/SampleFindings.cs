@@ -39,6 +39,21 @@ public static class SampleFindings
         "Blood without a measurable yield stress, or no readings at low shear rates.",
         "Report that none was found, with the lowest kept shear rate.");
 
+    /// <summary>The readings do not tell the value.</summary>
+    public static FindingKind NotIdentified { get; } = new(
+        "not-identified", Severity.Fault,
+        "These shear rates do not tell this value: the fit knows it no better than to a factor.",
+        "Blood with almost no yield stress, or lowest rates that are too high.",
+        "Report that it could not be told; measure to lower rates.",
+        "This project: a standard uncertainty of the logarithm above a half");
+
+    /// <summary>A loading takes no part in a value.</summary>
+    public static FindingKind LoadingLeftOut { get; } = new(
+        "loading-left-out", Severity.Note,
+        "A loading takes no part in this value, since another one is free of faults or reaches the rate.",
+        "A fault of that loading, or a curve that does not reach the rate.",
+        "Look at the findings of that loading.");
+
     /// <summary>No usable fit.</summary>
     public static FindingKind NoUsableFit { get; } = new(
         "no-usable-fit", Severity.Fault,

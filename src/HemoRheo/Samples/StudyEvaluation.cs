@@ -58,12 +58,14 @@ public static class StudyEvaluation
 
     private static LoadingScatter Scatter(Study study, FlowLaw law, Items<Measurand> measurands, IEnumerable<Items<LoadingResult>> samples)
     {
-        var replicates = samples
+        var all = samples
             .Select(loadings => loadings.Where(loading => NativeValues.Sound(loading, FitOf(loading, law)))
-                .Select(loading => (Set: FitValueSet.Of(FitOf(loading, law), measurands), Shift: LoadingValue.Shift(study, loading).X))
-                .Where(item => item.Set is not null).Select(item => item.Set!.ShiftedBy(item.Shift)).ToArray())
+                .Select(loading => FitValueSet.Of(FitOf(loading, law), measurands)?.ShiftedBy(LoadingValue.Shift(study, loading).X)).ToArray())
             .Where(sets => sets.Length > 1).ToArray();
-        return LoadingPool.Pool(law.Name, measurands, replicates, study.Errors.DeclaredLoading);
+        var replicates = all.Select(sets => sets.OfType<FitValueSet>().Where(set => set.Identified).ToArray()).ToArray();
+        var left = all.Sum(sets => sets.Length) - replicates.Sum(sets => sets.Length);
+        var scatter = LoadingPool.Pool(law.Name, measurands, [.. replicates.Where(sets => sets.Length > 1)], study.Errors.DeclaredLoading);
+        return left == 0 ? scatter : scatter with { Findings = scatter.Findings.With([PoolingFindings.LoadingsNotIdentified.At(Where.Nowhere, $"{law.Name}, {measurands[0].Name}: {left} replicate loadings do not tell it and take no part in the scatter between loadings.", left)]) };
     }
 
     private static IEnumerable<Finding> PoolFindings(Study study, IEnumerable<MeasurandSet> sets, IEnumerable<LawEvidence> evidence, IEnumerable<HematocritSlope> slopes)

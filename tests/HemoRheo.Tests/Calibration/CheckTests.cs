@@ -12,7 +12,7 @@ public class CheckTests
     {
         var check = Assert.Single(History(Declared, Check(0, 1)).Checks);
         Assert.Equal(Math.Log(1.01), check.Error.X, 1e-10);
-        Assert.Equal(-0.002, Part(check, SourceKind.Certificate, "lot 7").Amount, 1e-12);
+        Assert.Equal(-0.002, Part(check, SourceKind.Certificate, "oil, lot 7").Amount, 1e-12);
         Assert.Equal(0.0036, Part(check, SourceKind.FluidBeta, "oil").Amount, 1e-12);
         Assert.Equal(0.0022, Part(check, SourceKind.Thermometer, "R1").Amount, 1e-12);
         var (fit, day) = (Part(check, SourceKind.Fit, "C0/1/0").Amount, Part(check, SourceKind.Day, "R1/2026-03-02"));
@@ -69,7 +69,7 @@ public class CheckTests
         // IAPWS SR6-08 at 293.15 K: 1001.567264603 uPa.s, coefficient 0.0244965941136 1/K (tests/ReferenceData/water).
         var check = Assert.Single(History(TestStudy.Check("W", TestStudy.Start, 1.001567264603e-3, 20, fluid: "water")).Checks);
         Assert.Equal(0, check.Error.X, 1e-9);
-        Assert.Equal(-0.005, Part(check, SourceKind.Certificate, "IAPWS SR6-08").Amount, 1e-12);
+        Assert.Equal(-0.005, Part(check, SourceKind.Certificate, "water, IAPWS SR6-08").Amount, 1e-12);
         Assert.Equal(0.00244965941136, Part(check, SourceKind.Thermometer, "R1").Amount, 1e-9);
         Assert.DoesNotContain(check.Error.Parts, part => part.Source.Kind == SourceKind.FluidBeta);
     }

@@ -73,8 +73,8 @@ public class PeriodTests
         var history = History(Check(0, 0.4), TestStudy.Check("W", TestStudy.Start.AddDays(1), 1.001567264603e-3 * 1.002, 20, fluid: "water"));
         var correction = Assert.Single(history.Periods).Correction;
         Assert.Equal((Math.Log(1.004) + Math.Log(1.002)) / 2, correction.X, 1e-9);
-        Assert.Equal(-0.001, Amount(correction, SourceKind.Certificate, "lot 7"), 1e-12);
-        Assert.Equal(-0.0025, Amount(correction, SourceKind.Certificate, "IAPWS SR6-08"), 1e-12);
+        Assert.Equal(-0.001, Amount(correction, SourceKind.Certificate, "oil, lot 7"), 1e-12);
+        Assert.Equal(-0.0025, Amount(correction, SourceKind.Certificate, "water, IAPWS SR6-08"), 1e-12);
         Assert.Equal(0.0018, Amount(correction, SourceKind.FluidBeta, "oil"), 1e-12);
         Assert.Equal((0.0022 + 0.00244965941136) / 2, Amount(correction, SourceKind.Thermometer, "R1"), 1e-9);
     }

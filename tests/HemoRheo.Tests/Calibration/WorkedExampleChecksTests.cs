@@ -33,7 +33,7 @@ public class WorkedExampleChecksTests
         {
             Assert.Equal(row.Number("c_day"), period.Scatter, 1e-7);
             Assert.Equal(-row.Number("c_calibration"), Part(SourceKind.Calibration, "R1/1").Amount, 1e-7);
-            Assert.Equal(-row.Number("c_certificate"), Part(SourceKind.Certificate, "lot 7").Amount, 1e-7);
+            Assert.Equal(-row.Number("c_certificate"), Part(SourceKind.Certificate, "oil, lot 7").Amount, 1e-7);
             Assert.Equal(-row.Number("c_fluid_beta"), Part(SourceKind.FluidBeta, "oil").Amount, 1e-7);
             Assert.Equal(row.Number("c_thermometer"), (0.026 * 0.1) - Part(SourceKind.Thermometer, "R1").Amount, 1e-7);
         });

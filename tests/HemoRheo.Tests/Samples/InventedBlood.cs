@@ -14,6 +14,8 @@ internal static class InventedBlood
     internal static Recording Quemada(string sample, int loading, double hematocrit, double factor = 1) =>
         Of(sample, loading, rate => FlowLaw.Quemada.Stress(rate.PerSecond(), 0.0031 * Math.Exp(2 * (hematocrit - 0.43)), 2.5, 0.2).Pascals, factor, 0, 37.1, null);
 
+    internal static Recording Newtonian(string sample, int loading, double factor = 1) => Of(sample, loading, rate => 0.003 * rate, factor, 0, 37.1, null);
+
     private static Recording Of(string sample, int loading, Func<double, double> stress, double factor, double added, double celsius, DateTimeOffset? at) => TestStudy.Blood(
         sample,
         TestStudy.Rates.Select((rate, i) => TestStudy.Reading(i + 1, rate, stress(rate) * factor * (1 + Pattern[(i + 5 * loading + 7 * sample[^1] + 4 * sample[^2]) % Pattern.Length] * (sample[^1] % 2 == loading % 2 ? 1 : -1)) + added, celsius)),

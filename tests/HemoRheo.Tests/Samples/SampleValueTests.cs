@@ -65,6 +65,7 @@ public sealed class SampleValueTests
         var whole = Native(Study, [InventedBlood.Casson("S-1", 1, 0.41), .. others]);
         Assert.Equal(whole.Value.X, beside.Value.X);
         Assert.True(beside.Decidable);
+        Assert.Contains(beside.Findings, finding => finding.Code == "loading-left-out" && finding.Where.Loading == 2);
 
         var alone = Native(Study, [cut, .. others]);
         Assert.False(alone.Decidable);
@@ -199,6 +200,21 @@ public sealed class SampleValueTests
         Assert.Equal(InstrumentStatus.InDoubt, judged.Result.PlasmaStatus);
         Assert.All(judged.Values, value => Assert.Equal(value.Value.Basis == HematocritBasis.StandardByPlasma || value.Value.Measurand is RelativeViscosityAtRate, value.Marked));
         Assert.Contains(judged.Result.Findings, finding => finding.Code == "instrument-check-overdue");
+    }
+
+    [Fact]
+    public void A_yield_stress_that_the_rates_do_not_tell_is_not_decided_on_and_spoils_no_pool()
+    {
+        var study = Study with { Analysis = Study.Analysis with { Laws = ["Casson"] } };
+        Recording[] told = [.. Pair(), InventedBlood.Casson("S-2", 1, 0.44), InventedBlood.Casson("S-2", 2, 0.44, 1.02)];
+        Recording[] thin = [InventedBlood.Newtonian("S-3", 1), InventedBlood.Newtonian("S-3", 2, 1.02)];
+        LoadingScatter YieldStressPool(IEnumerable<Recording> blood) =>
+            Evaluate(TestStudy.Readings(study, InventedBlood.Checks(), blood, [InventedBlood.Record("S-1", 0.41), InventedBlood.Record("S-2", 0.44), InventedBlood.Record("S-3", 0.30)])).Pool.Scatter.Single(scatter => scatter.Measurands[0] == Measurand.CassonYieldStress);
+        var pool = YieldStressPool([.. told, .. thin]);
+        Assert.Equal(YieldStressPool(told).Columns, pool.Columns);
+        Assert.Contains(pool.Findings, finding => finding.Code == "loadings-not-identified");
+        var value = Evaluate(TestStudy.Readings(study, InventedBlood.Checks(), [.. told, .. thin], [InventedBlood.Record("S-3", 0.30)])).Samples[2].Find("Casson", Measurand.CassonYieldStress, HematocritBasis.Native);
+        Assert.False(value?.Decidable ?? false);
     }
 
     [Fact]
