@@ -9,5 +9,6 @@ namespace HemoRheo;
 /// <param name="Plain">The plain regression slope, which hematocrit's error makes too flat; 0 where hematocrit does not vary within groups.</param>
 /// <param name="People">People it rests on.</param>
 /// <param name="WhyNot">Why it cannot be used; null where it can.</param>
+/// <param name="Hematocrits">Lowest and highest hematocrit it rests on, L/L; a value outside them is not decided on. Null where it cannot be used.</param>
 /// <remarks>Source: Fuller 1987, Measurement Error Models (known error variance).</remarks>
-public sealed record HematocritSlope(string Law, Measurand Measurand, double Slope, double StandardUncertainty, double DegreesOfFreedom, double Plain, int People, string? WhyNot);
+public sealed record HematocritSlope(string Law, Measurand Measurand, double Slope, double StandardUncertainty, double DegreesOfFreedom, double Plain, int People, string? WhyNot, Interval? Hematocrits = null);

@@ -24,7 +24,7 @@ internal static class SlopePool
         var aware = ErrorAwareSlope.Of(groups, people.Average(person => person.ErrorVariance));
         var plain = ErrorAwareSlope.Of(groups, 0) is { TrueScatter: > NoVariance } known ? known.Slope : 0;
         return aware.Usable
-            ? new(law, measurand, aware.Slope, Math.Sqrt(aware.Variance), aware.DegreesOfFreedom, plain, people.Length, null)
+            ? new(law, measurand, aware.Slope, Math.Sqrt(aware.Variance), aware.DegreesOfFreedom, plain, people.Length, null, new(visits.Min(visit => visit.Hematocrit), visits.Max(visit => visit.Hematocrit)))
             : new(law, measurand, 0, 0, 0, plain, people.Length, ErrorAwareSlope.TooCoarse);
     }
 }

@@ -118,6 +118,13 @@ public static class SampleFindings
         "Report the native value.",
         "Matrai, Whittington and Ernst 1987; range: common practice");
 
+    /// <summary>The hematocrit lies outside those the study's slope rests on.</summary>
+    public static FindingKind OutsideSlope { get; } = new(
+        "outside-slope", Severity.Fault,
+        "The hematocrit lies outside those that the study's slope rests on.",
+        "A sample measured while the instrument was not in order, or left out of the slope for another reason.",
+        "Report the native value, or use the plasma power rule.");
+
     /// <summary>The study's slope cannot be used.</summary>
     public static FindingKind NoSlope { get; } = new(
         "no-slope", Severity.Note,

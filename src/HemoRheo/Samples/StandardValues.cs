@@ -42,10 +42,16 @@ internal static class StandardValues
             native.Interpolated * k + (1 - k) * plasma.Value.X);
     }
 
-    private static SampleValue BySlope(Study study, string sample, Hematocrit hematocrit, Counter counter, SampleValue native, HematocritSlope slope) => Standardised(
-        study, sample, native, HematocritBasis.StandardBySlope, StandardisingRule.StudySlope, [],
-        StandardHematocritRule.BySlope(native.Value, slope, sample, hematocrit, study.Standard.Hematocrit, counter),
-        native.Interpolated + slope.Slope * (study.Standard.Hematocrit.LiterPerLiter - hematocrit.LiterPerLiter));
+    private static SampleValue BySlope(Study study, string sample, Hematocrit hematocrit, Counter counter, SampleValue native, HematocritSlope slope)
+    {
+        IEnumerable<Finding> outside = slope.Hematocrits is { } range && !range.Contains(hematocrit.LiterPerLiter)
+            ? [SampleFindings.OutsideSlope.At(new(Sample: sample), FormattableString.Invariant($"Hematocrit {hematocrit}; the slope rests on {range.Lower:G3} to {range.Upper:G3} L/L."), hematocrit.LiterPerLiter, hematocrit.LiterPerLiter < range.Lower ? range.Lower : range.Upper)]
+            : [];
+        return Standardised(
+            study, sample, native, HematocritBasis.StandardBySlope, StandardisingRule.StudySlope, outside,
+            StandardHematocritRule.BySlope(native.Value, slope, sample, hematocrit, study.Standard.Hematocrit, counter),
+            native.Interpolated + slope.Slope * (study.Standard.Hematocrit.LiterPerLiter - hematocrit.LiterPerLiter));
+    }
 
     private static SampleValue Standardised(Study study, string sample, SampleValue native, HematocritBasis basis, StandardisingRule rule, IEnumerable<Finding> more, Value value, double? interpolated)
     {

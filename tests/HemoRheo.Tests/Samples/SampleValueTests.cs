@@ -218,6 +218,22 @@ public sealed class SampleValueTests
     }
 
     [Fact]
+    public void A_hematocrit_outside_those_of_the_slope_is_not_decided_on()
+    {
+        var study = Study with { Standard = Study.Standard with { DecideBy = StandardisingRule.StudySlope } };
+        var names = Enumerable.Range(1, 30).Select(i => $"S-{i:00}").ToArray();
+        double Hematocrit(int i) => i == 0 ? 0.58 : 0.36 + 0.005 * i;
+        var early = InventedBlood.CheckTime.AddDays(-1);
+        var blood = names.SelectMany((name, i) => new[] { InventedBlood.Casson(name, 1, Hematocrit(i), at: i == 0 ? early : null), InventedBlood.Casson(name, 2, Hematocrit(i), 1.01, at: i == 0 ? early : null) });
+        var analyzed = Evaluate(TestStudy.Readings(study, InventedBlood.Checks(), blood, names.Select((name, i) => InventedBlood.Record(name, Hematocrit(i)))));
+        var outside = analyzed.Samples[0].Find("Casson", At10, HematocritBasis.StandardBySlope)!;
+        Assert.Contains(outside.Findings, finding => finding.Code == "outside-slope");
+        var inside = analyzed.Samples[15].Find("Casson", At10, HematocritBasis.StandardBySlope)!;
+        Assert.True(inside.Decidable, string.Join("; ", inside.Findings));
+        Assert.NotNull(inside.Value.Part(SourceKind.Slope));
+    }
+
+    [Fact]
     public void The_order_of_recordings_changes_no_bit_of_any_value()
     {
         Recording[] blood = [.. Pair(), InventedBlood.Casson("S-2", 1, 0.44), InventedBlood.Casson("S-2", 2, 0.44, 0.99), InventedBlood.Casson("S-3", 1, 0.47)];

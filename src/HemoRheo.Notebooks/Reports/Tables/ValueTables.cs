@@ -36,7 +36,7 @@ internal static class ValueTables
             StudyTable.Number(value.Shown), value.Measurand.Shown.Symbol, value.Measurand.Shown.Ucum, StudyTable.Number(Figures.Uncertainty(value.Measurand, value.Value)), StudyTable.Number(value.Value.DegreesOfFreedom),
             StudyTable.Number(interval.Lower), StudyTable.Number(interval.Upper), StudyTable.Number(value.Value.X), StudyTable.Number(value.Value.StandardUncertainty),
             .. Kinds.Select(kind => StudyTable.Number(value.Value.Part(kind))),
-            StudyTable.Number(value.Interpolated is { } working ? value.Measurand.ToShown(working) : null), value.Decidable, value.Decidable ? "" : string.Join(" ", WhyNot.Codes(value)), Words.Of(sample.Result.Status),
+            StudyTable.Number(value.Interpolated is { } working ? value.Measurand.ToShown(working) : null), value.Decidable, value.Decidable ? "" : string.Join(" ", WhyNot.Codes(value)), Words.Of(sample.Result.StatusOf(value)),
             judged.Verdict is { } verdict ? Words.Of(verdict.Outcome) : "", StudyTable.Number(judged.Verdict?.Below), StudyTable.Number(judged.Verdict?.Within), StudyTable.Number(judged.Verdict?.Above),
             judged.WhyNotJudged, judged.Marked, judged.ChangesWithLimits, StudyTable.Number(limits?.Lower), StudyTable.Number(limits?.Upper),
         ];
