@@ -5,6 +5,7 @@ return args switch
 {
     ["coverage", var studies] => Coverage(int.Parse(studies, System.Globalization.CultureInfo.InvariantCulture)),
     ["speed"] => Speed(),
+    ["nist", "--folder", var folder] => Nist(folder),
     _ => Usage(),
 };
 
@@ -21,9 +22,16 @@ static int Speed()
     return 0;
 }
 
+static int Nist(string folder)
+{
+    foreach (var line in CertifiedRun.Run(folder)) Console.WriteLine(line);
+    return 0;
+}
+
 static int Usage()
 {
     Console.WriteLine("coverage N   coverage of 95 % intervals over N simulated studies, written, read and analyzed through the public API");
     Console.WriteLine("speed        fits a second on one thread");
+    Console.WriteLine("nist --folder DIR   the 27 certified nonlinear problems from both starts; DIR holds their .dat files");
     return 2;
 }

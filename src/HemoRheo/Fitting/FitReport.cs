@@ -8,6 +8,9 @@ internal static class FitReport
 {
     private const double LackOfFitLevel = 0.001;
 
+    /// <summary>Largest standard error on the fitting scale: a factor of 22,000 either way for a positive parameter. One that may end at its bound is not asked.</summary>
+    private const double LargestScaledError = 10;
+
     /// <summary>A curve that could not be fitted at all.</summary>
     public static FittedLaw Unfitted(FlowLaw law, FlowCurve curve, ErrorModel errors, Finding fault) =>
         new(law, curve, errors, new(StopReason.BadData, 0, fault.Message), [], [], [], [], [], new(0, 0, null), [fault]);
@@ -45,6 +48,12 @@ internal static class FitReport
         }
 
         var covariance = Covariance(errors, solution, degrees);
+        if (Loose(law, covariance) is { } loose)
+        {
+            var error = Math.Sqrt(covariance[loose * solution.Scaled.Length + loose]);
+            findings.Add(FittingFindings.NotIdentifiable.At(where, LooseWords(law, loose, error), error, LargestScaledError));
+        }
+
         return new(
             law,
             curve,
@@ -58,6 +67,22 @@ internal static class FitReport
             fit,
             findings.ToItems());
     }
+
+    /// <summary>A parameter of which the curve says nothing.</summary>
+    private static int? Loose(FlowLaw law, double[] covariance)
+    {
+        var size = law.Parameters.Count;
+        for (var k = 0; k * size < covariance.Length; k++)
+        {
+            if (k != law.Boundary?.Parameter && !(Math.Sqrt(covariance[k * size + k]) <= LargestScaledError)) return k;
+        }
+
+        return null;
+    }
+
+    private static string LooseWords(FlowLaw law, int loose, double error) => string.Create(
+        CultureInfo.InvariantCulture,
+        $"{law.Name}: the curve says nothing of {law.Parameters[loose].Name}, whose standard error on the fitting scale is {error:G2}, more than {LargestScaledError}.");
 
     private static string BoundaryWords(FlowLaw law, int held) => string.Create(
         CultureInfo.InvariantCulture,

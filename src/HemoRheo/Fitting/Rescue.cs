@@ -13,7 +13,8 @@ internal static class Rescue
         }
 
         var first = General(law, curve, start, errors);
-        if (Settled(first)) return IsBeyondWall(law, curve, first) ? AtBoundary(law, curve, first.Scaled, errors) : first;
+        if (IsBeyondWall(law, curve, first) && AtBoundary(law, curve, first.Scaled, errors) is var bound && Settled(bound)) return bound;
+        if (Settled(first)) return first;
         CurveSolution? best = null;
         foreach (var other in OtherStarts(start))
         {

@@ -10,14 +10,32 @@ public abstract record FlowLaw(string Name, Citation Source, Items<LawParameter>
     /// <summary>Constant viscosity.</summary>
     public static FlowLaw<Newtonian> Newtonian => HemoRheo.Newtonian.Law;
 
+    /// <summary>The Ostwald-de Waele power law: a consistency and a flow index.</summary>
+    public static FlowLaw<PowerLaw> PowerLaw => HemoRheo.PowerLaw.Law;
+
+    /// <summary>Bingham's law: a yield stress and a plastic viscosity.</summary>
+    public static FlowLaw<Bingham> Bingham => HemoRheo.Bingham.Law;
+
     /// <summary>Casson's law: a yield stress and a Casson viscosity.</summary>
     public static FlowLaw<Casson> Casson => HemoRheo.Casson.Law;
+
+    /// <summary>The law of Herschel and Bulkley: a yield stress, a consistency and a flow index.</summary>
+    public static FlowLaw<HerschelBulkley> HerschelBulkley => HemoRheo.HerschelBulkley.Law;
 
     /// <summary>Quemada's law in its three identifiable numbers.</summary>
     public static FlowLaw<Quemada> Quemada => HemoRheo.Quemada.Law;
 
+    /// <summary>Carreau's law: two viscosities, a time constant and a flow index.</summary>
+    public static FlowLaw<Carreau> Carreau => HemoRheo.Carreau.Law;
+
+    /// <summary>Cross's law: two viscosities, a time constant and an exponent.</summary>
+    public static FlowLaw<Cross> Cross => HemoRheo.Cross.Law;
+
+    /// <summary>The law of Carreau and Yasuda: Carreau's with the sharpness of its transition.</summary>
+    public static FlowLaw<CarreauYasuda> CarreauYasuda => HemoRheo.CarreauYasuda.Law;
+
     /// <summary>Every built-in law, from few parameters to many.</summary>
-    public static Items<FlowLaw> All => [Newtonian, Casson, Quemada];
+    public static Items<FlowLaw> All => [Newtonian, PowerLaw, Bingham, Casson, HerschelBulkley, Quemada, Carreau, Cross, CarreauYasuda];
 
     /// <summary>A limiting case of this law that a fit may end in; null where there is none.</summary>
     internal abstract LawBoundary? Boundary { get; }

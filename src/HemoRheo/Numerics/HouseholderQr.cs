@@ -7,6 +7,8 @@ namespace HemoRheo;
 internal sealed class HouseholderQr(int rows, int columns)
 {
     private readonly double[] _scale = new double[columns];
+    private readonly double[] _heads = new double[columns];
+    private readonly double[] _factors = new double[columns];
 
     /// <summary>The matrix, column by column; after <see cref="Factor"/> its upper triangle, columns scaled to length one, on and above the diagonal.</summary>
     public double[] Matrix { get; } = new double[rows * columns];
@@ -14,9 +16,8 @@ internal sealed class HouseholderQr(int rows, int columns)
     /// <summary>Smallest diagonal of the triangle of the scaled matrix, at most 1; 0 where a column vanishes.</summary>
     public double LeastPivot { get; private set; }
 
-    /// <summary>Factors the matrix and turns a right-hand side with it.</summary>
-    /// <param name="right">Right-hand side; receives Q' times itself.</param>
-    public void Factor(Span<double> right)
+    /// <summary>Factors the matrix.</summary>
+    public void Factor()
     {
         LeastPivot = 1;
         for (var k = 0; k < columns; k++)
@@ -35,10 +36,23 @@ internal sealed class HouseholderQr(int rows, int columns)
             if (length == 0) continue;
             var alpha = column[k] > 0 ? -length : length;
             column[k] -= alpha;
-            var factor = 1 / (-alpha * column[k]);
-            for (var j = k + 1; j < columns; j++) Reflect(column, Matrix.AsSpan(j * rows, rows), k, factor);
-            Reflect(column, right, k, factor);
+            (_heads[k], _factors[k]) = (column[k], 1 / (-alpha * column[k]));
+            for (var j = k + 1; j < columns; j++) Reflect(column, Matrix.AsSpan(j * rows, rows), k, _factors[k]);
             column[k] = alpha;
+        }
+    }
+
+    /// <summary>Turns a right-hand side.</summary>
+    /// <param name="right">Right-hand side; receives Q' times itself.</param>
+    public void Turn(Span<double> right)
+    {
+        for (var k = 0; k < columns; k++)
+        {
+            var column = Matrix.AsSpan(k * rows, rows);
+            var diagonal = column[k];
+            column[k] = _heads[k];
+            Reflect(column, right, k, _factors[k]);
+            column[k] = diagonal;
         }
     }
 

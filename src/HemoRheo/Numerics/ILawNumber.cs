@@ -58,4 +58,13 @@ public interface ILawNumber<T> where T : struct, ILawNumber<T>
 
     /// <summary>x to the power y, for x above zero.</summary>
     static abstract T Pow(T x, T y);
+
+    /// <summary>Sine of an angle in radians.</summary>
+    static abstract T Sin(T x);
+
+    /// <summary>Cosine of an angle in radians.</summary>
+    static abstract T Cos(T x);
+
+    /// <summary>Arctangent in radians, between -pi/2 and pi/2.</summary>
+    static abstract T Atan(T x);
 }

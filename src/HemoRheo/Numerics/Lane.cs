@@ -99,6 +99,10 @@ internal readonly struct Lane(Vector256<double> bits) : ILawNumber<Lane>
     /// <summary>A mask, true where x is a finite number.</summary>
     public static Lane IsFinite(Lane x) => Abs(x) < new Lane(double.PositiveInfinity);
 
+    /// <summary>A mask, true where x is zero.</summary>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    public static Lane IsZero(Lane x) => new(Vector256.Equals(x.Bits, Vector256<double>.Zero));
+
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public static Lane Sqrt(Lane x) => new(Vector256.Sqrt(x.Bits));
 
@@ -119,6 +123,16 @@ internal readonly struct Lane(Vector256<double> bits) : ILawNumber<Lane>
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public static Lane Log(Lane x) => new(Vector256.Log(x.Bits));
 
+    /// <summary>x to the power y; 1 where y is zero, also at x = 0, where the logarithm is not finite.</summary>
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
-    public static Lane Pow(Lane x, Lane y) => Exp(y * Log(x));
+    public static Lane Pow(Lane x, Lane y) => Exp(y * Log(x) & ~IsZero(y));
+
+    /// <summary>Sine, lane by lane: no law in use needs it fast.</summary>
+    public static Lane Sin(Lane x) => new(Math.Sin(x[0]), Math.Sin(x[1]), Math.Sin(x[2]), Math.Sin(x[3]));
+
+    /// <summary>Cosine, lane by lane.</summary>
+    public static Lane Cos(Lane x) => new(Math.Cos(x[0]), Math.Cos(x[1]), Math.Cos(x[2]), Math.Cos(x[3]));
+
+    /// <summary>Arctangent, lane by lane.</summary>
+    public static Lane Atan(Lane x) => new(Math.Atan(x[0]), Math.Atan(x[1]), Math.Atan(x[2]), Math.Atan(x[3]));
 }

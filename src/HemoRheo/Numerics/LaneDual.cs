@@ -123,8 +123,28 @@ internal struct LaneDual : ILawNumber<LaneDual>
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public static LaneDual Log(LaneDual x) => x.Chain(Lane.Log(x.Value), 1 / x.Value);
 
+    /// <summary>Power; where x is zero its slopes are zero, so that a rate of zero is harmless.</summary>
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
-    public static LaneDual Pow(LaneDual x, LaneDual y) => Exp(y * Log(x));
+    public static LaneDual Pow(LaneDual x, LaneDual y)
+    {
+        var power = Lane.Pow(x.Value, y.Value);
+        var there = ~Lane.IsZero(x.Value);
+        var byX = power * y.Value / x.Value & there;
+        var byY = power * Lane.Log(x.Value) & there;
+        return new(
+            power,
+            x.S0 * byX + y.S0 * byY,
+            x.S1 * byX + y.S1 * byY,
+            x.S2 * byX + y.S2 * byY,
+            x.S3 * byX + y.S3 * byY,
+            x.S4 * byX + y.S4 * byY);
+    }
+
+    public static LaneDual Sin(LaneDual x) => x.Chain(Lane.Sin(x.Value), Lane.Cos(x.Value));
+
+    public static LaneDual Cos(LaneDual x) => x.Chain(Lane.Cos(x.Value), -Lane.Sin(x.Value));
+
+    public static LaneDual Atan(LaneDual x) => x.Chain(Lane.Atan(x.Value), 1 / (1 + Lane.Square(x.Value)));
 
     /// <summary>A function of this number alone: its value and its derivative.</summary>
     [MethodImpl(MethodImplOptions.AggressiveInlining)]

@@ -3,6 +3,9 @@ namespace HemoRheo;
 /// <summary>Where a general least-squares solution stands: parameters, values, slopes and weights there, and the same at a trial.</summary>
 internal sealed class LeastSquaresState
 {
+    private const double Probe = 0.1;
+    private const double LongestBend = 0.75;
+
     private readonly PointModel _model;
     private readonly double[] _data;
     private readonly double _relative;
@@ -15,6 +18,8 @@ internal sealed class LeastSquaresState
     private double[] _trial;
     private double[] _trialValues;
     private double[] _trialSlopes;
+    private HouseholderQr? _damped;
+    private double[]? _lastStep;
 
     public LeastSquaresState(PointModel model, double[] data, double[] start, double relative, double floor)
     {
@@ -38,20 +43,54 @@ internal sealed class LeastSquaresState
     {
         var (points, size) = (_data.Length, _at.Length);
         var rows = Math.Max(points, size) + size;
-        var qr = new HouseholderQr(rows, size);
+        _damped = new HouseholderQr(rows, size);
         var right = new double[rows];
         for (var i = 0; i < points; i++) right[i] = _roots[i] * (_data[i] - _values[i]);
         for (var k = 0; k < size; k++)
         {
-            for (var i = 0; i < points; i++) qr.Matrix[k * rows + i] = _roots[i] * _slopes[k * points + i];
-            qr.Matrix[k * rows + rows - size + k] = Math.Sqrt(damping) * _diagonal[k];
+            for (var i = 0; i < points; i++) _damped.Matrix[k * rows + i] = _roots[i] * _slopes[k * points + i];
+            _damped.Matrix[k * rows + rows - size + k] = Math.Sqrt(damping) * _diagonal[k];
         }
 
-        qr.Factor(right);
-        LeastPivot = qr.LeastPivot;
-        var step = new double[size];
-        qr.Solve(right, step);
-        return step;
+        _damped.Factor();
+        LeastPivot = _damped.LeastPivot;
+        return Solved(right);
+    }
+
+    /// <summary>Bends the step just made along the curve of the model: half the second-order correction, from the change of the slopes along the step. Null where the correction is too long for the step to be trusted.</summary>
+    public double[]? Bent(double[] step)
+    {
+        var (points, size) = (_data.Length, _at.Length);
+        for (var k = 0; k < size; k++) _trial[k] = _at[k] + Probe * step[k];
+        _model(_trial, _trialValues, _trialSlopes);
+        var right = new double[Math.Max(points, size) + size];
+        for (var i = 0; i < points; i++)
+        {
+            double change = 0;
+            for (var k = 0; k < size; k++) change += _slopes[k * points + i] * step[k];
+            right[i] = -_roots[i] * ((_trialValues[i] - _values[i]) / Probe - change) / Probe;
+        }
+
+        var bend = Solved(right);
+        if (!(4 * Dot(bend, bend) <= LongestBend * LongestBend * Dot(step, step))) return null;
+        for (var k = 0; k < size; k++) bend[k] += step[k];
+        return bend;
+    }
+
+    /// <summary>Product in the scale of the slopes.</summary>
+    private double Dot(double[] x, double[] y)
+    {
+        double sum = 0;
+        for (var k = 0; k < x.Length; k++) sum += _diagonal[k] * x[k] * (_diagonal[k] * y[k]);
+        return sum;
+    }
+
+    private double[] Solved(double[] right)
+    {
+        _damped!.Turn(right);
+        var solution = new double[_at.Length];
+        _damped.Solve(right, solution);
+        return solution;
     }
 
     /// <summary>Largest step relative to its parameter.</summary>
@@ -95,9 +134,20 @@ internal sealed class LeastSquaresState
         return double.IsFinite(decrease) && _trialSlopes.All(double.IsFinite) ? decrease : double.NaN;
     }
 
-    /// <summary>Moves to the trial.</summary>
-    public void Accept()
+    /// <summary>Whether a trial that climbs may be taken: the step keeps the direction of the last one, as along the floor of a narrow curved valley, and the sum of squares at most doubles.</summary>
+    public bool MayClimb(double[] step, double decrease)
     {
+        if (_lastStep is null) return false;
+        var cosine = Dot(step, _lastStep) / Math.Sqrt(Dot(step, step) * Dot(_lastStep, _lastStep));
+        var risen = ChiSquare - decrease;
+        return cosine > 0 && (1 - cosine) * risen <= ChiSquare && risen <= 2 * ChiSquare;
+    }
+
+    /// <summary>Moves to the trial.</summary>
+    /// <param name="step">The step, before it was bent.</param>
+    public void Accept(double[] step)
+    {
+        _lastStep = step;
         (_at, _trial) = (_trial, _at);
         (_values, _trialValues) = (_trialValues, _values);
         (_slopes, _trialSlopes) = (_trialSlopes, _slopes);
@@ -119,7 +169,8 @@ internal sealed class LeastSquaresState
             for (var k = 0; k < size; k++) qr.Matrix[k * rows + i] = _roots[i] * _slopes[k * points + i];
         }
 
-        qr.Factor(right);
+        qr.Factor();
+        qr.Turn(right);
         var response = new double[size];
         qr.Solve(right, response);
         return new(_at, qr.InverseOfNormal(), response, residuals, ChiSquare, qr.LeastPivot, end);

@@ -48,5 +48,5 @@ public static partial class StudyFileKeys
         Truth("[[groups]]", "controls", "Whether reference limits come from it.", "true"),
     ];
 
-    internal static string[] LawNames => ["Newtonian", "Casson", "Quemada"];
+    internal static string[] LawNames => ["Newtonian", "Power law", "Bingham", "Casson", "Herschel-Bulkley", "Quemada", "Carreau", "Cross", "Carreau-Yasuda"];
 }

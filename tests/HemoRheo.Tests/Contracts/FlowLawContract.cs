@@ -16,7 +16,7 @@ public class FlowLawContract
         Assert.NotEmpty(law.Source.Text);
         Assert.InRange(law.Source.Year, 1600, 2026);
         Assert.True(law.ValidRates.Lower > 0 && law.ValidRates.Upper > law.ValidRates.Lower);
-        Assert.InRange(law.Parameters.Count, 1, 5);
+        Assert.InRange(law.Parameters.Count, 1, LaneDual.Slopes);
         Assert.All(law.Parameters, parameter => Assert.False(string.IsNullOrWhiteSpace(parameter.Name) || string.IsNullOrWhiteSpace(parameter.Symbol) || string.IsNullOrWhiteSpace(parameter.Unit)));
         Assert.Equal(law.Parameters.Count, law.Parameters.Select(parameter => parameter.Name).Distinct().Count());
     }
@@ -49,6 +49,19 @@ public class FlowLawContract
         {
             Assert.Equal(law.Stress(ShearRate.FromReciprocalSeconds(rate), law.ToNatural(scaled)).Pascals, law.StressAt(rate, scaled, new double[scaled.Length]));
         }
+    }
+
+    /// <summary>A fluid at rest: the yield stress where there is one, else nothing; never "not a number" from the logarithm of zero.</summary>
+    [Theory]
+    [MemberData(nameof(Laws))]
+    public void At_a_rate_of_zero_its_stress_is_the_yield_stress_and_its_slopes_are_numbers(string name)
+    {
+        var law = FlowLaw.Named(name);
+        var yieldStress = law.Parameters[0].Name == "yield stress" ? Invented(law)[0] : 0;
+        var slopes = new double[law.Parameters.Count];
+        Assert.Equal(yieldStress, law.Stress(0.PerSecond(), Invented(law)).Pascals, 1e-15);
+        Assert.Equal(yieldStress, law.StressAt(0, law.ToScaled(Invented(law)), slopes), 1e-15);
+        Assert.Equal(yieldStress, slopes.Sum(), 1e-15);
     }
 
     [Theory]
@@ -95,8 +108,14 @@ public class FlowLawContract
     private static double[] Invented(FlowLaw law) => law.Name switch
     {
         "Newtonian" => [0.0035],
+        "Power law" => [0.014, 0.78],
+        "Bingham" => [0.02, 0.0036],
         "Casson" => [0.005, 0.0034],
+        "Herschel-Bulkley" => [0.008, 0.009, 0.86],
         "Quemada" => [0.0031, 2.5, 0.2],
+        "Carreau" => [0.05, 0.0036, 2.9, 0.4],
+        "Cross" => [0.05, 0.0036, 1.1, 0.95],
+        "Carreau-Yasuda" => [0.05, 0.0036, 2.1, 1.3, 0.25],
         _ => throw new ArgumentException($"Write believable numbers for {law.Name} here.", nameof(law)),
     };
 

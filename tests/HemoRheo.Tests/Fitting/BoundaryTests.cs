@@ -22,6 +22,35 @@ public class BoundaryTests
         Assert.Equal(0, fit.Values.YieldStress.Pascals);
     }
 
+    [Fact]
+    public void Bingham_on_an_exact_Newtonian_curve_ends_without_a_yield_stress()
+    {
+        var fit = Simulated.Exact(FlowLaw.Newtonian, 0.0013).Fit(FlowLaw.Bingham, WeightedFits.Errors);
+        Held(fit, 0, "Newtonian describes this curve");
+        Assert.Equal(0.0013, fit.Values.PlasticViscosity.PascalSeconds, 1e-14);
+    }
+
+    [Fact]
+    public void Herschel_Bulkley_on_an_exact_power_law_ends_without_a_yield_stress()
+    {
+        var fit = Simulated.Exact(FlowLaw.PowerLaw, 0.014, 0.78).Fit(FlowLaw.HerschelBulkley, WeightedFits.Errors);
+        Held(fit, 0, "Power law describes this curve");
+        Assert.Equal(0.014, fit.Values.Consistency, 1e-12);
+        Assert.Equal(0.78, fit.Values.FlowIndex, 1e-11);
+    }
+
+    /// <summary>Curves made without a high-shear viscosity: laws that have one end at zero, with the other numbers right.</summary>
+    [Theory]
+    [InlineData("Carreau", 0.05, 0.0, 2.9, 0.6)]
+    [InlineData("Cross", 0.05, 0.0, 1.1, 0.5)]
+    public void Laws_of_two_viscosities_may_end_without_the_one_at_high_shear(string name, params double[] truth)
+    {
+        var law = FlowLaw.Named(name);
+        var fit = Simulated.Exact(law, truth).Fit(law, WeightedFits.Errors);
+        Held(fit, 1, "the same law without a high-shear viscosity describes this curve");
+        for (var k = 0; k < truth.Length; k++) Assert.Equal(truth[k], fit.Parameters[k].Estimate, 1e-8);
+    }
+
     /// <summary>On noisy Casson curves r = 0 is the best fit about half the time; then stresses, covariance and chi-square are Casson's own.</summary>
     [Fact]
     public void Quemada_on_noisy_Casson_curves_is_always_usable_and_at_its_boundary_is_Casson()

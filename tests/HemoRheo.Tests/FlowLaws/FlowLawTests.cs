@@ -10,7 +10,7 @@ public class FlowLawTests
     public void A_wrong_name_is_answered_with_the_names_there_are()
     {
         var refused = Assert.Throws<ArgumentException>(() => FlowLaw.Named("Casson-Quemada"));
-        Assert.Contains("no flow law named 'Casson-Quemada'; the laws are Newtonian, Casson, Quemada", refused.Message, StringComparison.Ordinal);
+        Assert.Contains("no flow law named 'Casson-Quemada'; the laws are Newtonian, Power law, Bingham, Casson, Herschel-Bulkley, Quemada, Carreau, Cross, Carreau-Yasuda.", refused.Message, StringComparison.Ordinal);
     }
 
     [Fact]

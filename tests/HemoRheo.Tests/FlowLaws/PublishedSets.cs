@@ -7,17 +7,22 @@ internal static class PublishedSets
         .Select(part => part.Split('='))
         .ToDictionary(part => part[0], part => double.Parse(part[1], System.Globalization.CultureInfo.InvariantCulture));
 
+    /// <summary>The law of a written name. The modified Cross law (1 + (lambda rate)^m)^-a is Carreau and Yasuda's with exponents m and n = 1 - a m.</summary>
+    public static FlowLaw Law(string written) => FlowLaw.Named(written switch { "power-law" => "Power law", "modified-cross" => "Carreau-Yasuda", _ => written });
+
     public static double[] Natural(string law, IReadOnlyDictionary<string, double> p) => law switch
     {
-        "newtonian" => [p["eta"]],
-        "casson" => [p["tau_y"], p["eta_c"]],
+        "modified-cross" => [p["eta_0"], p["eta_inf"], p["lambda"], p["m"], 1 - p["a"] * p["m"]],
         "quemada" => [p["eta_p"] / Math.Pow(AtHigh(p), 2), p["gamma_c"], AtLow(p) / AtHigh(p)],
-        _ => throw new ArgumentException($"No law {law}.", nameof(law)),
+        _ => [.. p.Values],
     };
 
-    /// <summary>Derivatives of the library's parameters by a written one: the chain from k0, kinf, eta_p and H.</summary>
+    /// <summary>Derivatives of the library's parameters by a written one: for Quemada the chain from k0, kinf, eta_p and H, for the modified Cross law that from a and m.</summary>
     public static double[] Chain(string law, IReadOnlyDictionary<string, double> p, string by)
     {
+        if (law == "modified-cross" && by == "m") return [0, 0, 0, 1, -p["a"]];
+        if (law == "modified-cross" && by == "a") return [0, 0, 0, 0, -p["m"]];
+        if (law == "modified-cross") return [.. ((string[])["eta_0", "eta_inf", "lambda", "m", "n"]).Select(name => name == by ? 1.0 : 0.0)];
         if (law != "quemada") return [.. p.Keys.Select(name => name == by ? 1.0 : 0.0)];
         var (high, low, h, etaP) = (AtHigh(p), AtLow(p), p["H"], p["eta_p"]);
         return by switch

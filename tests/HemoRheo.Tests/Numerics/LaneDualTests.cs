@@ -29,6 +29,9 @@ public class LaneDualTests
         Near(LaneDual.Exp(X), 7.38905609893065, 7.38905609893065, 0);
         Near(LaneDual.Log(X), Log2, 0.5, 0);
         Near(LaneDual.Pow(X, Y), 8, 12, 8 * Log2);
+        Near(LaneDual.Sin(X), 0.9092974268256817, -0.4161468365471424, 0);
+        Near(LaneDual.Cos(X), -0.4161468365471424, -0.9092974268256817, 0);
+        Near(LaneDual.Atan(X), 1.1071487177940904, 0.2, 0);
     }
 
     [Fact]
@@ -37,6 +40,19 @@ public class LaneDualTests
         var root = LaneDual.Sqrt(LaneDual.Seed(new(0.0), 0, new(0.0)));
         Assert.Equal(0, root.Value[0]);
         Assert.Equal(0, root.S0[0]);
+    }
+
+    /// <summary>0^3 = 0, 0^0 = 1, 0^-1 is infinite; the slopes that matter to a rate of zero are zero, since it does not move.</summary>
+    [Fact]
+    public void A_power_of_zero_is_a_number_with_slopes_that_are_numbers()
+    {
+        var zero = LaneDual.Seed(new(0.0), 0, new(0.0));
+        var power = LaneDual.Pow(zero, Y);
+        Assert.Equal([0, 0, 0], [power.Value[0], power.S0[0], power.S1[0]]);
+        Assert.Equal(1, LaneDual.Pow(zero, new(new Lane(0.0))).Value[0]);
+        Assert.Equal(double.PositiveInfinity, Lane.Pow(new(0.0), new(-1.0))[2]);
+        Assert.True(double.IsNaN(Lane.Pow(new(-2.0), new(0.5))[0]));
+        Assert.True(double.IsNaN(Lane.Pow(new(2.0), new(double.NaN))[1]));
     }
 
     private static void Near(LaneDual found, double value, double byX, double byY)

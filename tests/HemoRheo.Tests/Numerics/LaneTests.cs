@@ -50,6 +50,16 @@ public class LaneTests
     }
 
     [Fact]
+    public void The_power_of_a_lane_has_the_same_bits_beside_any_neighbor()
+    {
+        for (var i = 1; i < 1001; i++)
+        {
+            var (x, y) = (1e-3 * i * i, -3 + 0.006 * i);
+            foreach (var poison in Poisons) Assert.Equal(Lane.Pow(new(x), new(y))[0], Lane.Pow(new(poison, poison, x, poison), new(-2, poison, y, 300))[2]);
+        }
+    }
+
+    [Fact]
     public void Masks_choose_lane_by_lane_and_are_false_for_not_a_number()
     {
         var x = new Lane(1, double.NaN, 3, -4);

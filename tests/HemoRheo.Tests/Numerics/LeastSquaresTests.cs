@@ -45,6 +45,25 @@ public class LeastSquaresTests
         Assert.Equal(56, solution.ChiSquare, 1e-10);
     }
 
+    [Fact]
+    public void Lists_that_do_not_match_are_refused_with_both_lengths()
+    {
+        var refused = Assert.Throws<ArgumentException>(() => LeastSquares.Fit(default(Level), [1.0, 2, 3], [0.0], [0.0, 0.0]));
+        Assert.Contains("2 points and the data 3", refused.Message, StringComparison.Ordinal);
+        Assert.Throws<ArgumentException>(() => LeastSquares.Fit(default(Plane), [1.0, 2], [0.0, 0, 0], [0.0, 0], [0.0, 0]));
+        Assert.Throws<ArgumentException>(() => LeastSquares.Fit(default(Level), [1.0, 2], [0.0]));
+    }
+
+    /// <summary>Mean of 1, 2, 3, 6 is 3; its standard error is sqrt(14 / 3 / 4).</summary>
+    [Fact]
+    public void The_public_entry_estimates_the_scale_from_the_residuals()
+    {
+        var solution = LeastSquares.Fit(default(Level), [1.0, 2, 3, 6], [0.0], [0.0, 0, 0, 0]);
+        Assert.Equal(3, solution.Estimates[0], 1e-13);
+        Assert.Equal(1.0801234497346435, solution.StandardErrors[0], 1e-13);
+        Assert.True(double.IsNaN(LeastSquares.Fit(default(Level), [1.0], [0.0], [0.0]).StandardErrors[0]));
+    }
+
     private readonly struct Plane : IModelFormula
     {
         public T Value<T>(ReadOnlySpan<T> x, ReadOnlySpan<T> p) where T : struct, ILawNumber<T> => p[0] + p[1] * x[0] + p[2] * x[1];
