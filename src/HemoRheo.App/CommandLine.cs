@@ -86,7 +86,7 @@ internal sealed class CommandLine(string workingFolder, string programFolder, Te
         command.SetAction(parsed =>
         {
             var path = StudyFileToStartFrom.Write(Full(parsed.GetValue(folder)!));
-            output.Write($"{path} is written. Put in your own values, lay exports and tables beside it, then: hemorheo {parsed.GetValue(folder)}\n");
+            output.Write(StudyFileToStartFrom.WhatToDoNext(path, parsed.GetValue(folder)!));
             return ExitCode.Done;
         });
         return command;

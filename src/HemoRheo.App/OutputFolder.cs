@@ -26,6 +26,7 @@ internal sealed class OutputFolder
         this.move = move;
         RefuseWhatIsNotOurs(studyFolder);
         PutBackWhatAnInterruptedSwapLeft();
+        RefuseFilesOfSomebodyElse();
     }
 
     /// <summary>Full path.</summary>
@@ -46,8 +47,14 @@ internal sealed class OutputFolder
         try
         {
             Directory.CreateDirectory(fresh);
-            fill(fresh);
+            using (var list = WrittenFiles.Begin(fresh))
+            {
+                fill(fresh);
+                WrittenFiles.End(list, fresh);
+            }
+            RefuseFilesOfSomebodyElse();
             Swap(fresh);
+            RemoveWhatKilledRunsLeft();
         }
         finally
         {
@@ -87,6 +94,20 @@ internal sealed class OutputFolder
         if (Directory.Exists(Path) && Directory.EnumerateFileSystemEntries(Path).Any() && !File.Exists(System.IO.Path.Combine(Path, RecordName)))
         {
             throw new CouldNotRunException($"\"{Path}\" holds other files than results of this program, and results are replaced whole at every run. Choose a new or empty folder.");
+        }
+    }
+
+    private void RefuseFilesOfSomebodyElse()
+    {
+        if (!Directory.Exists(Path) || WrittenFiles.FirstOfSomebodyElse(Path) is not { } file) return;
+        throw new CouldNotRunException($"\"{file}\" in \"{Path}\" was not written by this program, and results are replaced whole at every run. Move it elsewhere, or choose another folder with --output.");
+    }
+
+    private void RemoveWhatKilledRunsLeft()
+    {
+        foreach (var left in Directory.EnumerateDirectories(System.IO.Path.GetDirectoryName(Path)!, System.IO.Path.GetFileName(Path) + ".tmp-*").Where(WrittenFiles.IsLeft).ToArray())
+        {
+            Directory.Delete(left, recursive: true);
         }
     }
 

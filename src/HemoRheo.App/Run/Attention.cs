@@ -27,6 +27,7 @@ internal static class Attention
     {
         var failed = history.Checks.Where(check => check.Outcome == CheckOutcome.Fails).Select(check => $"{check.Name} of {check.Day:yyyy-MM-dd}").ToArray();
         var undecided = history.Checks.Count(check => check.Outcome == CheckOutcome.CannotTell);
+        if (history.Checks.Count == 0) return $"instrument {history.Instrument.Name}: no check, so nothing vouches for it";
         return $"instrument {history.Instrument.Name}: {Counted(history.Checks.Count, "check")}"
             + (failed.Length > 0 ? $", {failed.Length} failed ({string.Join(", ", failed)})" : ", none failed")
             + (undecided > 0 ? $", {undecided} too uncertain to tell" : "");
@@ -39,7 +40,7 @@ internal static class Attention
             (InstrumentStatus.InOrder, "in order"),
             (InstrumentStatus.InDoubt, "in doubt"),
             (InstrumentStatus.Failed, "measured after a failed check"),
-            (InstrumentStatus.Unknown, "measured before any check"),
+            (InstrumentStatus.Unknown, results.Analyzed.Histories.All(history => history.Checks.Count == 0) ? "that no check vouches for: there is no check" : "measured before any check, or after an adjustment without one"),
         };
         var counts = words
             .Select(word => (Count: results.Samples.Count(sample => sample.Result.Status == word.Item1), Words: word.Item2))
@@ -51,9 +52,10 @@ internal static class Attention
     private static IEnumerable<string> OfFindings(FindingKind kind, IReadOnlyList<Finding> findings)
     {
         var head = $"{kind.Severity.ToString().ToUpperInvariant(),-8}{kind.Code}";
-        return findings.Count <= ToldEach
+        IEnumerable<string> lines = findings.Count <= ToldEach
             ? findings.Select(finding => $"{head}: {finding.Message}{Place("", finding)}")
             : [$"{head}, {findings.Count} times: {kind.Meaning}{Place("first: ", findings[0])}"];
+        return kind.Severity == Severity.Fault ? lines.Append($"{"",-8}what to do: {kind.WhatToDo}") : lines;
     }
 
     private static string Place(string word, Finding finding) => finding.Where.ToString() is { Length: > 0 } where ? $" ({word}{where})" : "";

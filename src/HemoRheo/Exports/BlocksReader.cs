@@ -89,7 +89,7 @@ internal sealed class BlocksReader(Layout layout, RecordingKind kind, FileFindin
     {
         if (_fields.Count != _map!.Count)
         {
-            findings.Add(_draft!.Mark(ExportFindings.FieldCountDiffers, line.Number, null, $"Found {_fields.Count} fields, expected {_map.Count}."));
+            findings.Add(_draft!.Mark(ExportFindings.FieldCountDiffers, line.Number, Math.Min(_fields.Count, _map.Count) + 1, $"Found {_fields.Count} fields, expected {_map.Count}."));
             _draft.Rows++;
             return;
         }

@@ -15,8 +15,11 @@ public static partial class ExportFindings
     /// <summary>A file is named as an export of blood and as a check; nothing was read from it.</summary>
     public static FindingKind FileInBothLists { get; } = new("file-in-both-lists", Severity.Fault, "A file is named as an export of blood and as a check; nothing was read from it.", "A checks folder inside the exports folder.", "Keep exports and checks in folders of their own.");
 
+    /// <summary>The study file names a folder for exports of blood, and no file lies there.</summary>
+    public static FindingKind NoExports { get; } = new("no-exports", Severity.Fault, "The study file names a folder for exports of blood, and no file lies there.", "Exports not yet copied, or another folder named.", "Copy the exports into the folder, or correct exports in the study file.");
+
     /// <summary>A file could not be opened or read.</summary>
-    public static FindingKind FileNotReadable { get; } = new("file-not-readable", Severity.Fault, "A file could not be opened or read.", "Missing rights, or the file is open elsewhere.", "Close other programs or correct the rights, then run again.");
+    public static FindingKind FileNotReadable { get; } = new("file-not-readable", Severity.Fault, "A file could not be opened or read.", "Missing rights, a file that is open elsewhere, or a pipe or device among the files.", "Close other programs, correct the rights or take away what is no file, then run again.");
 
     /// <summary>A file has no text.</summary>
     public static FindingKind FileEmpty { get; } = new("file-empty", Severity.Fault, "A file has no text.", "An export that was broken off, or a copy that failed.", "Export or copy the file again.");
@@ -66,5 +69,5 @@ public static partial class ExportFindings
     /// <summary>A file has a header and no readings.</summary>
     public static FindingKind FileWithoutReadings { get; } = new("file-without-readings", Severity.Fault, "A file has a header and no readings.", "An export made before the measurement.", "Export the file again.");
 
-    private static FindingKind[] Files => [NoLayoutFits, TwoLayoutsFit, PathLeadsOut, FileInBothLists, FileNotReadable, FileEmpty, FileBinary, EncodingMarkDiffers, BytesNotText, LineTooLong, QuoteNotClosed, FileCut, ColumnMissing, ColumnTwice, HeaderUnitDiffers, UnknownUnit, DecimalSignDiffers, ColumnsNotRead, KeysNotRead, TextNotRead, FileWithoutReadings];
+    private static FindingKind[] Files => [NoLayoutFits, TwoLayoutsFit, PathLeadsOut, FileInBothLists, NoExports, FileNotReadable, FileEmpty, FileBinary, EncodingMarkDiffers, BytesNotText, LineTooLong, QuoteNotClosed, FileCut, ColumnMissing, ColumnTwice, HeaderUnitDiffers, UnknownUnit, DecimalSignDiffers, ColumnsNotRead, KeysNotRead, TextNotRead, FileWithoutReadings];
 }

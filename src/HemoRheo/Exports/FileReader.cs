@@ -25,6 +25,12 @@ internal static class FileReader
     /// <summary>Opens a file, reads it and digests it; a file that cannot be read is a finding.</summary>
     public static FileReading Opened(string path, string shown, string encoding, string? layout, FileFindings findings, Func<TextLines, List<RecordingDraft>> read)
     {
+        if (!RegularFile.Is(path))
+        {
+            findings.Refuse(ExportFindings.FileNotReadable, null, null, "Found a pipe, socket or device, or nothing, expected a file; nothing was read from it.");
+            return new(shown, "", layout, findings, []);
+        }
+
         try
         {
             using var lines = new TextLines(new FileStream(path, FileMode.Open, FileAccess.Read, FileShare.Read, bufferSize: 0), shown, encoding);

@@ -25,8 +25,8 @@ internal sealed class RecordingJoin(Study study, StudyTables tables)
         }
         else
         {
-            if (draft.Person is not null && draft.Person != row.Record.Person) Differs(draft, findings, "person", row.Record.Where);
-            if (draft.Visit is not null && draft.Visit != row.Record.Visit) Differs(draft, findings, "visit", row.Record.Where);
+            if (draft.Person is not null && row.Person is not null && draft.Person != row.Person) Differs(draft, findings, "person", row.Record.Where);
+            if (draft.Visit is not null && row.Visit is not null && draft.Visit != row.Visit) Differs(draft, findings, "visit", row.Record.Where);
         }
 
         return Made(draft, findings, row?.Instrument, row?.Geometry, row?.StartedAt, null, row?.Record.Where);

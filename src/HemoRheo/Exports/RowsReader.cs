@@ -59,7 +59,8 @@ internal sealed class RowsReader(Layout layout, RecordingKind kind, FileFindings
         }
 
         var message = $"Found {_fields.Count} fields, expected {expected}.";
-        findings.Add(_last?.Mark(ExportFindings.FieldCountDiffers, line.Number, null, message) ?? ExportFindings.FieldCountDiffers.At(new(findings.File, Line: line.Number), message));
+        var column = Math.Min(_fields.Count, expected) + 1;
+        findings.Add(_last?.Mark(ExportFindings.FieldCountDiffers, line.Number, column, message) ?? ExportFindings.FieldCountDiffers.At(new(findings.File, Line: line.Number, Column: column), message));
     }
 
     private void Cut(TextLine line, string found)

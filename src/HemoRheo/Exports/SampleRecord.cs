@@ -2,8 +2,8 @@ namespace HemoRheo;
 
 /// <summary>One row of the samples table. Null where the table says nothing.</summary>
 /// <param name="Sample">Pseudonym of the sample.</param>
-/// <param name="Person">Pseudonym of the person.</param>
-/// <param name="Visit">Number of the visit.</param>
+/// <param name="Person">Pseudonym of the person, from the table or, where it has none, from the exports.</param>
+/// <param name="Visit">Number of the visit, from the table or, where it has none, from the exports; 1 where neither says.</param>
 /// <param name="DrawnAt">When the blood was drawn.</param>
 /// <param name="Hematocrit">Hematocrit.</param>
 /// <param name="Counter">Name of the hematocrit counter.</param>

@@ -3,11 +3,11 @@ namespace HemoRheo;
 /// <summary>Reads the samples table.</summary>
 internal static class SamplesTable
 {
-    /// <summary>The columns it may have.</summary>
-    public static Items<TableColumn> Columns { get; } =
+    /// <summary>The columns it may have. That of persons is required where no layout has a field for them.</summary>
+    public static Items<TableColumn> Columns(Study study) =>
     [
         new("sample", Required: true),
-        new("person", Required: true),
+        new("person", Required: !study.Layouts.Any(layout => layout.Fields.Any(field => field.Meaning == FieldMeaning.Person))),
         new("visit"),
         new("drawn_at"),
         new("hematocrit", Quantity.Fraction),
@@ -25,27 +25,22 @@ internal static class SamplesTable
     public static List<SampleRow> Of(List<TableRow> rows, Study study, FileFindings findings)
     {
         var values = new TableValues(findings);
-        return [.. values.Identified(rows, "sample").Select(row => Row(row, study, values)).OfType<SampleRow>()];
+        return [.. values.Identified(rows, "sample").Select(row => Row(row, study, values))];
     }
 
-    private static SampleRow? Row(TableRow row, Study study, TableValues values)
+    private static SampleRow Row(TableRow row, Study study, TableValues values)
     {
         var sample = row["sample"]!;
         var where = new Where(values.Findings.File, Line: row.Line, Sample: sample);
-        if (row["person"] is not { } person)
-        {
-            values.Findings.Add(ExportFindings.IdentifierMissing.At(where, "Found a sample without person; its row was set aside."));
-            return null;
-        }
-
         var hematocrit = HematocritOf(row, values, where);
         var counter = values.Declared(row, "counter", study.Counters.Select(counter => counter.Name), sample);
         if (hematocrit is not null && row["counter"] is null)
             values.Findings.Add(ExportFindings.SampleWithoutCounter.At(where, "Found a hematocrit without counter, expected the name of one of [[counters]]."));
+        var visit = values.Whole(row, "visit", sample);
         var record = new SampleRecord(
             sample,
-            person,
-            values.Whole(row, "visit", sample) ?? 1,
+            row["person"] ?? "",
+            visit ?? 1,
             values.Time(row, "drawn_at", sample),
             hematocrit,
             counter,
@@ -57,6 +52,9 @@ internal static class SamplesTable
             where);
         return new(
             record,
+            row["person"],
+            row.At(values.Findings.File, "person").Column,
+            visit,
             values.Declared(row, "instrument", study.Instruments.Select(instrument => instrument.Name), sample),
             values.Declared(row, "geometry", study.Geometries.Select(geometry => geometry.Name), sample),
             values.Time(row, "started_at", sample));
@@ -66,7 +64,7 @@ internal static class SamplesTable
     {
         if (row["hematocrit"] is not { } text)
         {
-            values.Findings.Add(ExportFindings.SampleWithoutHematocrit.At(where, "Found no hematocrit for the sample."));
+            values.Findings.Add(ExportFindings.SampleWithoutHematocrit.At(row.At(values.Findings.File, "hematocrit") with { Sample = where.Sample }, "Found no hematocrit for the sample, expected a number in a column such as hematocrit [L/L]; values cannot be moved to the standard hematocrit."));
             return null;
         }
 

@@ -21,8 +21,11 @@ public static class StudyExports
             .. checks.Except(both).Select(path => FileReader.Read(study, path, RecordingKind.Check)),
             .. both.Select(path => InBoth(study, path)),
         ];
+        tables = SampleMetadata.Complete(tables, files);
         var recordings = new RecordingJoin(study, tables).Complete(files);
         loose.AddRange(Unmatched(study, tables, files));
+        if (blood.Count == 0)
+            loose.AddRange(study.Files.Exports.Where(path => Directory.Exists(Path.GetFullPath(path, study.Folder))).Select(path => ExportFindings.NoExports.At(new(path), "Found no file in this folder, expected exports of blood.")));
         var shown = files.Concat(tables.Files).Select(file => file.AsFile()).OrderBy(file => file.Path, StringComparer.Ordinal).ToItems();
         return new(
             study,

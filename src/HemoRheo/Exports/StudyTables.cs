@@ -28,7 +28,7 @@ internal sealed record StudyTables(List<SampleRow> Samples, List<Person> People,
         }
 
         return new(
-            Table(study.Files.Samples, "samples table", SamplesTable.Columns, SamplesTable.Of),
+            Table(study.Files.Samples, "samples table", SamplesTable.Columns(study), SamplesTable.Of),
             Table(study.Files.People, "people table", PeopleTable.Columns, PeopleTable.Of),
             Table(study.Files.CheckTable, "check table", CheckTable.Columns, CheckTable.Of),
             files);

@@ -25,7 +25,7 @@ internal static class TableReader
             }
             else if (fields.Count != count)
             {
-                findings.Add(ExportFindings.FieldCountDiffers, line.Number, null, $"Found {fields.Count} fields, expected {count}; the row was kept out.");
+                findings.Add(ExportFindings.FieldCountDiffers, line.Number, Math.Min(fields.Count, count) + 1, $"Found {fields.Count} fields, expected {count}; the row was kept out.");
             }
             else
             {
@@ -43,7 +43,7 @@ internal static class TableReader
         var header = new List<(string, int, Unit?)>();
         for (var at = 0; at < fields.Count; at++)
         {
-            var name = HeaderUnit.Name(fields[at]);
+            var name = HeaderUnit.BeforeBrackets(fields[at]);
             var column = known.FirstOrDefault(column => column.Name == name);
             if (column is not null && header.Any(earlier => earlier.Item1 == name))
                 findings.Refuse(ExportFindings.TableColumnTwice, line, at + 1, $"Found the column {name} a second time.");
@@ -58,13 +58,22 @@ internal static class TableReader
         }
 
         foreach (var missing in known.Where(column => column.Required && !header.Any(there => there.Item1 == column.Name)))
-            findings.Refuse(ExportFindings.TableColumnMissing, line, null, $"Found no column {missing.Name}{(fields.Count == 1 && fields[0].Contains(';', StringComparison.Ordinal) ? "; the fields are separated by semicolons, expected commas" : "")}.");
+            RefuseMissing(missing, fields, line, findings);
         return header;
+    }
+
+    private static void RefuseMissing(TableColumn missing, List<string> fields, int line, FileFindings findings)
+    {
+        var semicolons = fields.Count == 1 && fields[0].Contains(';', StringComparison.Ordinal);
+        var near = Spelling.Nearest(missing.Name, fields.Select(HeaderUnit.BeforeBrackets));
+        var column = semicolons ? 0 : fields.FindIndex(field => HeaderUnit.BeforeBrackets(field) == near);
+        var why = semicolons ? "; the fields are separated by semicolons, expected commas" : near is null ? "" : $"; the nearest header is \"{near}\"";
+        findings.Refuse(ExportFindings.TableColumnMissing, line, column < 0 ? null : column + 1, $"Found no column {missing.Name}, expected it in the header row{why}.");
     }
 
     private static void Add(TableColumn column, string text, int at, int line, List<(string, int, Unit?)> header, FileFindings findings)
     {
-        var spelling = HeaderUnit.Spelling(text);
+        var spelling = HeaderUnit.Bracketed(text);
         if (column.Quantity is not { } quantity)
         {
             header.Add((column.Name, at, null));

@@ -59,7 +59,7 @@ internal sealed class TableValues(FileFindings findings)
     public List<TableRow> Identified(List<TableRow> rows, string column)
     {
         foreach (var row in rows.Where(row => row[column] is null))
-            Findings.Add(ExportFindings.IdentifierMissing.At(row.At(Findings.File, column), $"Found a row without {column}; it was set aside."));
+            Findings.Add(ExportFindings.IdentifierMissing.At(row.At(Findings.File, column), $"Found a row without {column}, expected an identifier; it was set aside."));
         var named = rows.Where(row => row[column] is not null).ToList();
         foreach (var row in named.Where(row => !Identifier.IsPlain(row[column]!)))
             Findings.Add(ExportFindings.IdentifierUnusual.At(row.At(Findings.File, column), Identifier.Expected));

@@ -52,7 +52,7 @@ internal sealed class TextLines : IDisposable
         if (!ended) length = _end - _start;
         if (!ended && length == 0) return false;
         _line++;
-        if (length > LongestLine) return Refuse(ExportFindings.LineTooLong, 1, $"line {_line} is longer than {LongestLine} bytes");
+        if (length > LongestLine) return Refuse(ExportFindings.LineTooLong, 1, $"line {_line} longer than {LongestLine} bytes, expected lines that end before that");
         if (Decoded(_bytes.AsSpan(_start, length)) is not { } text) return false;
         _start = Math.Min(_end, _start + length + UnitSize);
         if (text.EndsWith('\r')) text = text[..^1];
@@ -89,12 +89,12 @@ internal sealed class TextLines : IDisposable
         Fill();
         if (TextMark.Of(_bytes.AsSpan(0, _end)) is { } mark)
         {
-            if (!TextMark.Agrees(mark.Encoding, _encoding)) return Refuse(ExportFindings.EncodingMarkDiffers, 1, $"a byte order mark of {mark.Encoding.WebName}, but the declared encoding is {_declared}");
+            if (!TextMark.Agrees(mark.Encoding, _encoding)) return Refuse(ExportFindings.EncodingMarkDiffers, 1, $"a byte order mark of {mark.Encoding.WebName}, expected none or that of the declared encoding {_declared}");
             (_encoding, _start) = (mark.Encoding, mark.Length);
         }
         else if (_encoding.CodePage == 1200 && !_declared.EndsWith("LE", StringComparison.OrdinalIgnoreCase) && _end > 0)
         {
-            return Refuse(ExportFindings.EncodingMarkDiffers, 1, "no byte order mark, which utf-16 needs; declare utf-16LE or utf-16BE for files without one");
+            return Refuse(ExportFindings.EncodingMarkDiffers, 1, "no byte order mark, expected the one that utf-16 needs; declare utf-16LE or utf-16BE for files without one");
         }
 
         return true;
@@ -127,7 +127,7 @@ internal sealed class TextLines : IDisposable
         catch (DecoderFallbackException wrong)
         {
             var good = bytes[..Math.Clamp(wrong.Index, 0, bytes.Length)];
-            Refuse(ExportFindings.BytesNotText, good.Length / UnitSize + 1, $"bytes at position {good.Length + 1} of line {_line} that are not {_declared}");
+            Refuse(ExportFindings.BytesNotText, good.Length / UnitSize + 1, $"bytes at position {good.Length + 1} of line {_line} that are not {_declared}, expected text in that encoding");
             return null;
         }
     }

@@ -21,8 +21,11 @@ internal static class FlowCurveWords
         };
     }
 
-    /// <summary>The place of a point, with its line where it comes from a file.</summary>
-    internal static Where PlaceOf(this FlowCurve curve, FlowPoint point) =>
+    /// <summary>The place of a point, with its line where it comes from a file. Without a column: a reading knows only that of its stress or torque.</summary>
+    internal static Where PlaceOf(this FlowCurve curve, FlowPoint point) => curve.PlaceOfStress(point) with { Column = null };
+
+    /// <summary>The place of a point's shear stress, or of its torque where it has no other; with line and column where it comes from a file.</summary>
+    internal static Where PlaceOfStress(this FlowCurve curve, FlowPoint point) =>
         (point.Reading?.Where ?? curve.Label.Where) with { Sample = curve.Label.Sample, Loading = curve.Label.Loading, Point = point.Number };
 
     /// <summary>A finding where rate or stress is not above zero and finite; null where both are.</summary>
@@ -30,7 +33,7 @@ internal static class FlowCurveWords
     {
         var (rate, stress) = (point.Rate.ReciprocalSeconds, point.Stress.Pascals);
         if (!IsPositive(rate)) return RheometryFindings.NotPositive.At(curve.PlaceOf(point), Invariant($"Reading {point.Number} has a shear rate of {rate:G6} 1/s; it must be above 0."), rate, 0);
-        if (!IsPositive(stress)) return RheometryFindings.NotPositive.At(curve.PlaceOf(point), Invariant($"Reading {point.Number} has a shear stress of {stress:G6} Pa; it must be above 0."), stress, 0);
+        if (!IsPositive(stress)) return RheometryFindings.NotPositive.At(curve.PlaceOfStress(point), Invariant($"Reading {point.Number} has a shear stress of {stress:G6} Pa; it must be above 0."), stress, 0);
         return null;
     }
 

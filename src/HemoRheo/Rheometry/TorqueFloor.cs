@@ -30,8 +30,10 @@ internal static class TorqueFloor
             }
             else if (torque < floor)
             {
+                // Where both are exported the reading's column is that of the stress.
+                var where = point.Reading is { Torque: not null, Stress: not null } ? curve.PlaceOf(point) : curve.PlaceOfStress(point);
                 yield return RheometryFindings.TorqueBelowFloor.At(
-                    curve.PlaceOf(point), Invariant($"Reading {point.Number} has a torque of {1e6 * torque:G4} uN.m, below the floor of {1e6 * floor:G4} uN.m of '{instrument.Name}'."), torque, floor);
+                    where, Invariant($"Reading {point.Number} has a torque of {1e6 * torque:G4} uN.m, below the floor of {1e6 * floor:G4} uN.m of '{instrument.Name}'."), torque, floor);
             }
         }
 

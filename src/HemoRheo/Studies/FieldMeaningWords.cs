@@ -47,8 +47,8 @@ internal static class FieldMeaningWords
     public static string InWords(this FieldMeaning meaning) => meaning switch
     {
         FieldMeaning.Sample => "pseudonym of the sample, or name of the check",
-        FieldMeaning.Person => "pseudonym of the person, held against the samples table",
-        FieldMeaning.Visit => "number of the visit, held against the samples table",
+        FieldMeaning.Person => "pseudonym of the person; where the samples table has one too, both must agree",
+        FieldMeaning.Visit => "number of the visit; where the samples table has one too, both must agree",
         FieldMeaning.Loading => "number of the loading, from 1; without it every recording is loading 1",
         FieldMeaning.Instrument => "name of the instrument",
         FieldMeaning.Geometry => "name of the geometry",

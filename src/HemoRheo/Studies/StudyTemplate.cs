@@ -19,6 +19,40 @@ people = "people.csv"                     # person,group; leave out where no gro
 # check_table = "checks.csv"              # what check exports do not say: check,fluid,instrument,started_at,geometry
 # allowed_columns = ["collection_name"]   # columns that look like direct identifiers; allowed to stand there, never read
 
+# The three tables have a header row, comma, decimal point, and are UTF-8. Columns stand in any order; the unit stands in the header.
+# A field may be left empty where its column is not required. Identifiers are pseudonyms of letters, digits, - _ and . only.
+#
+# samples.csv, one row a sample, such as
+#   sample,person,visit,drawn_at,hematocrit [L/L],counter,plasma_viscosity [mPa.s],plasma_temperature [°C],plasma_instrument
+#   S-001,P-001,1,2026-03-02T08:00:00+01:00,0.45,centrifuge,1.22,37,R1
+#
+#   sample                      required; as in the exports
+#   person                      required, unless the exports say it
+#   visit                       whole number from 1; left out: as the exports say, or 1
+#   drawn_at                    date, time and offset; left out: nothing is said of the time since the draw
+#   hematocrit [L/L] or [%]     left out: no values at the standard hematocrit
+#   counter                     required with hematocrit: name of one of [[counters]]
+#   plasma_viscosity [mPa.s]    left out: no relative viscosity, and no standard hematocrit by plasma-power
+#   plasma_temperature [°C]     temperature at which it was measured
+#   plasma_instrument           what measured it: one of [[instruments]], whose checks then correct it, or another name
+#   plasma_measured_at          date, time and offset; left out: measured with the blood
+#   fibrinogen [g/L]            may be left out
+#   instrument                  required where the exports do not say it: name of one of [[instruments]]
+#   geometry                    required where the exports give speed and torque and do not say it
+#   started_at                  required where the exports do not say it: date, time and offset
+#
+# people.csv, one row a person, such as
+#   person,group
+#   P-001,A
+#
+#   person                      required; as in the samples table
+#   group                       required: code of one of [[groups]]
+#
+# checks.csv, only where check exports do not say all of it, one row a check
+#   check                       required; what check exports have as sample
+#   fluid                       required where the exports do not say it: name of one of [[fluids]]
+#   instrument, geometry, started_at    as in the samples table
+
 # One section a kind of export. Headers are the exact texts of the export.
 [[layouts]]
 name = "rows"                             # a header row, then one row a reading
@@ -64,6 +98,8 @@ person = { header = "Person" }
 visit = { header = "Visit" }
 loading = { header = "Loading" }
 instrument = { header = "Instrument" }
+geometry = { header = "Geometry" }
+fluid = { header = "Fluid" }              # filled in checks
 started_at = { header = "Start" }
 reading_count = { header = "Readings" }
 

@@ -10,9 +10,13 @@ internal static class TomlTree
     public static TomlTable? Read(string text, StudyFileFaults faults)
     {
         var document = SyntaxParser.Parse(text, "study file", validate: true);
-        foreach (var message in document.Diagnostics.Where(message => message.Kind == DiagnosticMessageKind.Error))
-            faults.Add(message.Span.Start.Line + 1, message.Span.Start.Column + 1, "text that is not TOML", message.Message.Trim().TrimEnd('.'), "correct the line");
-        if (faults.Any) return null;
+        // What a parser says after its first fault is mostly a consequence of it.
+        if (document.Diagnostics.Where(message => message.Kind == DiagnosticMessageKind.Error).MinBy(message => message.Span.Start.Offset) is { } first)
+        {
+            faults.Add(first.Span.Start.Line + 1, first.Span.Start.Column + 1, $"text that is not TOML ({first.Message.Trim().TrimEnd('.')})", "lines of TOML, such as seed = 1 or name = \"a text\"", "correct this line, and look for an open quote or bracket before it");
+            return null;
+        }
+
         var root = new TomlTable(1, 1);
         foreach (var pair in document.KeyValues) Put(root, pair);
         foreach (var section in document.Tables)

@@ -11,6 +11,7 @@ public sealed class CommandLineTests : IDisposable
     {
         var first = await ConsoleRun.Of(folder.Path, "new", "my-study");
         Assert.Equal(0, first.Exit);
+        foreach (var words in new[] { "exports and checks", "samples.csv", "people.csv", "hemorheo my-study" }) Assert.Contains(words, first.Output, StringComparison.Ordinal);
         Assert.Equal(Study.Template(), await File.ReadAllTextAsync(folder["my-study", "study.toml"], TestContext.Current.CancellationToken));
 
         await File.WriteAllTextAsync(folder["my-study", "study.toml"], "mine", TestContext.Current.CancellationToken);

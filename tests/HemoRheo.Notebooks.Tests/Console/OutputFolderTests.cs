@@ -32,7 +32,7 @@ public sealed class OutputFolderTests : IDisposable
         Open().Replace(Writes("second"));
 
         Assert.Equal("second", Open().PreviousRecord());
-        Assert.Equal(["run.json"], Directory.GetFileSystemEntries(Results).Select(Path.GetFileName));
+        Assert.Equal(["run.json", "written-files.txt"], Directory.GetFileSystemEntries(Results).Select(Path.GetFileName).Order(StringComparer.Ordinal));
         Assert.Equal([Results], Directory.GetFileSystemEntries(folder["study"]));
     }
 
@@ -98,6 +98,54 @@ public sealed class OutputFolderTests : IDisposable
 
         Assert.Contains("holds other files", refusal.Message, StringComparison.Ordinal);
         Assert.Equal("years of work", File.ReadAllText(Path.Combine(Results, "thesis.txt")));
+    }
+
+    [Theory]
+    [InlineData("thesis.txt")]
+    [InlineData("tables/my-own.csv")]
+    public void A_file_of_somebody_else_in_finished_results_is_named_and_kept(string name)
+    {
+        Open().Replace(Writes("first"));
+        var file = Path.Combine(Results, name);
+        Directory.CreateDirectory(Path.GetDirectoryName(file)!);
+        File.WriteAllText(file, "years of work");
+
+        var refusal = Assert.Throws<CouldNotRunException>(Open);
+
+        Assert.Contains($"\"{name}\"", refusal.Message, StringComparison.Ordinal);
+        Assert.Contains("Move it elsewhere", refusal.Message, StringComparison.Ordinal);
+        Assert.Equal("years of work", File.ReadAllText(file));
+    }
+
+    [Fact]
+    public void A_file_that_comes_while_a_run_writes_is_kept_too()
+    {
+        Open().Replace(Writes("first"));
+        var file = Path.Combine(Results, "thesis.txt");
+
+        Assert.Throws<CouldNotRunException>(() => Open().Replace(fresh =>
+        {
+            Writes("second")(fresh);
+            File.WriteAllText(file, "years of work");
+        }));
+
+        Assert.Equal("years of work", File.ReadAllText(file));
+        Assert.Equal("first", File.ReadAllText(Path.Combine(Results, "run.json")));
+        Assert.Equal([Results], Directory.GetFileSystemEntries(folder["study"]));
+    }
+
+    [Fact]
+    public void What_a_killed_run_left_goes_with_the_next_good_one_and_what_is_not_ours_stays()
+    {
+        Directory.CreateDirectory(Results + ".tmp-1");
+        File.WriteAllText(Path.Combine(Results + ".tmp-1", "thesis.txt"), "years of work");
+        Directory.CreateDirectory(Results + ".tmp-2");
+        File.WriteAllText(Path.Combine(Results + ".tmp-2", "written-files.txt"), "");
+        File.WriteAllText(Path.Combine(Results + ".tmp-2", "index.html"), "half");
+
+        Open().Replace(Writes("first"));
+
+        Assert.Equal([Results, Results + ".tmp-1"], Directory.GetFileSystemEntries(folder["study"]).Order(StringComparer.Ordinal));
     }
 
     [Theory]

@@ -17,6 +17,16 @@ public sealed partial class PageTests
     }
 
     [Fact]
+    public void Developers_installs_the_packages_that_the_checks_install_and_names_what_skips_say()
+    {
+        static string[] Packages(string text) => [.. Installed().Match(text).Groups["packages"].Value.Split(' ', StringSplitOptions.RemoveEmptyEntries).Where(word => !word.StartsWith('-')).Order(StringComparer.Ordinal)];
+        var checks = Packages(File.ReadAllText(Path.Combine(Repository.Root, ".ci", "run")));
+        Assert.NotEmpty(checks);
+        Assert.Equal(checks, Packages(Developers.Text));
+        foreach (var program in new[] { "Jupyter", "Chromium" }) Assert.Contains($"\"not run: needs {program}, see DEVELOPERS.md\"", Developers.Text, StringComparison.Ordinal);
+    }
+
+    [Fact]
     public void Developers_has_a_heading_for_every_room() => Faults.None(Architecture.Rooms.All.Select(room => room.Name).Where(name => !Developers.Has(name)));
 
     [Fact]
@@ -90,6 +100,9 @@ public sealed partial class PageTests
 
     [GeneratedRegex("<!-- rooms -->\n(?<table>.*?)<!-- end of rooms -->", RegexOptions.Singleline)]
     private static partial Regex Rooms();
+
+    [GeneratedRegex(@"apt-get install (?<packages>[^>\n]+)")]
+    private static partial Regex Installed();
 
     [GeneratedRegex(@"\b[A-Za-z]\w*\b")]
     private static partial Regex Names();

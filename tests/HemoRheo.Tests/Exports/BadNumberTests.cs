@@ -34,7 +34,7 @@ public sealed class BadNumberTests
         var recordings = Blocks(StudyFolder.Block("S-1", [("100", "420.5"), ("10", "62,25")])).Blood;
         Assert.Single(recordings[0].Readings);
         var finding = Assert.Single(recordings[0].Findings);
-        Assert.Equal((ExportFindings.FieldCountDiffers, 8), (finding.Kind, finding.Where.Line));
+        Assert.Equal((ExportFindings.FieldCountDiffers, 8, 6), (finding.Kind, finding.Where.Line, finding.Where.Column));
         Assert.Contains("decimal comma", finding.Kind.UsualCause, StringComparison.Ordinal);
         Assert.True(recordings[0].HasFault);
     }
@@ -115,6 +115,27 @@ public sealed class BadNumberTests
         var finding = Assert.Single(readings.Files[0].Findings, finding => finding.Code == code);
         Assert.Equal(1, finding.Where.Line);
         Assert.Contains(says, finding.Message, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void A_header_with_another_unit_that_stands_without_brackets_refuses_the_file()
+    {
+        using var folder = StudyFolder.Valid().AddSample("S-1", "P-1");
+        folder.Write("study.toml", Study.Template().Replace("torque [µN.m]", "torque µN·m", StringComparison.Ordinal));
+        folder.Write("exports/a.csv", StudyFolder.RowsHeader.Replace("torque [µN.m]", "torque nN·m", StringComparison.Ordinal) + StudyFolder.Row("S-1", "120", "7,5"));
+
+        var finding = Assert.Single(Study.Open(folder.StudyFile).ReadExports().Files[0].Findings);
+
+        Assert.Equal((ExportFindings.HeaderUnitDiffers, 1, TorqueColumn), (finding.Kind, finding.Where.Line, finding.Where.Column));
+    }
+
+    [Theory]
+    [InlineData("S-1;1;R1\n", 4)]
+    [InlineData("S-1;1;R1;CYL-1;;2026-03-02 09:00:00 +01:00;down;37,0;10,0;60;60;4;5\n", 13)]
+    public void A_row_of_another_length_is_told_with_the_column_where_it_begins_to_differ(string row, int column)
+    {
+        var finding = Assert.Single(Rows(StudyFolder.Row("S-1", "120", "7,5") + row).Files[0].Findings);
+        Assert.Equal((ExportFindings.FieldCountDiffers, 3, column), (finding.Kind, finding.Where.Line, finding.Where.Column));
     }
 
     [Fact]

@@ -8,7 +8,8 @@ public sealed class BadTableTests
     {
         var readings = Read(folder => folder.AddSample("S-1", "P-1", hematocrit: ""));
         Assert.Null(Assert.Single(readings.Samples).Hematocrit);
-        Assert.Equal((ExportFindings.SampleWithoutHematocrit, 2, "S-1"), (Assert.Single(readings.Findings).Kind, readings.Findings[0].Where.Line, readings.Findings[0].Where.Sample));
+        Assert.Equal((ExportFindings.SampleWithoutHematocrit, 2, 5, "S-1"), (Assert.Single(readings.Findings).Kind, readings.Findings[0].Where.Line, readings.Findings[0].Where.Column, readings.Findings[0].Where.Sample));
+        Assert.Contains("expected a number in a column such as hematocrit [L/L]", readings.Findings[0].Message, StringComparison.Ordinal);
     }
 
     [Theory]
@@ -93,7 +94,25 @@ public sealed class BadTableTests
     public void Semicolons_in_a_table_are_told()
     {
         var readings = Read(folder => folder.Write("samples.csv", "sample;person\nS-1;P-1\n"));
-        Assert.Contains(readings.Findings, finding => finding.Kind == ExportFindings.TableColumnMissing && finding.Message.Contains("semicolons", StringComparison.Ordinal));
+        Assert.Contains(readings.Findings, finding => finding.Kind == ExportFindings.TableColumnMissing && finding.Where.Column == 1 && finding.Message.Contains("semicolons", StringComparison.Ordinal));
+    }
+
+    [Fact]
+    public void A_missing_column_is_told_with_the_column_of_the_nearest_header()
+    {
+        var readings = Read(folder => folder.Write("samples.csv", "person,smaple\nP-1,S-1\n"));
+        var finding = Assert.Single(readings.Findings, finding => finding.Kind == ExportFindings.TableColumnMissing);
+        Assert.Equal((1, 2), (finding.Where.Line, finding.Where.Column));
+        Assert.Contains("expected it in the header row; the nearest header is \"smaple\"", finding.Message, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void A_sample_without_person_in_table_and_exports_is_told_with_its_column()
+    {
+        var readings = Read(folder => folder.AddSample("S-1", ""));
+        var finding = Assert.Single(readings.Findings, finding => finding.Kind == ExportFindings.IdentifierMissing && finding.Where.File == "samples.csv");
+        Assert.Equal(("samples.csv", 2, 2), (finding.Where.File, finding.Where.Line, finding.Where.Column));
+        Assert.Contains("expected a pseudonym", finding.Message, StringComparison.Ordinal);
     }
 
     [Theory]

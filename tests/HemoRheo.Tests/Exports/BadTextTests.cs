@@ -35,7 +35,7 @@ public sealed class BadTextTests
         var finding = Only([.. Encoding.Unicode.GetPreamble(), .. Encoding.Unicode.GetBytes(Good)]);
         Assert.Equal((ExportFindings.EncodingMarkDiffers, 1, 1), (finding.Kind, finding.Where.Line, finding.Where.Column));
         Assert.Contains("utf-16", finding.Message, StringComparison.Ordinal);
-        Assert.Contains("utf-8", finding.Message, StringComparison.Ordinal);
+        Assert.Contains("expected none or that of the declared encoding utf-8", finding.Message, StringComparison.Ordinal);
     }
 
     [Fact]
@@ -63,6 +63,7 @@ public sealed class BadTextTests
     {
         var finding = Only([.. Encoding.UTF8.GetBytes(StudyFolder.RowsHeader), .. "S-"u8, 0xB5, .. ";1\n"u8]);
         Assert.Equal((ExportFindings.BytesNotText, 2, 3), (finding.Kind, finding.Where.Line, finding.Where.Column));
+        Assert.Contains("expected text in that encoding", finding.Message, StringComparison.Ordinal);
     }
 
     [Fact]
@@ -94,6 +95,7 @@ public sealed class BadTextTests
         var finding = Assert.Single(study.ReadExports().Files[0].Findings);
 
         Assert.Equal((ExportFindings.LineTooLong, 1, 1), (finding.Kind, finding.Where.Line, finding.Where.Column));
+        Assert.Contains("expected lines", finding.Message, StringComparison.Ordinal);
         Assert.InRange(GC.GetAllocatedBytesForCurrentThread() - before, 0, 4_000_000);
         Assert.InRange(watch.Elapsed.TotalSeconds, 0, 20);
     }

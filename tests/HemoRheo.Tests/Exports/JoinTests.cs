@@ -119,6 +119,61 @@ public sealed class JoinTests
         Assert.DoesNotContain("P-2", string.Concat(readings.Findings), StringComparison.Ordinal);
     }
 
+    [Theory]
+    [InlineData("sample,hematocrit [L/L],counter\nS-1,0.45,centrifuge\n", 2)]
+    [InlineData("sample,person,visit,hematocrit [L/L],counter\nS-1,,,0.45,centrifuge\n", 2)]
+    [InlineData("sample,person,visit,hematocrit [L/L],counter\nS-1,P-2,2,0.45,centrifuge\n", 2)]
+    public void Person_and_visit_may_come_from_the_export_alone(string samples, int visit)
+    {
+        var readings = ReadBlock("Person: P-2\nVisit: 2\n", samples);
+        Assert.Empty(readings.Findings);
+        Assert.False(readings.Blood[0].HasFault);
+        Assert.Equal(("P-2", visit), (Assert.Single(readings.Samples).Person, readings.Samples[0].Visit));
+    }
+
+    [Fact]
+    public void Exports_of_one_sample_that_name_two_persons_are_marked_and_the_row_set_aside()
+    {
+        var second = StudyFolder.Block("S-1", [("100", "420.5")], loading: 2).Replace("Loading:", "Person: P-3\nLoading:", StringComparison.Ordinal);
+        var readings = ReadBlock("Person: P-2\n", "sample,hematocrit [L/L],counter\nS-1,0.45,centrifuge\n", second);
+        Assert.Empty(readings.Samples);
+        Assert.All(readings.Blood, recording => Assert.True(recording.HasFault));
+        Assert.Equal(2, readings.Findings.Count(finding => finding.Kind == ExportFindings.MetadataDiffers));
+        Assert.DoesNotContain("P-3", string.Concat(readings.Findings), StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void A_samples_table_needs_the_column_of_persons_where_no_layout_has_one()
+    {
+        var readings = Read(folder => folder
+            .Write("study.toml", Study.Template().Replace("person = { header = \"Person\" }\n", "", StringComparison.Ordinal))
+            .Write("samples.csv", "sample,hematocrit [L/L],counter\nS-1,0.45,centrifuge\n"));
+        Assert.Contains(readings.Findings, finding => finding.Kind == ExportFindings.TableColumnMissing && finding.Message.Contains("person", StringComparison.Ordinal));
+    }
+
+    [Fact]
+    public void A_folder_without_exports_is_told_by_its_name()
+    {
+        var finding = Assert.Single(Read(folder => File.Delete(folder.PathOf("exports/a.csv"))).Findings, finding => finding.Kind == ExportFindings.NoExports);
+        Assert.Equal("exports", finding.Where.File);
+    }
+
+    [Fact]
+    public void A_pipe_among_the_exports_is_told_and_never_waited_for()
+    {
+        Assert.SkipWhen(OperatingSystem.IsWindows(), "not run: needs named pipes in folders, which Windows has not");
+        var readings = Read(folder =>
+        {
+            using var made = System.Diagnostics.Process.Start("mkfifo", folder.PathOf("exports/b.csv"));
+            made.WaitForExit();
+            Assert.Equal(0, made.ExitCode);
+        });
+        Assert.Single(readings.Blood);
+        var finding = Assert.Single(readings.Findings);
+        Assert.Equal((ExportFindings.FileNotReadable, "exports/b.csv"), (finding.Kind, finding.Where.File));
+        Assert.Contains("expected a file", finding.Message, StringComparison.Ordinal);
+    }
+
     [Fact]
     public void The_check_table_says_what_check_exports_do_not()
     {
@@ -155,6 +210,14 @@ public sealed class JoinTests
         var study = Study.Open(folder.StudyFile);
         Assert.Equal(study.ReadExports(), Study.Open(folder.StudyFile).ReadExports());
     }
+
+    private static StudyReadings ReadBlock(string keys, string samples, string more = "") => Read(folder =>
+    {
+        File.Delete(folder.PathOf("exports/a.csv"));
+        folder.Write("exports/b.txt", StudyFolder.Block("S-1", [("100", "420.5")]).Replace("Loading:", keys + "Loading:", StringComparison.Ordinal) + more)
+            .Write("samples.csv", samples)
+            .Write("people.csv", "person,group\nP-2,A\n");
+    });
 
     private static StudyReadings Read(Action<StudyFolder> change)
     {

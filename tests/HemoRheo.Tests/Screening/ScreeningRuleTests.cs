@@ -26,6 +26,30 @@ public class ScreeningRuleTests
     public void Torque_below_the_floor_is_found_from_stress_and_geometry_too(double torque, bool trips) =>
         Trips("torque-below-floor", trips, TestStudy.Reading(1, 1, torque * TestStudy.Cylinders.StressPerTorque()));
 
+    [Theory]
+    [InlineData("0", "420.5", null)]
+    [InlineData("10", "0", 5)]
+    public void A_reading_that_is_not_above_zero_is_told_at_its_line_and_at_no_column_of_another_field(string rate, string stress, int? column)
+    {
+        using var folder = StudyFolder.Valid().AddSample("S-1", "P-1");
+        folder.Write("exports/b.txt", StudyFolder.Block("S-1", [("100", "420.5"), (rate, stress)]));
+        var study = Study.Open(folder.StudyFile);
+        var curve = study.ReadExports().Blood[0].ToCurve(study, Ramp.Down).Screened(study, null);
+        var finding = Assert.Single(Assert.Single(curve.SetAside).Findings, finding => finding.Kind == RheometryFindings.NotPositive);
+        Assert.Equal(("exports/b.txt", 8, column), (finding.Where.File, finding.Where.Line, finding.Where.Column));
+    }
+
+    [Fact]
+    public void A_temperature_that_is_off_is_told_at_no_column_of_another_field()
+    {
+        using var folder = StudyFolder.Valid().AddSample("S-1", "P-1");
+        folder.Write("exports/a.csv", StudyFolder.RowsHeader + StudyFolder.Row("S-1", "120", "7,5") + StudyFolder.Row("S-1", "60", "4,25", temperature: "39,0"));
+        var study = Study.Open(folder.StudyFile);
+        var curve = study.ReadExports().Blood[0].ToCurve(study, Ramp.Down).Screened(study, null);
+        var where = Assert.Single(Assert.Single(curve.SetAside).Findings).Where;
+        Assert.Equal(("exports/a.csv", 3, null), (where.File, where.Line, where.Column));
+    }
+
     [Fact]
     public void An_undeclared_torque_floor_is_a_note_on_the_curve()
     {

@@ -42,6 +42,9 @@ public sealed class StudyFileFaultTests
     [InlineData("samples = \"samples.csv\"", "samples = ¦\"sam\\u0000ples.csv\"", "zero character", "correct the path")]
     [InlineData("time_format = \"yyyy-MM-dd HH:mm:ss zzz\"", "time_format = ¦\"yyyy-MM-dd HH:mm:ss\"", "a time format without offset", "the hour when clocks go back happens twice")]
     [InlineData("speed = { header = \"speed [rpm]\", unit = \"rpm\" }", "speed = { header = \"speed [rpm]\", unit = ¦\"rad/s\" }", "the unit \"rad/s\" for a header that says \"rpm\"", "correct header or unit")]
+    [InlineData("header = \"torque [µN.m]\", unit = \"µN.m\"", "header = \"Torque µN·m\", unit = ¦\"nN.m\"", "the unit \"nN.m\" for a header that says \"µN·m\"", "correct header or unit")]
+    [InlineData("header = \"torque [µN.m]\", unit = \"µN.m\"", "header = \"Torque mN m\", unit = ¦\"µN.m\"", "the unit \"µN.m\" for a header that says \"mN m\"", "correct header or unit")]
+    [InlineData("header = \"temperature [°C]\", unit = \"°C\"", "header = \"Temp K\", unit = ¦\"°C\"", "the unit \"°C\" for a header that says \"K\"", "correct header or unit")]
     [InlineData("speed = { header = \"speed [rpm]\", unit = \"rpm\" }", "speed = { header = \"speed [rpm]\", unit = ¦\"RPM\" }", "the unknown unit \"RPM\"", "did you mean \"rpm\"?")]
     [InlineData("speed = { header = \"speed [rpm]\", unit = \"rpm\" }", "speed = ¦{ header = \"speed [rpm]\" }", "no unit for speed", "write the unit")]
     [InlineData("speed = { header = \"speed [rpm]\", unit = \"rpm\" }", "speed = ¦\"speed [rpm]\"", "the text \"speed [rpm]\"", "header and unit in braces")]
@@ -81,11 +84,35 @@ public sealed class StudyFileFaultTests
         Assert.Equal(faults.OrderBy(fault => fault.Line), faults);
     }
 
+    [Theory]
+    [InlineData("Torque µN·m")]
+    [InlineData("Torque µN m")]
+    [InlineData("Torque")]
+    [InlineData("Torque 1")]
+    [InlineData("Torque m")]
+    [InlineData("µN.m")]
+    public void A_header_that_says_the_declared_unit_without_brackets_or_none_is_taken(string header)
+    {
+        using var folder = StudyFolder.Valid();
+        folder.Write("study.toml", ReplaceFirst(Study.Template(), "torque [µN.m]", header));
+        Assert.Contains(Study.Open(folder.StudyFile).Layouts[0].Fields, field => field.Header == header);
+    }
+
     [Fact]
     public void Text_that_is_not_TOML_is_told_with_its_place()
     {
         var fault = Assert.Single(Thrown(Study.Template().Replace("seed = 1 ", "seed = = ", StringComparison.Ordinal)).Faults);
         Assert.Equal(6, fault.Line);
+    }
+
+    [Fact]
+    public void One_open_quote_is_one_fault_with_what_the_parser_says_of_it()
+    {
+        var fault = Assert.Single(Thrown(Study.Template().Replace("name = \"My study\"", "name = \"My study", StringComparison.Ordinal)).Faults);
+        Assert.Equal(5, fault.Line);
+        Assert.Matches(@"^text that is not TOML \(.+\)$", fault.Found);
+        Assert.DoesNotContain("nvalid", fault.Expected, StringComparison.Ordinal);
+        Assert.Contains("open quote", fault.WhatToDo, StringComparison.Ordinal);
     }
 
     [Fact]

@@ -21,6 +21,34 @@ public sealed class StudyTemplateTests
     }
 
     [Fact]
+    public void Lists_every_column_of_every_table_with_its_unit()
+    {
+        using var folder = StudyFolder.Valid();
+        var columns = SamplesTable.Columns(Study.Open(folder.StudyFile)).Concat(PeopleTable.Columns).Concat(CheckTable.Columns);
+        foreach (var column in columns)
+        {
+            var unit = column.Quantity is { } quantity ? $@" \[({string.Join('|', UnitTable.SpellingsOf(quantity).Select(System.Text.RegularExpressions.Regex.Escape))})\]" : "";
+            Assert.Matches($@"(?m)^#   ([a-z_]+, )*{column.Name}{unit}[ ,]", Study.Template());
+        }
+    }
+
+    [Fact]
+    public void Tables_and_exports_made_as_its_comments_say_are_read_without_a_finding()
+    {
+        using var folder = StudyFolder.Empty();
+        var lines = Study.Template().Split('\n').Select(line => line.StartsWith("#   ", StringComparison.Ordinal) ? line[4..] : line).ToArray();
+        string Example(string header) => string.Concat(lines.SkipWhile(line => !line.StartsWith(header, StringComparison.Ordinal)).Take(2).Select(line => line + "\n"));
+        const string check = "Sample: C-1\nInstrument: R1\nGeometry: CYL-1\nFluid: oil-5\nStart: 2026-03-02T07:00:00+01:00\nReadings: 1\n" + StudyFolder.BlockHeader + "down,37.0,100,100,485\n";
+        folder.Write("study.toml", Study.Template()).Write("samples.csv", Example("sample,person,")).Write("people.csv", Example("person,group"))
+            .Write("exports/a.csv", StudyFolder.RowsHeader + StudyFolder.Row("S-001", "120", "7,5")).Write("checks/c.txt", check);
+
+        var readings = Study.Open(folder.StudyFile).ReadExports();
+
+        Assert.Empty(readings.Findings);
+        Assert.Equal(("P-001", 1, 1, 1), (Assert.Single(readings.Samples).Person, readings.People.Count, readings.Blood.Count, readings.Checks.Count));
+    }
+
+    [Fact]
     public void Tells_which_files_are_missing_before_they_are_there()
     {
         using var folder = StudyFolder.Empty();
