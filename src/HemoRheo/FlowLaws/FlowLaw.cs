@@ -50,6 +50,33 @@ public abstract record FlowLaw(string Name, Citation Source, Items<LawParameter>
             ?? throw new ArgumentException($"There is no flow law named '{name}'; the laws are {string.Join(", ", All.Select(law => law.Name))}.", nameof(name));
     }
 
+    /// <summary>A user's own law, its formula on a struct. Everything works on it as on a built-in law, exact slopes included.</summary>
+    /// <typeparam name="TFormula">A readonly struct with the formula; what it needs beside rate and parameters goes into its constructor.</typeparam>
+    /// <param name="name">Its name.</param>
+    /// <param name="formula">The formula.</param>
+    /// <param name="parameters">One to five parameters, each with a <see cref="LawParameter.Start"/>, in the order of <c>p[0]</c>, <c>p[1]</c>...</param>
+    /// <remarks>
+    /// In a notebook cell, which is compiled without optimization, a law of one's own is 5 to 8 times slower than a built-in one. What the compiler says, and what helps:
+    /// <list type="table">
+    /// <item><term>CS0120</term><description>the struct uses a variable of the cell: hand it to the struct's constructor, or write a lambda.</description></item>
+    /// <item><term>CS0453</term><description>a class instead of a struct.</description></item>
+    /// <item><term>CS0425</term><description>the constraint <c>where T : struct, ILawNumber&lt;T&gt;</c> is missing.</description></item>
+    /// <item><term>CS1503</term><description><c>Math.Sqrt(rate)</c>: write <c>T.Sqrt(rate)</c>.</description></item>
+    /// <item><term>CS0019</term><description>a comparison: a formula has no branches.</description></item>
+    /// <item><term>CS0029</term><description><c>return 0</c>: write <c>0 * rate</c>.</description></item>
+    /// </list>
+    /// </remarks>
+    /// <exception cref="ArgumentException">The formula, tried once at the starts, reads too many parameters, ignores one, throws, or gives no finite stress; or a parameter has no start.</exception>
+    public static FlowLaw<NamedValues> Custom<TFormula>(string name, TFormula formula, params LawParameter[] parameters) where TFormula : struct, IFormula =>
+        LawProbe.Checked(name, formula.Stress, parameters);
+
+    /// <summary>A user's own law as a lambda: <c>FlowLaw.Custom("mine", (rate, p) => p[0] * LaneDual.Pow(rate, p[1]), ...)</c>. It may use variables of the cell.</summary>
+    /// <param name="name">Its name.</param>
+    /// <param name="function">The formula; functions are those of <see cref="LaneDual"/>.</param>
+    /// <param name="parameters">One to five parameters, each with a <see cref="LawParameter.Start"/>.</param>
+    /// <exception cref="ArgumentException">As for the form with a struct.</exception>
+    public static FlowLaw<NamedValues> Custom(string name, LawFunction function, params LawParameter[] parameters) => LawProbe.Checked(name, function, parameters);
+
     /// <summary>Shear stress at a shear rate.</summary>
     /// <param name="rate">Shear rate, not below zero.</param>
     /// <param name="parameters">Parameters on their natural scale, SI, in the order of <see cref="Parameters"/>.</param>

@@ -6,7 +6,8 @@ namespace HemoRheo;
 /// <param name="Unit">Its unit inside, e.g. <c>Pa</c>.</param>
 /// <param name="Lower">Lower bound; finite, with no upper bound, means fitted on the log scale of the distance from it.</param>
 /// <param name="Upper">Upper bound; positive infinity where there is none. Both bounds finite means fitted on the logit scale.</param>
-public sealed record LawParameter(string Name, string Symbol, string Unit, double Lower = 0, double Upper = double.PositiveInfinity)
+/// <param name="Start">Where a fit of a user's own law starts; null for a built-in law, which guesses from the curve.</param>
+public sealed record LawParameter(string Name, string Symbol, string Unit, double Lower = 0, double Upper = double.PositiveInfinity, double? Start = null)
 {
     /// <summary>From the fitting scale to the natural one.</summary>
     internal double ToNatural(double scaled) => ToNatural(new Lane(scaled))[0];

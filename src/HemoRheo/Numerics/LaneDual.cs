@@ -3,19 +3,19 @@ using System.Runtime.CompilerServices;
 namespace HemoRheo;
 
 /// <summary>Four numbers side by side, each with its slopes with respect to five parameters. Values have the bits of <see cref="Lane"/>. Plain fields, since an inline array is ten times slower.</summary>
-internal struct LaneDual : ILawNumber<LaneDual>
+public readonly struct LaneDual : ILawNumber<LaneDual>
 {
-    public const int Slopes = 5;
+    internal const int Slopes = 5;
 
-    public Lane Value;
-    public Lane S0;
-    public Lane S1;
-    public Lane S2;
-    public Lane S3;
-    public Lane S4;
+    internal readonly Lane Value;
+    internal readonly Lane S0;
+    internal readonly Lane S1;
+    internal readonly Lane S2;
+    internal readonly Lane S3;
+    internal readonly Lane S4;
 
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
-    public LaneDual(Lane value) => Value = value;
+    internal LaneDual(Lane value) => Value = value;
 
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
     private LaneDual(Lane value, Lane s0, Lane s1, Lane s2, Lane s3, Lane s4)
@@ -32,7 +32,7 @@ internal struct LaneDual : ILawNumber<LaneDual>
     /// <param name="value">Its value.</param>
     /// <param name="parameter">Which of the five slopes is its own; any other number for none.</param>
     /// <param name="slope">That slope.</param>
-    public static LaneDual Seed(Lane value, int parameter, Lane slope) => new(
+    internal static LaneDual Seed(Lane value, int parameter, Lane slope) => new(
         value,
         parameter == 0 ? slope : default,
         parameter == 1 ? slope : default,
@@ -40,29 +40,37 @@ internal struct LaneDual : ILawNumber<LaneDual>
         parameter == 3 ? slope : default,
         parameter == 4 ? slope : default);
 
-    public readonly Lane Slope(int parameter) => parameter switch { 0 => S0, 1 => S1, 2 => S2, 3 => S3, _ => S4 };
+    internal Lane Slope(int parameter) => parameter switch { 0 => S0, 1 => S1, 2 => S2, 3 => S3, _ => S4 };
 
+    /// <inheritdoc/>
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public static LaneDual operator +(LaneDual x, LaneDual y) => new(x.Value + y.Value, x.S0 + y.S0, x.S1 + y.S1, x.S2 + y.S2, x.S3 + y.S3, x.S4 + y.S4);
 
+    /// <inheritdoc/>
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public static LaneDual operator +(LaneDual x, double y) => new(x.Value + y, x.S0, x.S1, x.S2, x.S3, x.S4);
 
+    /// <inheritdoc/>
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public static LaneDual operator +(double x, LaneDual y) => new(x + y.Value, y.S0, y.S1, y.S2, y.S3, y.S4);
 
+    /// <inheritdoc/>
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public static LaneDual operator -(LaneDual x, LaneDual y) => new(x.Value - y.Value, x.S0 - y.S0, x.S1 - y.S1, x.S2 - y.S2, x.S3 - y.S3, x.S4 - y.S4);
 
+    /// <inheritdoc/>
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public static LaneDual operator -(LaneDual x, double y) => new(x.Value - y, x.S0, x.S1, x.S2, x.S3, x.S4);
 
+    /// <inheritdoc/>
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public static LaneDual operator -(double x, LaneDual y) => new(x - y.Value, -y.S0, -y.S1, -y.S2, -y.S3, -y.S4);
 
+    /// <inheritdoc/>
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public static LaneDual operator -(LaneDual x) => new(-x.Value, -x.S0, -x.S1, -x.S2, -x.S3, -x.S4);
 
+    /// <inheritdoc/>
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public static LaneDual operator *(LaneDual x, LaneDual y) => new(
         x.Value * y.Value,
@@ -72,12 +80,15 @@ internal struct LaneDual : ILawNumber<LaneDual>
         x.S3 * y.Value + x.Value * y.S3,
         x.S4 * y.Value + x.Value * y.S4);
 
+    /// <inheritdoc/>
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public static LaneDual operator *(LaneDual x, double y) => x.Chain(x.Value * y, new(y));
 
+    /// <inheritdoc/>
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public static LaneDual operator *(double x, LaneDual y) => y.Chain(x * y.Value, new(x));
 
+    /// <inheritdoc/>
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public static LaneDual operator /(LaneDual x, LaneDual y)
     {
@@ -92,9 +103,11 @@ internal struct LaneDual : ILawNumber<LaneDual>
             (x.S4 - quotient * y.S4) * inverse);
     }
 
+    /// <inheritdoc/>
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public static LaneDual operator /(LaneDual x, double y) => x.Chain(x.Value / y, new(1 / y));
 
+    /// <inheritdoc/>
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public static LaneDual operator /(double x, LaneDual y)
     {
@@ -110,9 +123,11 @@ internal struct LaneDual : ILawNumber<LaneDual>
         return x.Chain(root, (0.5 / root) & (root > Lane.Zero));
     }
 
+    /// <inheritdoc/>
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public static LaneDual Square(LaneDual x) => x.Chain(Lane.Square(x.Value), x.Value + x.Value);
 
+    /// <inheritdoc/>
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public static LaneDual Exp(LaneDual x)
     {
@@ -120,6 +135,7 @@ internal struct LaneDual : ILawNumber<LaneDual>
         return x.Chain(exp, exp);
     }
 
+    /// <inheritdoc/>
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public static LaneDual Log(LaneDual x) => x.Chain(Lane.Log(x.Value), 1 / x.Value);
 
@@ -140,13 +156,16 @@ internal struct LaneDual : ILawNumber<LaneDual>
             x.S4 * byX + y.S4 * byY);
     }
 
+    /// <inheritdoc/>
     public static LaneDual Sin(LaneDual x) => x.Chain(Lane.Sin(x.Value), Lane.Cos(x.Value));
 
+    /// <inheritdoc/>
     public static LaneDual Cos(LaneDual x) => x.Chain(Lane.Cos(x.Value), -Lane.Sin(x.Value));
 
+    /// <inheritdoc/>
     public static LaneDual Atan(LaneDual x) => x.Chain(Lane.Atan(x.Value), 1 / (1 + Lane.Square(x.Value)));
 
     /// <summary>A function of this number alone: its value and its derivative.</summary>
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
-    private readonly LaneDual Chain(Lane value, Lane derivative) => new(value, S0 * derivative, S1 * derivative, S2 * derivative, S3 * derivative, S4 * derivative);
+    private LaneDual Chain(Lane value, Lane derivative) => new(value, S0 * derivative, S1 * derivative, S2 * derivative, S3 * derivative, S4 * derivative);
 }
