@@ -117,7 +117,7 @@ torque_zero = "0.005 µN.m"                # standard uncertainty of the day's t
 thermometer = "0.1 K"                     # standard uncertainty
 check_every = "8 d"                       # how long a passed check vouches for the instrument
 check_limit = "3 %"                       # largest error a check may show
-# check_scatter = "1 %"                   # scatter of one check, used while there are too few to estimate it
+# check_scatter = "1 %"                   # scatter of one check; declare it while a period has one check only: without it no value is corrected
 # adjusted = [2026-03-02T09:00:00+01:00]  # adjusted or repaired: each starts a new period
 
 [[geometries]]                            # concentric cylinders, the inner one driven

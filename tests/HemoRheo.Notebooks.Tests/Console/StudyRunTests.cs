@@ -10,7 +10,7 @@ public sealed class StudyRunTests(StudyRunTests.CohortOnDisk cohort) : IClassFix
     {
         Assert.Equal("", cohort.First.Error);
         Assert.Equal(0, cohort.First.Exit);
-        foreach (var words in new[] { "1 failed (C-4 of 2025-03-31)", "16 in doubt", "16 measured after a failed check", "file-cut", "too-long-since-draw", "first run here", "Start page: " + cohort.Results("index.html"), "research use only" })
+        foreach (var words in new[] { "1 failed (C-4 of 2025-03-31)", "16 in doubt", "16 measured after a failed check", "file-cut", "what to do: Export or copy the file again.", "too-long-since-draw", "first run here", "Start page: " + cohort.Results("index.html"), "research use only" })
         {
             Assert.Contains(words, cohort.First.Output, StringComparison.Ordinal);
         }
@@ -87,6 +87,20 @@ public sealed class StudyRunTests(StudyRunTests.CohortOnDisk cohort) : IClassFix
 
         Assert.Equal(0, run.Exit);
         Assert.Contains("not compared", run.Output, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public async Task Without_any_check_it_says_that_there_is_none()
+    {
+        await ConsoleRun.Of(cohort.Folder, "synthesize", "unchecked");
+        Directory.Delete(Path.Combine(cohort.Folder, "unchecked", "checks"), recursive: true);
+        Directory.CreateDirectory(Path.Combine(cohort.Folder, "unchecked", "checks"));
+
+        var run = await ConsoleRun.Of(cohort.Folder, "unchecked");
+
+        Assert.Contains("instrument rheometer-1: no check, so nothing vouches for it", run.Output, StringComparison.Ordinal);
+        Assert.Contains("84 that no check vouches for: there is no check", run.Output, StringComparison.Ordinal);
+        Assert.DoesNotContain("before any check", run.Output, StringComparison.Ordinal);
     }
 
     [Fact]
