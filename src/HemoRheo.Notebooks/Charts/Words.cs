@@ -3,20 +3,9 @@ namespace HemoRheo.Notebooks;
 /// <summary>Plain words for what pages, tables and pictures name.</summary>
 internal static class Words
 {
-    public static string Of(InstrumentStatus status) => status switch
-    {
-        InstrumentStatus.InOrder => "in order",
-        InstrumentStatus.InDoubt => "in doubt",
-        InstrumentStatus.Failed => "failed",
-        _ => "unknown",
-    };
+    public static string Of(InstrumentStatus status) => status.Words();
 
-    public static string Of(CheckOutcome outcome) => outcome switch
-    {
-        CheckOutcome.Passes => "passes",
-        CheckOutcome.Fails => "fails",
-        _ => "cannot tell",
-    };
+    public static string Of(CheckOutcome outcome) => outcome.Words();
 
     public static string Of(Outcome outcome) => outcome.Words();
 
@@ -36,12 +25,7 @@ internal static class Words
         _ => "note",
     };
 
-    public static string Of(Ramp ramp) => ramp switch
-    {
-        Ramp.Down => "downward",
-        Ramp.Up => "upward",
-        _ => "unstated",
-    };
+    public static string Of(Ramp ramp) => ramp.Words();
 
     public static string Of(StopReason reason) => reason switch
     {

@@ -3,7 +3,7 @@ using HemoRheo.Notebooks;
 
 namespace HemoRheo;
 
-/// <summary>Results as frames: the same columns as the tables that are written beside the pages, one row a value, a contribution, a point, a fit or a check.</summary>
+/// <summary>Results as frames: the columns of the tables that are written beside the pages, without the caution that each row carries there; one row a value, a contribution, a point, a fit or a check.</summary>
 public static class ResultFrames
 {
     /// <summary>Every value of every sample, with its interval, its budget by kind of source and its verdict.</summary>

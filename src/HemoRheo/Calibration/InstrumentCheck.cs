@@ -33,5 +33,5 @@ public sealed record InstrumentCheck(
     public DateOnly Day => DateOnly.FromDateTime(At.DateTime);
 
     /// <inheritdoc/>
-    public override string ToString() => FormattableString.Invariant($"check {Name} of {Instrument}, {Day:yyyy-MM-dd}: {100 * (Math.Exp(Error.X) - 1):+0.00;-0.00} %, {Outcome}");
+    public override string ToString() => FormattableString.Invariant($"check {Name} of {Instrument}, {Day:yyyy-MM-dd}: {100 * (Math.Exp(Error.X) - 1):+0.00;-0.00} %, {Outcome.Words()}");
 }

@@ -8,5 +8,5 @@ namespace HemoRheo;
 public sealed record InstrumentStanding(InstrumentStatus Status, string Reason, InstrumentPeriod? Period, Items<Finding> Findings)
 {
     /// <inheritdoc/>
-    public override string ToString() => $"{Status}: {Reason}";
+    public override string ToString() => $"{Status.Words()}: {Reason}";
 }

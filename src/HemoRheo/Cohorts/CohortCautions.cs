@@ -23,7 +23,7 @@ internal static class CohortCautions
             cautions.Add(string.Create(CultureInfo.InvariantCulture, $"Many comparisons: {tests} differences are shown. Where there is none at all, {Risk * tests:0.#} of them are expected to have p below {Risk} by chance."));
         }
 
-        var smallest = measurands.SelectMany(measurand => new[] { measurand.First.Used, measurand.Second.Used }).DefaultIfEmpty(SmallGroup).Min();
+        var smallest = measurands.SelectMany(measurand => new[] { measurand.First, measurand.Second }).Where(group => group.Mean is not null).Select(group => group.Used).DefaultIfEmpty(SmallGroup).Min();
         if (smallest < SmallGroup) cautions.Add($"Small groups: the smallest has {smallest} people. Its scatter is poorly known, and one person can move its mean.");
         return cautions.ToItems();
     }

@@ -30,7 +30,7 @@ internal static class GroupComparison
         var b = GroupValues.Of(analyzed, question, person => person.GroupCode == second.Code);
         var (firstSummary, secondSummary) = (GroupMaking.Of(first, question, a), GroupMaking.Of(second, question, b));
         findings.AddRange(new[] { firstSummary, secondSummary }
-            .Where(group => group.Mean is null)
+            .Where(group => group.Mean is null && (group.Used > 0 || !question.IsContradicted(analyzed)))
             .Select(group => CohortFindings.GroupTooSmall.At(Where.Nowhere, $"{question.Measurand.Name}, {question.Basis.Words()}: {group.WhyNoMean}", group.Used, 2)));
         var total = GroupDifferences.Total(firstSummary, secondSummary);
         GroupDifference? adjusted = null;

@@ -7,17 +7,22 @@ internal static class GroupMaking
     internal static GroupSummary Of(Group group, Question question, GroupValues values)
     {
         var used = values.People.Count;
-        if (used < 2) return new(group.Label, values.Samples, used, values.SetAside, values.Marked, null, null, WhyNoMean(group, values));
+        var counted = new GroupSummary(
+            group.Label, values.Samples, used, values.SetAside, values.Marked, null, null,
+            People: used + values.PeopleLeftOut.Sum(reason => reason.Count), SamplesUsed: values.SamplesUsed, PeopleLeftOut: values.PeopleLeftOut);
+        if (used < 2) return counted with { WhyNoMean = WhyNoMean(group, values) };
         var mean = Value.Mean(values.People.Select(person => person.Value).ToItems());
         var deviation = Math.Sqrt(values.People.Sum(person => Square(person.Value.X - mean.X)) / (used - 1));
         var scatter = new Contribution(new(SourceKind.People, group.Label), deviation / Math.Sqrt(used), $"people of {group.Label}, {question.Name}", used - 1);
-        return new(group.Label, values.Samples, used, values.SetAside, values.Marked, mean.Only(source => source.Shared).With(scatter), deviation);
+        return counted with { Mean = mean.Only(source => source.Shared).With(scatter), StandardDeviation = deviation };
     }
 
-    private static string WhyNoMean(Group group, GroupValues values)
+    /// <summary>Why a group with fewer than two people that can be used has no mean, the reasons counted.</summary>
+    internal static string WhyNoMean(Group group, GroupValues values)
     {
         var left = string.Join(", ", values.PeopleLeftOut.Select(reason => $"{reason.Count} {reason.Code}"));
-        return $"{group.Label}: a mean needs two people, {values.People.Count} can be used{(left.Length == 0 ? "" : $" (left out: {left})")}.";
+        var can = values.People.Count == 0 ? "nobody can be used" : "a mean needs two people, 1 can be used";
+        return $"{group.Label}: {can}{(left.Length == 0 ? "" : $" (people left out: {left})")}.";
     }
 
     private static double Square(double x) => x * x;

@@ -9,6 +9,9 @@ namespace HemoRheo;
 /// <param name="Mean">Mean of the people's values on the working scale, shared parts kept; the scatter among people is its part "people". Null with fewer than two people.</param>
 /// <param name="StandardDeviation">Standard deviation among people on the working scale; null with fewer than two people.</param>
 /// <param name="WhyNoMean">Why there is no mean; null where there is one.</param>
+/// <param name="People">People of the group in the people table: the counted ones and those left out.</param>
+/// <param name="SamplesUsed">Samples used; several of one person are averaged and count as one person. With the set aside and the marked ones these are all samples measured.</param>
+/// <param name="PeopleLeftOut">People without a sample that can be used, by the code of their first sample's reason; null is none.</param>
 public sealed record GroupSummary(
     string Label,
     int Samples,
@@ -17,4 +20,7 @@ public sealed record GroupSummary(
     int Marked,
     Value? Mean,
     double? StandardDeviation,
-    string? WhyNoMean = null);
+    string? WhyNoMean = null,
+    int People = 0,
+    int SamplesUsed = 0,
+    Items<CountedReason>? PeopleLeftOut = null);

@@ -10,6 +10,8 @@ internal static class HematocritAdjustment
 
     internal static (GroupDifference Difference, Items<Finding> Findings) Of(Study study, Question question, (Group Group, GroupValues Values) first, (Group Group, GroupValues Values) second)
     {
+        var nobody = new[] { first, second }.Where(group => group.Values.People.Count == 0).Select(group => GroupMaking.WhyNoMean(group.Group, group.Values)).ToArray();
+        if (nobody.Length > 0) return (NotHad(string.Join(" ", nobody)), []);
         var a = HematocritOfPeople.Of(study, question, first.Values);
         var b = HematocritOfPeople.Of(study, question, second.Values);
         var name = $"{question.Measurand.Name}, {second.Group.Label} beside {first.Group.Label}";
@@ -52,7 +54,9 @@ internal static class HematocritAdjustment
             : [];
 
     private static (GroupDifference, Items<Finding>) Refused(string reason, string name) =>
-        (new(GroupDifferences.AdjustedQuestion, null, null, $"{Plain}; {Source}", reason), [CohortFindings.NotAdjusted.At(Where.Nowhere, $"{name}: {reason}")]);
+        (NotHad(reason), [CohortFindings.NotAdjusted.At(Where.Nowhere, $"{name}: {reason}")]);
+
+    private static GroupDifference NotHad(string reason) => new(GroupDifferences.AdjustedQuestion, null, null, $"{Plain}; {Source}", reason);
 
     private static string Without(HematocritOfPeople a, HematocritOfPeople b) => a.Without + b.Without == 0 ? "" : $" ({a.Without} and {b.Without} left out, their hematocrit or its error is not known)";
 }

@@ -10,7 +10,7 @@ internal static class CohortResults
 
     private static IEnumerable<NamedText> OfMeasurand(MeasurandSummary measurand)
     {
-        var name = $"cohort/{measurand.Law}/{measurand.Measurand.Name}/{measurand.Basis}";
+        var name = $"cohort/{measurand.Law}/{measurand.Measurand.Name}/{measurand.Basis.Words()}";
         var pair = $"{name}/{measurand.Second.Label} beside {measurand.First.Label}";
         return OfGroup($"{pair}/{measurand.First.Label}", measurand.First)
             .Concat(OfGroup($"{pair}/{measurand.Second.Label}", measurand.Second))
@@ -21,7 +21,9 @@ internal static class CohortResults
     private static IEnumerable<NamedText> OfGroup(string name, GroupSummary group)
     {
         yield return RunResults.Number($"{name}/samples", group.Samples);
+        yield return RunResults.Number($"{name}/people", group.People);
         yield return RunResults.Number($"{name}/used", group.Used);
+        yield return RunResults.Number($"{name}/samples used", group.SamplesUsed);
         yield return RunResults.Number($"{name}/marked", group.Marked);
         foreach (var reason in group.SetAside) yield return RunResults.Number($"{name}/set aside/{reason.Code}", reason.Count);
         if (group.Mean is not null)
@@ -45,7 +47,7 @@ internal static class CohortResults
 
     private static IEnumerable<NamedText> OfOutcomes(OutcomeCount count)
     {
-        var name = $"outcomes/{count.Label}/{count.Measurand.Name}/{count.Basis}";
+        var name = $"outcomes/{count.Label}/{count.Measurand.Name}/{count.Basis.Words()}";
         yield return RunResults.Number($"{name}/below", count.Below);
         yield return RunResults.Number($"{name}/within", count.Within);
         yield return RunResults.Number($"{name}/above", count.Above);

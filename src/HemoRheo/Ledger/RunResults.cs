@@ -38,7 +38,7 @@ internal static class RunResults
 
     private static IEnumerable<NamedText> OfSample(JudgedSample sample)
     {
-        yield return new($"{sample.Sample}/instrument", sample.Result.Status.ToString());
+        yield return new($"{sample.Sample}/instrument", sample.Result.Status.Words());
         foreach (var fit in sample.Result.Loadings.SelectMany(loading => loading.Fits.Select(fit => (Name: $"{sample.Sample}/loading {loading.Recording.Loading}/{fit.Law.Name}", Fit: fit))))
         {
             yield return Number($"{fit.Name}/chi-square", fit.Fit.Fit.ChiSquare);
@@ -55,11 +55,11 @@ internal static class RunResults
 
     private static IEnumerable<NamedText> OfJudged(string sample, JudgedValue judged)
     {
-        var name = $"{sample}/{judged.Value.Law}/{judged.Value.Measurand.Name}/{judged.Value.Basis}";
+        var name = $"{sample}/{judged.Value.Law}/{judged.Value.Measurand.Name}/{judged.Value.Basis.Words()}";
         foreach (var result in OfValue(name, judged.Value.Value)) yield return result;
         if (judged.Value.Interpolated is { } interpolated) yield return Number($"{name}/interpolated", interpolated);
         if (judged.Verdict is not { } verdict) yield break;
-        yield return new($"{name}/verdict", judged.Marked ? $"{verdict.Outcome}, marked" : verdict.Outcome.ToString());
+        yield return new($"{name}/verdict", judged.Marked ? $"{verdict.Outcome.Words()}, marked" : verdict.Outcome.Words());
         yield return Number($"{name}/below", verdict.Below);
         yield return Number($"{name}/within", verdict.Within);
         yield return Number($"{name}/above", verdict.Above);
@@ -68,7 +68,7 @@ internal static class RunResults
 
     private static IEnumerable<NamedText> OfHistory(InstrumentHistory history) =>
         history.Checks.SelectMany(check => OfValue($"instrument {history.Instrument.Name}/{check.Name}/error", check.Error)
-                .Append(new($"instrument {history.Instrument.Name}/{check.Name}/outcome", check.Outcome.ToString())))
+                .Append(new($"instrument {history.Instrument.Name}/{check.Name}/outcome", check.Outcome.Words())))
             .Concat(history.Periods.SelectMany(period => OfValue($"instrument {period.Key}/correction", period.Correction)));
 
     private static IEnumerable<NamedText> OfPool(StudyPool pool)
@@ -102,7 +102,7 @@ internal static class RunResults
 
     private static IEnumerable<NamedText> OfRange(ReferenceRange range)
     {
-        var name = $"range/{range.Law ?? "declared"}/{range.Measurand.Name}/{range.Basis}";
+        var name = $"range/{range.Law ?? "declared"}/{range.Measurand.Name}/{range.Basis.Words()}";
         yield return Number($"{name}/lower", range.Limits.Lower);
         yield return Number($"{name}/upper", range.Limits.Upper);
         foreach (var (end, interval) in new[] { ("lower limit", range.LowerLimit), ("upper limit", range.UpperLimit) })

@@ -5,8 +5,9 @@ namespace HemoRheo;
 /// <param name="Samples">Samples measured, used or not.</param>
 /// <param name="SetAside">Samples left out though the instrument was in order, by code.</param>
 /// <param name="Marked">Samples measured while the instrument was not in order; never used.</param>
+/// <param name="SamplesUsed">Samples used; those of one person are averaged.</param>
 /// <param name="PeopleLeftOut">People without a value that can be used, by the code of their first sample's reason.</param>
-internal sealed record GroupValues(Items<PersonValue> People, int Samples, Items<CountedReason> SetAside, int Marked, Items<CountedReason> PeopleLeftOut)
+internal sealed record GroupValues(Items<PersonValue> People, int Samples, int SamplesUsed, Items<CountedReason> SetAside, int Marked, Items<CountedReason> PeopleLeftOut)
 {
     internal static GroupValues Of(AnalyzedStudy analyzed, Question question, Func<Person, bool> belongs)
     {
@@ -32,7 +33,7 @@ internal sealed record GroupValues(Items<PersonValue> People, int Samples, Items
         }
 
         var marked = reasons.Count(reason => reason == RangeFindings.InstrumentNotInOrder.Code);
-        return new(people.ToItems(), samples, Counted(reasons.Where(reason => reason != RangeFindings.InstrumentNotInOrder.Code)), marked, Counted(left));
+        return new(people.ToItems(), samples, people.Sum(person => person.Samples.Count), Counted(reasons.Where(reason => reason != RangeFindings.InstrumentNotInOrder.Code)), marked, Counted(left));
     }
 
     private static string? WhyLeftOut(SampleResult sample, Question question)

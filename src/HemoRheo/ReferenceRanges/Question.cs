@@ -7,6 +7,9 @@ internal sealed record Question(Measurand Measurand, string Law, HematocritBasis
 
     internal static Question Of(SampleValue value) => new(value.Measurand, value.Law, value.Basis);
 
+    /// <summary>Whether the study's curves together contradict the law, so that no value may be decided on.</summary>
+    internal bool IsContradicted(AnalyzedStudy analyzed) => analyzed.Pool.Laws.Any(evidence => evidence.Law == Law && !evidence.Fits);
+
     internal static HematocritBasis DecidingStandard(Study study) =>
         study.Standard.DecideBy == StandardisingRule.PlasmaPower ? HematocritBasis.StandardByPlasma : HematocritBasis.StandardBySlope;
 

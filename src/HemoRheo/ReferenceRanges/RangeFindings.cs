@@ -39,6 +39,14 @@ public static class RangeFindings
         "Values were rounded too coarsely, or one export was copied under many names.",
         "See the export files of the controls.");
 
+    /// <summary>Quantities of a law that the study's curves contradict.</summary>
+    public static FindingKind LawContradicted { get; } = new(
+        "law-contradicted", Severity.Warning,
+        "Quantities that only this law has are neither decided on nor compared: the study's curves together contradict it.",
+        "Blood does not follow the law over these shear rates.",
+        "Report no number of this law; the law that decides is another one.",
+        "Pooled chi-square and mean residual pattern over the study");
+
     /// <summary>Limits that the study file declares and that no value is held against.</summary>
     public static FindingKind DeclaredLimitsUnused { get; } = new(
         "declared-limits-unused", Severity.Note,

@@ -20,7 +20,8 @@ internal static class RangeMaking
         var (range, kind, reason) = FromControls(analyzed.Study, question, controls);
         if (range is not null) return new(question, range, null, []);
         var message = $"{question.Measurand.Name}, {question.Basis.Words()}, {question.Law}: {reason} {(declared is null ? "There is no range." : "The declared limits are used instead.")}";
-        return new(question, declared, declared is null ? reason : null, [kind!.At(Where.Nowhere, message, controls.People.Count, FewestControls)]);
+        var said = declared is null && controls.People.Count == 0 && question.IsContradicted(analyzed);
+        return new(question, declared, declared is null ? reason : null, said ? [] : [kind!.At(Where.Nowhere, message, controls.People.Count, FewestControls)]);
     }
 
     private static (ReferenceRange? Range, FindingKind? Kind, string? Reason) FromControls(Study study, Question question, GroupValues controls)
@@ -54,6 +55,14 @@ internal static class RangeMaking
             ? null
             : new(question.Measurand, null, question.Basis, new(viscosity.ToWorking(limits.Lower.PascalSeconds), viscosity.ToWorking(limits.Upper.PascalSeconds)), null, null, "declared in the study file", 0, [], [], limits.Source);
     }
+
+    /// <summary>One finding a law beside the deciding one, which is judged with the pool, whose quantities the study's curves keep from being decided on.</summary>
+    internal static IEnumerable<Finding> Contradicted(AnalyzedStudy analyzed, IReadOnlyCollection<RangeAnswer> answers) => answers
+        .Select(answer => answer.Question)
+        .Where(question => question.Law != analyzed.Study.Analysis.DecideBy && question.IsContradicted(analyzed))
+        .GroupBy(question => question.Law)
+        .Select(law => RangeFindings.LawContradicted.At(Where.Nowhere,
+            $"{string.Join(", ", law.Select(question => question.Measurand.Name).Distinct())}: shown, not decided on, without a range and without a mean. {analyzed.Pool.Laws.First(evidence => evidence.Law == law.Key).Words}"));
 
     internal static IEnumerable<Finding> Unused(Study study, IReadOnlyCollection<RangeAnswer> answers)
     {

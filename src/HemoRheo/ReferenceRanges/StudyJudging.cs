@@ -48,7 +48,7 @@ public static class StudyJudging
 
     private static string WhyNotAsked(Study study, SampleValue value) =>
         value.Basis != HematocritBasis.Native && value.Basis != Question.DecidingStandard(study)
-            ? $"The study decides standardised values by {study.Standard.DecideBy}; this one stands beside it."
+            ? $"The study decides on values at {Question.DecidingStandard(study).Words()}; this one stands beside it."
             : $"The study decides by {study.Analysis.DecideBy}; this value by {value.Law} stands beside it.";
 
     private static Items<Finding> AllFindings(AnalyzedStudy analyzed, List<RangeAnswer> answers) =>
@@ -57,6 +57,7 @@ public static class StudyJudging
             .Concat(analyzed.Pool.Findings.Concat(analyzed.Pool.Scatter.SelectMany(scatter => scatter.Findings)))
             .Concat(analyzed.Samples.SelectMany(sample => sample.Findings))
             .Concat(answers.SelectMany(answer => answer.Findings))
+            .Concat(RangeMaking.Contradicted(analyzed, answers))
             .Concat(RangeMaking.Unused(analyzed.Study, answers))
             .Distinct()
             .ToItems();

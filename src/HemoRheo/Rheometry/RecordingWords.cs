@@ -56,7 +56,7 @@ public static class RecordingWords
 
         if (curve.Points.Count == 0 && curve.Label.Ramp == study.Analysis.Ramp)
         {
-            yield return RheometryFindings.NoReadings.At(where, $"None of {curve.Label.Recording!.Readings.Count} readings belongs to the ramp '{curve.Label.Ramp}' that is analyzed.");
+            yield return RheometryFindings.NoReadings.At(where, $"None of {curve.Label.Recording!.Readings.Count} readings belongs to the {curve.Label.Ramp.Words()} ramp, which is analyzed.");
         }
     }
 

@@ -3,7 +3,6 @@ namespace HemoRheo;
 /// <summary>Native values of a sample: its loadings combined for one set of measurands.</summary>
 internal static class NativeValues
 {
-    private const double CurveContradicts = 1e-3;
     private const double FarthestLowestRate = 10;
 
     /// <summary>Whether a loading may be used without a reservation.</summary>
@@ -92,9 +91,9 @@ internal static class NativeValues
                 yield return SampleFindings.NotIdentified.At(place, string.Create(System.Globalization.CultureInfo.InvariantCulture, $"{measurand.Name}: the fit knows it to a factor of {Math.Exp(uncertainty):G3}."), uncertainty, FitValueSet.FarthestUncertainty);
             }
 
-            if (fit.Fit.Probability is < CurveContradicts and var p)
+            if (fit.Fit is { Contradicts: true, Probability: { } p })
             {
-                yield return SampleFindings.CurveDoesNotFit.At(place, string.Create(System.Globalization.CultureInfo.InvariantCulture, $"{set.Law.Name}: chi-square {fit.Fit.ChiSquare:F1} on {fit.Fit.DegreesOfFreedom} degrees of freedom, p = {p:G2}."), p, CurveContradicts);
+                yield return SampleFindings.CurveDoesNotFit.At(place, string.Create(System.Globalization.CultureInfo.InvariantCulture, $"{set.Law.Name}: chi-square {fit.Fit.ChiSquare:F1} on {fit.Fit.DegreesOfFreedom} degrees of freedom, p = {p:G2}."), p, LackOfFit.SmallestProbability);
             }
         }
     }

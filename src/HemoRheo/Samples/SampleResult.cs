@@ -20,5 +20,5 @@ public sealed record SampleResult(string Sample, SampleRecord? Record, Items<Loa
         PlasmaStatus > Status && (value.Basis == HematocritBasis.StandardByPlasma || value.Measurand is RelativeViscosityAtRate) ? PlasmaStatus.Value : Status;
 
     /// <inheritdoc/>
-    public override string ToString() => $"sample {Sample}: {Loadings.Count} loadings, {Values.Count} values, instrument {Status}, {Findings.Count} findings";
+    public override string ToString() => $"sample {Sample}: {Loadings.Count} loadings, {Values.Count} values, instrument {Status.Words()}, {Findings.Count} findings";
 }

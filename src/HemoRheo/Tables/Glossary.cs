@@ -69,9 +69,9 @@ public static class Glossary
         new("stop reason", "Why the fit ended."),
         new("chi-square", "Weighted sum of squared residuals."),
         new("probability", "Probability of a result as extreme or more if nothing but chance is at work."),
-        new("usable", "Whether values may be taken from the fit."),
+        new("usable", "Whether the fit ended well enough numerically for values to be taken from it; it does not say that the law fits."),
         new("curves", "How many curves."),
-        new("fits", "Whether the pooled evidence of the study lets the law be decided by."),
+        new("fits", "Whether the law fits: yes, or no, for a single fit with what contradicts it, its own curve or the pooled evidence of the whole study."),
         new("pattern probability", "Probability of mean residuals as large at the same places along the curves if the law is right, whatever the size of the errors."),
         new("source", "Where the number, rule or contribution comes from."),
 
@@ -161,8 +161,11 @@ public static class Glossary
 
         // Groups.
         new("samples", "How many samples were measured."),
-        new("n", "How many people are counted."),
-        new("set aside", "How many samples are left out."),
+        new("people", "How many people the group has: those counted and those left out."),
+        new("n", "How many people are counted; several used samples of one person are averaged and count once."),
+        new("people left out", "Why people are left out: codes of their first sample's findings with how many people of each."),
+        new("samples used", "How many samples are used; with the marked ones and the ones set aside these are all samples measured."),
+        new("set aside", "How many samples are left out, though the instrument was in order."),
         new("reasons", "Why they are left out: codes of findings with how many of each."),
         new("mean", "Geometric mean for viscosities, arithmetic mean for indices, in the unit beside it."),
         new("spread", "Standard deviation among people on the working scale: for viscosities, of the natural logarithm."),
@@ -187,6 +190,7 @@ public static class Glossary
         new("count", "How many."),
         new("meaning", "What a cell of the column says."),
         new("table", "File that the column stands in."),
+        new("caution", "What the numbers of the row are for."),
         new("marked ones", "How many are judged but marked, because the instrument was not in order; not among the others."),
     ];
 

@@ -27,6 +27,9 @@ public sealed class FrameTests
     }
 
     [Fact]
+    public void Frames_have_no_column_that_says_the_same_in_every_row() => Assert.DoesNotContain("caution", FakeStudy.Result.ValuesFrame().ColumnKeys);
+
+    [Fact]
     public void The_frames_of_points_and_checks_have_a_row_each()
     {
         var curves = FakeStudy.Result.Samples.SelectMany(sample => sample.Result.Loadings).SelectMany(loading => new[] { loading.Curve, loading.OtherRamp }.OfType<FlowCurve>());

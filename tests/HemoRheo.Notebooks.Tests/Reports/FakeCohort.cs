@@ -12,8 +12,8 @@ internal static class FakeCohort
 
     private static MeasurandSummary One(ViscosityAtRate rate, HematocritBasis basis, int i) => new(
         rate, "Casson", basis,
-        new("controls", 5, 4, [new("too-long-since-draw", 1)], 0, Mean(Math.Log(0.0132) - 0.6 * i), 0.1),
-        i == 2 ? new("residents", 5, 1, [], 2, null, null, "One person is too few for a mean.") : new("residents", 5, 3, [], 2, Mean(Math.Log(0.0141) - 0.6 * i), 0.12),
+        new("controls", 6, 4, [new("too-long-since-draw", 1)], 0, Mean(Math.Log(0.0132) - 0.6 * i), 0.1, null, 5, 5, [new("too-long-since-draw", 1)]),
+        i == 2 ? new("residents", 3, 1, [], 2, null, null, "One person is too few for a mean.", 3, 1, [new("instrument-not-in-order", 2)]) : new("residents", 5, 3, [], 2, Mean(Math.Log(0.0141) - 0.6 * i), 0.12, null, 5, 3, [new("instrument-not-in-order", 2)]),
         i == 2 ? new("total", null, null, "Welch", "One person is too few for a comparison.") : new("total", Mean(0.066), 0.13, "Welch 1947 on log values, shared parts added in quadrature", null),
         basis == HematocritBasis.Native ? new("adjusted for hematocrit", i == 2 ? null : Mean(0.021), i == 2 ? null : 0.58, "Fuller 1987, within groups, error-aware", i == 2 ? "Hematocrit is measured too coarsely to adjust." : null) : null);
 

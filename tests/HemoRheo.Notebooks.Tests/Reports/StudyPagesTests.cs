@@ -107,6 +107,32 @@ public sealed partial class StudyPagesTests : IDisposable
     }
 
     [Fact]
+    public void The_overview_counts_people_and_samples_apart_and_says_that_a_further_visit_is_averaged()
+    {
+        var groups = Overview("groups");
+        Assert.Contains("4 of 5", groups, StringComparison.Ordinal);
+        Assert.Contains("5 of 6", groups, StringComparison.Ordinal);
+        Assert.Contains("5: 1 further visit averaged into the person", groups, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void A_deciding_law_that_does_not_fit_is_one_point_of_attention()
+    {
+        const string Why = "The law contradicts the curves of this study.";
+        var finding = PoolingFindings.LawDoesNotFit.At(Where.Nowhere, Why);
+        var samples = FakeStudy.Result.Samples.Select(sample => sample with { Values = sample.Values.Select(value => value with { Range = null, Verdict = null, WhyNotJudged = Why, Value = value.Value with { Decidable = false, Findings = [finding] } }).ToItems() });
+        var pool = FakeStudy.Result.Analyzed.Pool with { Laws = [new("Casson", 15, 9000, 135, 0, 0, false, Why)], Findings = [finding] };
+        StudyPages.Write(FakeStudy.Result with { Analyzed = FakeStudy.Result.Analyzed with { Pool = pool }, Ranges = [], Samples = samples.ToItems() }, null, FakeStudy.Record, null, _folder);
+        Assert.Equal(2, Overview("attention").Split(Why).Length);
+        Assert.DoesNotContain("set aside", Overview("attention"), StringComparison.Ordinal);
+        Assert.DoesNotContain("there is no reference range", Overview("attention"), StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void No_page_prints_a_raw_word_of_the_program() =>
+        Assert.All(Pages, path => Assert.DoesNotMatch(@"\b(InOrder|InDoubt|Native|StandardBy\w+|PlasmaPower|StudySlope|CannotTell|SmallStep)\b", Read(path).Root!.Value));
+
+    [Fact]
     public void The_overview_says_whether_a_rerun_is_identical()
     {
         var changed = Read(Path.Combine(_folder, "index.html")).Root!.Value;
@@ -172,6 +198,8 @@ public sealed partial class StudyPagesTests : IDisposable
         StudyPages.Write(FakeStudy.Result, FakeCohort.Summary, FakeStudy.Record, FakeStudy.Changed, _folder);
         Assert.All(Pages, path => Assert.Equal(before[path], File.ReadAllText(path)));
     }
+
+    private string Overview(string anchor) => Read(Path.Combine(_folder, "index.html")).Descendants("section").Single(section => section.Attribute("id")!.Value == anchor).Value;
 
     private XElement Section(string page, string anchor) => Read(Path.Combine(_folder, "samples", page)).Descendants("section").Single(section => section.Attribute("id")!.Value == anchor);
 

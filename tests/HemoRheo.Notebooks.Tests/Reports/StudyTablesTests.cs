@@ -48,6 +48,51 @@ public sealed class StudyTablesTests
         Assert.Contains("For research use only", Files["README.txt"], StringComparison.Ordinal);
     }
 
+    [Theory]
+    [MemberData(nameof(Tables))]
+    public void Every_row_of_every_table_carries_the_caution_in_its_last_column(string name)
+    {
+        var rows = Parse(Files[name]);
+        Assert.Equal("caution", rows[0][^1]);
+        Assert.All(rows.Skip(1), row => Assert.Equal("research use only", row[^1]));
+    }
+
+    [Fact]
+    public void Counts_of_people_and_of_samples_add_up_in_every_row_of_the_cohort()
+    {
+        var rows = Parse(Files["cohort.csv"]);
+        Assert.All(rows.Skip(1), row =>
+        {
+            Assert.Equal(Number(rows, row, "samples"), Number(rows, row, "samples used") + Number(rows, row, "marked") + Number(rows, row, "set aside"));
+            Assert.Equal(Number(rows, row, "people"), Number(rows, row, "n") + Of(rows, row, "people left out").Split("; ").Where(reason => reason.Length > 0).Sum(reason => int.Parse(reason.Split(' ')[1], CultureInfo.InvariantCulture)));
+        });
+        Assert.Contains(rows, row => Of(rows, row, "n") == "4" && Of(rows, row, "samples used") == "5" && Of(rows, row, "samples") == "6");
+    }
+
+    [Fact]
+    public void A_fit_that_ended_well_is_not_said_to_fit_where_its_curve_or_the_study_contradicts_the_law()
+    {
+        Assert.Equal(["yes"], Judgments(0.4, true));
+        Assert.Equal(["no: the curve contradicts the law"], Judgments(0.0005, true));
+        Assert.Equal(["no: the study contradicts the law"], Judgments(0.4, false));
+        Assert.Equal(["no: the curve and the study contradict the law"], Judgments(0.0005, false));
+    }
+
+    [Fact]
+    public void No_table_holds_a_raw_word_of_the_program() => Assert.All(Files, file => Assert.DoesNotMatch(@"\b(InOrder|InDoubt|Native|StandardBy\w+|PlasmaPower|StudySlope|CannotTell|SmallStep)\b", file.Value));
+
+    private static IEnumerable<string> Judgments(double probability, bool lawFits)
+    {
+        var result = FakeStudy.Result;
+        var sample = result.Samples[0];
+        var loadings = sample.Result.Loadings.Select(loading => loading with { Fits = loading.Fits.Select(fit => fit with { Fit = fit.Fit with { Probability = probability } }).ToItems() }).ToItems();
+        var pool = result.Analyzed.Pool with { Laws = result.Analyzed.Pool.Laws.Select(law => law with { Fits = lawFits }).ToItems() };
+        var edition = new Edition(result with { Analyzed = result.Analyzed with { Pool = pool }, Samples = [sample with { Result = sample.Result with { Loadings = loadings } }] }, null, FakeStudy.Record, null);
+        var rows = Parse(CurveTables.Fits(edition).Table.ToCsv());
+        Assert.All(rows.Skip(1), row => Assert.Equal("yes", Of(rows, row, "usable")));
+        return rows.Skip(1).Select(row => Of(rows, row, "fits")).Distinct();
+    }
+
     [Fact]
     public void No_cell_of_any_table_starts_like_a_formula_unless_it_is_a_number() => Assert.All(Files.Where(file => file.Key.EndsWith(".csv", StringComparison.Ordinal)), file => Assert.All(Parse(file.Value).SelectMany(row => row), cell =>
     {

@@ -2,8 +2,8 @@ namespace HemoRheo.Tests.Ledger;
 
 public sealed class RunComparisonTests
 {
-    private const string Own = "S-p1/Casson/viscosity at 10 1/s/Native/value";
-    private const string Cohort = "cohort/Casson/viscosity at 10 1/s/Native/patients beside controls/total/value";
+    private const string Own = "S-p1/Casson/viscosity at 10 1/s/native hematocrit/value";
+    private const string Cohort = "cohort/Casson/viscosity at 10 1/s/native hematocrit/patients beside controls/total/value";
 
     private static readonly RunRecord Earlier = LedgerStudy.Record(LedgerStudy.Analyzed);
 

@@ -10,15 +10,19 @@ public sealed class RunRecordTests
     private static readonly RunRecord Record = LedgerStudy.Record(LedgerStudy.Analyzed);
 
     [Fact]
+    public void Results_are_named_and_told_in_plain_words() =>
+        Assert.All(Record.Results, result => Assert.DoesNotMatch(@"\b(InOrder|InDoubt|Native|StandardBy\w+|CannotTell)\b", $"{result.Name} {result.Text}"));
+
+    [Fact]
     public void Every_value_verdict_range_and_group_number_has_a_name()
     {
         string[] names =
         [
-            "S-c1/Casson/viscosity at 10 1/s/Native/value", "S-c1/Casson/viscosity at 10 1/s/Native/u", "S-c1/Casson/viscosity at 10 1/s/Native/calibration",
-            "S-p1/Casson/viscosity at 10 1/s/Native/verdict", "S-p1/Casson/viscosity at 10 1/s/Native/above",
-            "range/Casson/viscosity at 10 1/s/Native/lower", "range/Casson/viscosity at 10 1/s/Native/upper limit to",
-            "cohort/Casson/viscosity at 10 1/s/Native/patients beside controls/total/value", "cohort/Casson/viscosity at 10 1/s/Native/patients beside controls/total/p",
-            "cohort/Casson/viscosity at 10 1/s/Native/patients beside controls/controls/mean/value", "outcomes/patients/viscosity at 10 1/s/Native/above",
+            "S-c1/Casson/viscosity at 10 1/s/native hematocrit/value", "S-c1/Casson/viscosity at 10 1/s/native hematocrit/u", "S-c1/Casson/viscosity at 10 1/s/native hematocrit/calibration",
+            "S-p1/Casson/viscosity at 10 1/s/native hematocrit/verdict", "S-p1/Casson/viscosity at 10 1/s/native hematocrit/above",
+            "range/Casson/viscosity at 10 1/s/native hematocrit/lower", "range/Casson/viscosity at 10 1/s/native hematocrit/upper limit to",
+            "cohort/Casson/viscosity at 10 1/s/native hematocrit/patients beside controls/total/value", "cohort/Casson/viscosity at 10 1/s/native hematocrit/patients beside controls/total/p",
+            "cohort/Casson/viscosity at 10 1/s/native hematocrit/patients beside controls/controls/mean/value", "outcomes/patients/viscosity at 10 1/s/native hematocrit/above",
         ];
         Assert.All(names, name => Assert.Single(Record.Results, result => result.Name == name));
         Assert.Equal(Record.Results.Count, Record.Results.Select(result => result.Name).Distinct().Count());
@@ -29,7 +33,7 @@ public sealed class RunRecordTests
     {
         var texts = Record.Results.ToDictionary(result => result.Name, result => result.Text);
         Assert.All(LedgerStudy.Analyzed.Samples, sample =>
-            Assert.Equal(sample.Values[0].Value.X, double.Parse(texts[$"{sample.Sample}/Casson/viscosity at 10 1/s/Native/value"], CultureInfo.InvariantCulture)));
+            Assert.Equal(sample.Values[0].Value.X, double.Parse(texts[$"{sample.Sample}/Casson/viscosity at 10 1/s/native hematocrit/value"], CultureInfo.InvariantCulture)));
     }
 
     [Fact]
@@ -54,7 +58,7 @@ public sealed class RunRecordTests
     public void Two_results_of_one_name_are_told_apart()
     {
         var twice = LedgerStudy.Analyzed with { Samples = LedgerStudy.Analyzed.Samples.With([LedgerStudy.Analyzed.Samples[0]]) };
-        Assert.Contains(LedgerStudy.Record(twice).Results, result => result.Name == "S-c1/Casson/viscosity at 10 1/s/Native/value (2)");
+        Assert.Contains(LedgerStudy.Record(twice).Results, result => result.Name == "S-c1/Casson/viscosity at 10 1/s/native hematocrit/value (2)");
     }
 
     [Fact]

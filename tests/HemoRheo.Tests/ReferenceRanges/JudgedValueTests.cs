@@ -8,6 +8,15 @@ public sealed class JudgedValueTests
         BuiltCohort.At10, "Casson", HematocritBasis.Native, Limits, new(-5.22, -5.18), new(-5.02, -4.98), "invented", 30, [], shared.ToItems(), "invented");
 
     [Fact]
+    public void A_value_at_the_other_standard_is_told_the_rule_that_decides_in_plain_words()
+    {
+        var analyzed = BuiltCohort.Controls(BuiltCohort.Spread(20));
+        var other = analyzed.Samples.Select(sample => sample with { Values = sample.Values.With([sample.Values[0] with { Basis = HematocritBasis.StandardBySlope }]) });
+        var judged = (analyzed with { Samples = other.ToItems() }).Judged().Samples[0].Values[^1];
+        Assert.Equal("The study decides on values at standard hematocrit, plasma rule; this one stands beside it.", judged.WhyNotJudged);
+    }
+
+    [Fact]
     public void What_value_and_limits_share_is_taken_out_first()
     {
         // Calibration 0.05 of both, 0.01 of its own: 0.03 above the limit is three standard uncertainties, not 0.59.

@@ -123,7 +123,7 @@ public sealed class ReferenceRangeTests
         });
         var result = (analyzed with { Samples = both.ToItems() }).Judged();
         Assert.Equal([HematocritBasis.Native, HematocritBasis.StandardByPlasma], result.Ranges.Select(range => range.Basis));
-        Assert.Contains("PlasmaPower", result.Samples[0].Values[2].WhyNotJudged!, StringComparison.Ordinal);
+        Assert.Contains("standard hematocrit, plasma rule", result.Samples[0].Values[2].WhyNotJudged!, StringComparison.Ordinal);
     }
 
     [Fact]

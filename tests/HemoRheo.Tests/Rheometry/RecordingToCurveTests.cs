@@ -3,6 +3,14 @@ namespace HemoRheo.Tests.Rheometry;
 public class RecordingToCurveTests
 {
     [Fact]
+    public void A_ramp_without_readings_is_named_in_plain_words()
+    {
+        var recording = TestStudy.Blood("S1", [TestStudy.Reading(1, 100, 0.4, ramp: Ramp.Up)]);
+        var finding = Assert.Single(recording.ToCurve(TestStudy.Plain, Ramp.Down).Findings, finding => finding.Kind == RheometryFindings.NoReadings);
+        Assert.Equal("None of 1 readings belongs to the downward ramp, which is analyzed.", finding.Message);
+    }
+
+    [Fact]
     public void Speed_and_torque_become_rate_and_stress_of_the_geometry()
     {
         // tests/ReferenceData/rheometry: 10 rad/s and 2.1587688254384e-5 N.m in the ISO 3219 cylinders, a liquid of 4 mPa.s.

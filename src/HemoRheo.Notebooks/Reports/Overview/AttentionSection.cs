@@ -19,11 +19,11 @@ internal static class AttentionSection
 
     private static IEnumerable<Markup> Law(Edition edition) => edition.Results.Analyzed.Pool.Laws
         .Where(law => law.Law == edition.Law && !law.Fits)
-        .Select(law => Markup.Of($"<b>The law that decides does not fit this study.</b> {law.Words} Its values are shown and not decided on."));
+        .Select(law => Markup.Of($"<b>The law that decides does not fit this study.</b> {law.Words} Its values are shown, not judged and not compared. <span class=\"quiet\">{PoolingFindings.LawDoesNotFit.WhatToDo}</span>"));
 
     private static IEnumerable<Markup> Ranges(Edition edition)
     {
-        if (edition.Results.Ranges.Any(range => range.Basis == edition.Basis)) yield break;
+        if (edition.Results.Ranges.Any(range => range.Basis == edition.Basis) || Law(edition).Any()) yield break;
         var why = edition.Results.Samples.SelectMany(edition.Deciding).Where(value => value.Value.Basis == edition.Basis).Select(value => value.WhyNotJudged).OfType<string>().GroupBy(text => text).MaxBy(same => same.Count())?.Key;
         yield return Markup.Of($"<b>No value at the standard hematocrit is judged: there is no reference range.</b> {why}");
     }
@@ -54,7 +54,7 @@ internal static class AttentionSection
     private static IEnumerable<Markup> Samples(Edition edition)
     {
         var aside = edition.Results.Samples.Where(edition.IsSetAside).ToArray();
-        foreach (var reason in aside.GroupBy(sample => edition.Reasons(sample).FirstOrDefault()?.Kind).OrderByDescending(group => group.Count()))
+        foreach (var reason in aside.GroupBy(sample => edition.Reasons(sample).FirstOrDefault()?.Kind).Where(group => group.Key != PoolingFindings.LawDoesNotFit).OrderByDescending(group => group.Count()))
         {
             var why = reason.Key is { } kind ? Markup.Of($"{kind.Meaning} (<code>{kind.Code}</code>) {kind.WhatToDo}") : Markup.Of($"Their pages say why.");
             yield return Markup.Of($"<b>{Figures.Count(reason.Count(), "sample")} set aside</b>: {Names(edition, [.. reason.Select(sample => sample.Sample)])}. {why}");
@@ -63,8 +63,9 @@ internal static class AttentionSection
 
     private static IEnumerable<Markup> Study(Edition edition) => edition.Results.Analyzed.Pool.Findings
         .Concat(edition.Results.Analyzed.Pool.Scatter.SelectMany(scatter => scatter.Findings))
+        .Concat(edition.Results.Findings.Where(finding => finding.Kind == RangeFindings.LawContradicted))
         .Concat(edition.Summary?.Findings ?? [])
-        .Where(finding => finding.Severity != Severity.Note)
+        .Where(finding => finding.Severity != Severity.Note && finding.Kind != PoolingFindings.LawDoesNotFit)
         .Distinct()
         .GroupBy(finding => finding.Kind)
         .Select(alike => Markup.Of($"{alike.First().Message}{(alike.Count() > 1 ? Markup.Of($" <a href=\"#found\">{alike.Count() - 1} more</a> of this kind.") : Markup.None)} <span class=\"quiet\">{alike.Key.WhatToDo}</span>"));

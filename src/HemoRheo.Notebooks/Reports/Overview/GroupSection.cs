@@ -15,11 +15,9 @@ internal static class GroupSection
             {Picture(summary, first, second)}
             <div class="wide"><table><caption>Means by group and their ratio</caption>
             <thead><tr><th scope="col" rowspan="2">quantity</th><th scope="colgroup" colspan="2">{first}</th><th scope="colgroup" colspan="2">{second}</th><th scope="col" rowspan="2">ratio as it is<br/><small>95 % interval, p</small></th><th scope="col" rowspan="2">ratio adjusted<br/><small>95 % interval, p</small></th></tr>
-            <tr><th scope="col"><small>n of measured</small></th><th scope="col">mean <small>95 % interval</small></th><th scope="col"><small>n of measured</small></th><th scope="col">mean <small>95 % interval</small></th></tr></thead>
+            <tr><th scope="col">people counted<br/><small>samples used</small></th><th scope="col">mean <small>95 % interval</small></th><th scope="col">people counted<br/><small>samples used</small></th><th scope="col">mean <small>95 % interval</small></th></tr></thead>
             <tbody>{summary.Measurands.Select(one => Row(one, edition.Law))}</tbody></table></div>
-            <div class="wide"><table><caption>Who is not counted, and why</caption>
-            <thead><tr><th scope="col">quantity</th><th scope="col">group</th><th scope="col" class="n">measured</th><th scope="col" class="n">counted</th><th scope="col" class="n">marked</th><th scope="col">set aside, by code of the finding</th></tr></thead>
-            <tbody>{Aside(summary)}</tbody></table></div>
+            {CountSection.Write(summary)}
             <ul class="look quiet">{Methods(summary).Select(method => Markup.Of($"<li>{method}</li>"))}</ul>
             """));
     }
@@ -48,8 +46,10 @@ internal static class GroupSection
     private static Markup Quantity(Measurand measurand, HematocritBasis basis) => Markup.Of($"<span class=\"w\">{Words.WithUnit(measurand)}</span><br/><small>{Words.Of(basis)}</small>");
 
     private static Markup Mean(MeasurandSummary one, GroupSummary group) => group.Mean is { } mean
-        ? Markup.Of($"<td class=\"w\">{group.Used} of {group.Samples}</td><td class=\"w\">{Figures.Estimate(one.Measurand, mean)}<br/><small>{Figures.Interval(one.Measurand, mean)}</small></td>")
-        : Markup.Of($"<td class=\"w\">{group.Used} of {group.Samples}</td><td><small>{group.WhyNoMean}</small></td>");
+        ? Markup.Of($"{Count(group)}<td class=\"w\">{Figures.Estimate(one.Measurand, mean)}<br/><small>{Figures.Interval(one.Measurand, mean)}</small></td>")
+        : Markup.Of($"{Count(group)}<td><small>{group.WhyNoMean}</small></td>");
+
+    private static Markup Count(GroupSummary group) => Markup.Of($"<td class=\"w\">{group.Used} of {group.People}<br/><small>{group.SamplesUsed} of {group.Samples}</small></td>");
 
     private static Markup Ratio(MeasurandSummary one, GroupDifference? difference) => difference switch
     {
@@ -58,24 +58,6 @@ internal static class GroupSection
         { Difference: { } value } when one.Measurand.Logarithmic => Markup.Of($"<td class=\"w\">{Figures.Ratio(value)}<br/><small>{Figures.RatioInterval(value)}, p {Figures.Probability(difference.Probability)}</small></td>"),
         { Difference: { } value } => Markup.Of($"<td class=\"w\">difference {Figures.Estimate(one.Measurand, value)}<br/><small>{Figures.Interval(one.Measurand, value)}, p {Figures.Probability(difference.Probability)}</small></td>"),
     };
-
-    private static IEnumerable<Markup> Aside(CohortSummary summary)
-    {
-        var groups = summary.Measurands.SelectMany(one => new[] { (one, group: one.First), (one, group: one.Second) })
-            .GroupBy(pair => (pair.group.Label, pair.group.Samples, pair.group.Used, pair.group.Marked, pair.group.SetAside));
-        foreach (var label in groups.GroupBy(alike => alike.Key.Label))
-        {
-            var byCount = label.OrderBy(alike => alike.Count()).ToArray();
-            foreach (var alike in byCount)
-            {
-                var names = byCount.Length == 1 ? "every quantity" : alike == byCount[^1] ? "all other quantities" : string.Join("; ", alike.Select(pair => $"{pair.one.Measurand.Name}, {Words.Short(pair.one.Basis)}"));
-                yield return Markup.Of($"""
-                    <tr><th scope="row">{names}</th><td>{alike.Key.Label}</td><td class="n">{alike.Key.Samples}</td><td class="n">{alike.Key.Used}</td><td class="n">{alike.Key.Marked}</td><td>{Marks.Reasons(alike.Key.SetAside)}</td></tr>
-
-                    """);
-            }
-        }
-    }
 
     private static string Alt(CohortSummary summary, string first, string second) =>
         $"Ratios of {second} over {first}: {string.Join("; ", summary.Measurands.Where(one => one.Total.Difference is not null && one.Measurand.Logarithmic).Select(one => $"{one.Measurand.Name}, {Words.Short(one.Basis)}, {Figures.Ratio(one.Total.Difference!)} ({Figures.RatioInterval(one.Total.Difference!)})"))}.";

@@ -14,14 +14,14 @@ internal static class VerdictSection
         if (counts.Length == 0) return Page.Section("verdicts", "Verdicts", Markup.Of($"<p>No value was judged: there is no reference range.</p>"));
         return Page.Section("verdicts", "Verdicts", Markup.Of($"""
             <p>A verdict says where a value lies against its reference range if one outcome is at least {Figures.Fixed(edition.Study.Analysis.Level, 2)} probable; else it is undecided. Values measured while an instrument was not in order are judged, marked and counted apart.</p>
-            <div class="wide"><table><caption>Verdicts by group, values by the {edition.Law} law</caption>
-            <thead><tr><th scope="col">quantity</th><th scope="col">group</th><th scope="col" class="n">below</th><th scope="col" class="n">within</th><th scope="col" class="n">above</th><th scope="col" class="n">undecided</th><th scope="col" class="n">not judged</th><th scope="col" class="n">marked</th></tr></thead>
+            <div class="wide"><table><caption>Verdicts by group, counted in samples; values by the {edition.Law} law</caption>
+            <thead><tr><th scope="col">quantity</th><th scope="col">group</th><th scope="col" class="n">samples</th><th scope="col" class="n">below</th><th scope="col" class="n">within</th><th scope="col" class="n">above</th><th scope="col" class="n">undecided</th><th scope="col" class="n">not judged</th><th scope="col" class="n">marked</th></tr></thead>
             <tbody>{counts.Select(Row)}</tbody></table></div>
             """));
     }
 
     private static Markup Row(OutcomeCount count) => Markup.Of($"""
-        <tr><th scope="row">{count.Measurand.Name}<br/><small>{Words.Of(count.Basis)}</small></th><td>{count.Label}</td><td class="n">{count.Below}</td><td class="n">{count.Within}</td><td class="n">{count.Above}</td><td class="n">{count.Undecided}</td><td class="n">{count.NotJudged}</td><td class="n">{count.Marked}</td></tr>
+        <tr><th scope="row">{count.Measurand.Name}<br/><small>{Words.Of(count.Basis)}</small></th><td>{count.Label}</td><td class="n">{count.Samples}</td><td class="n">{count.Below}</td><td class="n">{count.Within}</td><td class="n">{count.Above}</td><td class="n">{count.Undecided}</td><td class="n">{count.NotJudged}</td><td class="n">{count.Marked}</td></tr>
 
         """);
 

@@ -38,14 +38,21 @@ internal static class SampleCurve
 
     private static Markup Fits(Edition edition, Items<LoadingResult> loadings) => Markup.Of($"""
         <div class="wide"><table><caption>Fits of every law (standard errors from the fit alone)</caption>
-        <thead><tr><th scope="col">law</th><th scope="col" class="n">loading</th><th scope="col">parameters</th><th scope="col">chi-square</th><th scope="col" class="n">p</th><th scope="col">usable</th></tr></thead>
+        <thead><tr><th scope="col">law</th><th scope="col" class="n">loading</th><th scope="col">parameters</th><th scope="col">chi-square</th><th scope="col" class="n">p</th><th scope="col">usable<br/><small>numerically</small></th><th scope="col">does the law fit?</th></tr></thead>
         <tbody>{loadings.SelectMany(loading => loading.Fits.Select(fit => Fit(edition, loading, fit)))}</tbody></table></div>
         """);
 
     private static Markup Fit(Edition edition, LoadingResult loading, FittedLaw fit) => Markup.Of($"""
-        <tr><th scope="row">{fit.Law.Name}{(fit.Law.Name == edition.Law ? Markup.Of($" <small>decides</small>") : Markup.None)}</th><td class="n">{loading.Recording.Loading}</td><td>{new Markup(string.Join("<br/>", fit.Parameters.Select(parameter => Parameter(parameter).Text)))}</td><td class="w">{(double.IsFinite(fit.Fit.ChiSquare) ? Figures.Fixed(fit.Fit.ChiSquare, 1) : Figures.Nothing)} for {fit.Fit.DegreesOfFreedom}</td><td class="n">{Figures.Probability(fit.Fit.Probability)}</td><td>{(fit.Usable ? Markup.Of($"yes") : Markup.Of($"<b>no</b>: {string.Join("; ", fit.Findings.Where(finding => finding.Severity == Severity.Fault).Select(finding => finding.Kind.Meaning).DefaultIfEmpty(fit.Convergence.Message))}"))}</td></tr>
+        <tr><th scope="row">{fit.Law.Name}{(fit.Law.Name == edition.Law ? Markup.Of($" <small>decides</small>") : Markup.None)}</th><td class="n">{loading.Recording.Loading}</td><td>{new Markup(string.Join("<br/>", fit.Parameters.Select(parameter => Parameter(parameter).Text)))}</td><td class="w">{(double.IsFinite(fit.Fit.ChiSquare) ? Figures.Fixed(fit.Fit.ChiSquare, 1) : Figures.Nothing)} for {fit.Fit.DegreesOfFreedom}</td><td class="n">{Figures.Probability(fit.Fit.Probability)}</td><td>{(fit.Usable ? Markup.Of($"yes") : Markup.Of($"<b>no</b>: {string.Join("; ", fit.Findings.Where(finding => finding.Severity == Severity.Fault).Select(finding => finding.Kind.Meaning).DefaultIfEmpty(fit.Convergence.Message))}"))}</td><td>{Judgment(FitJudgment.Of(edition, fit))}</td></tr>
 
         """);
+
+    private static Markup Judgment(string words) => words switch
+    {
+        "" => Markup.Of($"{Figures.Nothing}"),
+        ['n', 'o', ..] => Markup.Of($"<b>no</b>{words[2..]}"),
+        _ => Markup.Of($"{words}"),
+    };
 
     private static Markup Parameter(FittedParameter parameter)
     {

@@ -10,12 +10,12 @@ internal static class CurveTables
 
     /// <summary>One row a fitted parameter.</summary>
     public static StudyTable Fits(Edition edition) => new("fits.csv", "One row a parameter of a law fitted to a loading.",
-        Table.Of("sample", "loading", "law", "parameter", "symbol", "estimate", "unit", "standard error", "why no error", "at bound", "stop reason", "chi-square", "degrees of freedom", "probability", "usable")
+        Table.Of("sample", "loading", "law", "parameter", "symbol", "estimate", "unit", "standard error", "why no error", "at bound", "stop reason", "chi-square", "degrees of freedom", "probability", "usable", "fits")
             .WithRows(Loadings(edition).SelectMany(loading => loading.Result.Fits.SelectMany(fit => fit.Parameters.Select(parameter => (loading.Sample, loading.Result.Recording.Loading, fit, parameter)))), row =>
             [
                 row.Sample, row.Loading, row.fit.Law.Name, row.parameter.Parameter.Name, row.parameter.Parameter.Symbol, StudyTable.Number(row.parameter.Estimate), row.parameter.Parameter.Unit,
                 StudyTable.Number(row.parameter.StandardError), row.parameter.WhyNoError, row.parameter.AtBound, Words.Of(row.fit.Convergence.Reason),
-                StudyTable.Number(row.fit.Fit.ChiSquare), row.fit.Fit.DegreesOfFreedom, StudyTable.Number(row.fit.Fit.Probability), row.fit.Usable,
+                StudyTable.Number(row.fit.Fit.ChiSquare), row.fit.Fit.DegreesOfFreedom, StudyTable.Number(row.fit.Fit.Probability), row.fit.Usable, FitJudgment.Of(edition, row.fit),
             ]));
 
     /// <summary>One row a law.</summary>

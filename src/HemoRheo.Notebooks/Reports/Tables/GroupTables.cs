@@ -4,8 +4,8 @@ namespace HemoRheo.Notebooks;
 internal static class GroupTables
 {
     /// <summary>One row a group and quantity.</summary>
-    public static StudyTable Groups(Edition edition) => new("cohort.csv", "One row a group and quantity: how many of how many, why not the others, and the mean.",
-        Table.Of("measurand", "law", "basis", "group", "samples", "n", "marked", "set aside", "reasons", "mean", "lower", "upper", "unit", "UCUM code", "working value", "working uncertainty", "degrees of freedom", "spread", "reason")
+    public static StudyTable Groups(Edition edition) => new("cohort.csv", "One row a group and quantity: how many people of how many from how many samples, why not the others, and the mean.",
+        Table.Of("measurand", "law", "basis", "group", "people", "n", "people left out", "samples", "samples used", "marked", "set aside", "reasons", "mean", "lower", "upper", "unit", "UCUM code", "working value", "working uncertainty", "degrees of freedom", "spread", "reason")
             .WithRows(Measurands(edition).SelectMany(one => new[] { (one, group: one.First), (one, group: one.Second) }), row => Group(row.one, row.group)));
 
     /// <summary>One row a comparison of two groups.</summary>
@@ -14,9 +14,9 @@ internal static class GroupTables
             .WithRows(Measurands(edition).SelectMany(one => new[] { one.Total, one.Adjusted }.OfType<GroupDifference>().Select(difference => (one, difference))), row => Comparison(row.one, row.difference)));
 
     /// <summary>One row a group and range.</summary>
-    public static StudyTable Verdicts(Edition edition) => new("verdicts.csv", "One row a group and reference range: how many verdicts of each kind.",
-        Table.Of("group", "measurand", "basis", "below", "within", "above", "undecided", "not judged", "marked ones")
-            .WithRows(edition.Summary?.Outcomes ?? [], count => [count.Label, count.Measurand.Name, Words.Of(count.Basis), count.Below, count.Within, count.Above, count.Undecided, count.NotJudged, count.Marked]));
+    public static StudyTable Verdicts(Edition edition) => new("verdicts.csv", "One row a group and quantity: how many samples have a verdict of each kind, or none.",
+        Table.Of("group", "measurand", "basis", "samples", "below", "within", "above", "undecided", "not judged", "marked ones")
+            .WithRows(edition.Summary?.Outcomes ?? [], count => [count.Label, count.Measurand.Name, Words.Of(count.Basis), count.Samples, count.Below, count.Within, count.Above, count.Undecided, count.NotJudged, count.Marked]));
 
     /// <summary>One row a reference range.</summary>
     public static StudyTable Ranges(Edition edition) => new("ranges.csv", "One row a reference range: limits, their own intervals, method and source.",
@@ -30,7 +30,7 @@ internal static class GroupTables
         var interval = group.Mean?.Interval().Select(one.Measurand.ToShown);
         return
         [
-            one.Measurand.Name, one.Law, Words.Of(one.Basis), group.Label, group.Samples, group.Used, group.Marked, group.SetAside.Sum(reason => reason.Count), Reasons(group.SetAside),
+            one.Measurand.Name, one.Law, Words.Of(one.Basis), group.Label, group.People, group.Used, Reasons(group.PeopleLeftOut ?? []), group.Samples, group.SamplesUsed, group.Marked, group.SetAside.Sum(reason => reason.Count), Reasons(group.SetAside),
             StudyTable.Number(group.Mean is { } mean ? one.Measurand.ToShown(mean.X) : null), StudyTable.Number(interval?.Lower), StudyTable.Number(interval?.Upper), one.Measurand.Shown.Symbol, one.Measurand.Shown.Ucum,
             StudyTable.Number(group.Mean?.X), StudyTable.Number(group.Mean?.StandardUncertainty), StudyTable.Number(group.Mean?.DegreesOfFreedom), StudyTable.Number(group.StandardDeviation), group.WhyNoMean,
         ];

@@ -6,8 +6,10 @@ internal static class StudyTables
     /// <summary>Name of the data dictionary's file.</summary>
     public const string Dictionary = "data-dictionary.csv";
 
-    /// <summary>The tables, without their dictionary.</summary>
-    public static Items<StudyTable> All(Edition edition) =>
+    /// <summary>The tables, without their dictionary; every row of each carries the caution.</summary>
+    public static Items<StudyTable> All(Edition edition) => Plain(edition).Select(one => one with { Table = one.Table.WithCaution() }).ToItems();
+
+    private static Items<StudyTable> Plain(Edition edition) =>
     [
         ValueTables.Values(edition),
         ValueTables.Budget(edition),
@@ -28,7 +30,7 @@ internal static class StudyTables
     {
         var tables = All(edition);
         foreach (var table in tables) yield return new(table.File, table.Table.ToCsv());
-        yield return new(Dictionary, Describe(tables).ToCsv());
+        yield return new(Dictionary, Describe(tables).WithCaution().ToCsv());
         yield return new("README.txt", Readme(edition, tables));
     }
 
