@@ -128,7 +128,7 @@ public class PeriodTests
         Assert.Equal("R1: 4 checks, 2 periods, 0 findings", history.ToString());
         Assert.Equal("period R1/1, from 2026-03-02 to 2026-03-16: 2 checks, reads +0.50 %", history.Periods[0].ToString());
         Assert.Equal("period R1/2, from 2026-03-23: 1 checks, reads -0.30 %", history.Periods[1].ToString());
-        Assert.Equal("check C14 of R1, 2026-03-16: +9.00 %, Fails", history.Checks[2].ToString());
+        Assert.Equal("check C14 of R1, 2026-03-16: +9.00 %, fails", history.Checks[2].ToString());
     }
 
     private static double Amount(Value value, SourceKind kind, string of) => value.Parts.Single(part => part.Source == new Source(kind, of)).Amount;
