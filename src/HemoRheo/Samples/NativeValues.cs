@@ -24,7 +24,7 @@ internal static class NativeValues
             var used = inside.Length > 0 ? inside : chosen;
             var value = Combined(study, sample, set, i, used);
             var findings = Findings(study, sample, set, measurand, evidence, used, sound.Length > 0, inside.Length > 0)
-                .Concat(LeftOut(sample, measurand, loadings, used))
+                .Concat(LeftOut(sample, measurand, loadings, chosen, used))
                 .Concat(AtBound(sample, measurand, value)).ToItems();
             yield return new(
                 measurand, set.Law.Name, HematocritBasis.Native,
@@ -35,9 +35,13 @@ internal static class NativeValues
         }
     }
 
-    private static IEnumerable<Finding> LeftOut(string sample, Measurand measurand, IEnumerable<LoadingResult> loadings, IReadOnlyList<(LoadingResult Loading, FittedLaw Fit)> used) => loadings
+    private static IEnumerable<Finding> LeftOut(
+        string sample, Measurand measurand, IEnumerable<LoadingResult> loadings,
+        IReadOnlyList<(LoadingResult Loading, FittedLaw Fit)> chosen, IReadOnlyList<(LoadingResult Loading, FittedLaw Fit)> used) => loadings
         .Where(loading => used.All(item => !ReferenceEquals(item.Loading, loading)))
-        .Select(loading => SampleFindings.LoadingLeftOut.At(new(Sample: sample, Loading: loading.Recording.Loading), $"Loading {loading.Recording.Loading} takes no part in {measurand.Name}."));
+        .Select(loading => SampleFindings.LoadingLeftOut.At(
+            new(Sample: sample, Loading: loading.Recording.Loading),
+            chosen.Any(item => ReferenceEquals(item.Loading, loading)) ? $"It does not reach the rate of {measurand.Name}, another loading does." : "Another loading is free of faults and gives the values alone."));
 
     private static IEnumerable<Finding> AtBound(string sample, Measurand measurand, Value value) => double.IsFinite(value.X)
         ? []

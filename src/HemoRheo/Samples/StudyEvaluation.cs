@@ -50,8 +50,8 @@ public static class StudyEvaluation
         if (record is { Hematocrit: null }) own.Add(SampleFindings.NoHematocrit.At(record.Where with { Sample = name }, "There is no usable hematocrit."));
         if (record is not null && plasma is null) own.Add(SampleFindings.NoPlasma.At(record.Where with { Sample = name }, "There is no usable plasma viscosity with its temperature."));
         if (values.All(value => value.Law != study.Analysis.DecideBy)) own.Add(SampleFindings.NoUsableFit.At(where, $"No loading has a usable fit of {study.Analysis.DecideBy}."));
-        // What a law shown beside cannot describe stays with its values; only the law that decides speaks for the sample.
-        var decided = values.Where(value => value.Law == study.Analysis.DecideBy).SelectMany(value => value.Findings).Where(finding => finding.Kind != SampleFindings.ShownBeside);
+        // What is wrong with a law or rule shown beside stays with its values; only the law and the rule that decide speak for the sample.
+        var decided = values.Where(value => value.Law == study.Analysis.DecideBy && value.Findings.All(finding => finding.Kind != SampleFindings.ShownBeside)).SelectMany(value => value.Findings);
         var findings = own.Concat(loadings.SelectMany(loading => loading.Findings)).Concat(plasma?.Standing?.Findings ?? []).Concat(decided).Distinct().ToItems();
         return new(name, record, loadings, values, loadings.Max(loading => loading.Standing.Status), findings, plasma?.Standing?.Status);
     }
