@@ -64,10 +64,13 @@ internal sealed partial class StudyFileReader
         Hematocrit.FromLiterPerLiter(section.Amount("hematocrit")),
         section.Text("decide_by") == "study-slope" ? StandardisingRule.StudySlope : StandardisingRule.PlasmaPower);
 
-    private ReferenceSettings Reference(SectionReader section, AnalysisSettings analysis) =>
-        new(section.Truth("from_controls"), Each(section.Table, "[[reference.declared]]", declared => Declared(declared, analysis)));
+    private ReferenceSettings Reference(SectionReader section, AnalysisSettings analysis)
+    {
+        var asked = new HashSet<(ShearRate, bool)>();
+        return new(section.Truth("from_controls"), Each(section.Table, "[[reference.declared]]", declared => Declared(declared, analysis, asked)));
+    }
 
-    private static DeclaredLimits Declared(SectionReader section, AnalysisSettings analysis)
+    private static DeclaredLimits Declared(SectionReader section, AnalysisSettings analysis, HashSet<(ShearRate, bool)> asked)
     {
         var limits = new DeclaredLimits(
             ShearRate.FromReciprocalSeconds(section.Amount("rate")),
@@ -76,6 +79,8 @@ internal sealed partial class StudyFileReader
             Viscosity.FromPascalSeconds(section.Amount("upper")),
             section.Text("source"));
         if (limits.Upper.PascalSeconds <= limits.Lower.PascalSeconds) section.Refuse("upper", "an upper limit that is not above the lower", "upper > lower", "correct one of the two");
+        if (!asked.Add((limits.Rate, limits.AtStandardHematocrit)))
+            section.Refuse("rate", $"limits at {limits.Rate} a second time", "one pair of limits for each rate and hematocrit", "remove one of the two");
         if (!double.IsNaN(limits.Rate.ReciprocalSeconds) && analysis.StandardRates.Count > 0 && !analysis.StandardRates.Contains(limits.Rate))
             section.Refuse("rate", $"limits at {limits.Rate}", $"one of standard_rates: {string.Join(", ", analysis.StandardRates)}", "add the rate to standard_rates or correct it");
         return limits;

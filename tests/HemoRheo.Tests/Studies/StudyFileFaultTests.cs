@@ -54,6 +54,7 @@ public sealed class StudyFileFaultTests
     [InlineData("separator = \";\"", "separator = ¦\";;\"", "the text \";;\"", "one character")]
     [InlineData("check_every = \"8 d\"", "check_every = ¦\"1e9 d\"", "more than", "correct it")]
     [InlineData("# adjusted = [2026-03-02T09:00:00+01:00]", "adjusted = [¦2026-03-02T09:00:00]", "a date or time without an offset", "2026-03-02T09:00:00+01:00")]
+    [InlineData("[[groups]]\ncode = \"A\"", "[[reference.declared]]\nrate = \"10 1/s\"\nat_standard_hematocrit = true\nlower = \"5 mPa.s\"\nupper = \"8 mPa.s\"\nsource = \"a\"\n[[reference.declared]]\nrate = ¦\"10 1/s\"\nat_standard_hematocrit = true\nlower = \"5 mPa.s\"\nupper = \"8 mPa.s\"\nsource = \"a\"\n[[groups]]\ncode = \"A\"", "limits at 10 1/s a second time", "remove one of the two")]
     [InlineData("people = \"people.csv\"", "#", "groups without a people table", "add the table", "[files]", "[¦files]")]
     [InlineData("\ncontrols = true", "\ncontrols = false", "from_controls = true without a control group", "mark the control group", "[reference]", "[¦reference]")]
     [InlineData("[standard_hematocrit]\nhematocrit = \"0.45 L/L\"\ndecide_by = \"plasma-power\"", "", "no section [standard_hematocrit]", "the template shows how", "# A study", "¦# A study")]
