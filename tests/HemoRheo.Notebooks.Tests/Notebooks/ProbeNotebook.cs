@@ -1,7 +1,7 @@
 namespace HemoRheo.Notebooks.Tests;
 
-/// <summary>One small notebook, executed once for all tests that look at it.</summary>
-public sealed class ProbeNotebook : IDisposable
+/// <summary>One small notebook.</summary>
+public sealed class ProbeNotebook() : HeadlessNotebook(jupyter => jupyter.Execute("probe", Cells))
 {
     public const int Loading = 0;
     public const int Versions = 1;
@@ -23,39 +23,4 @@ public sealed class ProbeNotebook : IDisposable
         "FlowCurve.Of(rates, stresses, \"<script>alert('x')</script>\").ViscosityChart()",
         "#r \"nuget:HemoRheo.Notebooks\"",
     ];
-
-    private readonly Lazy<Jupyter> _jupyter = new(() => new());
-    private readonly Lazy<ExecutedNotebook> _executed;
-    private readonly Lazy<string> _drawn;
-
-    public ProbeNotebook()
-    {
-        _executed = new(() => _jupyter.Value.Execute("probe", Cells));
-        _drawn = new(() => _jupyter.Value.Drawn(_executed.Value));
-    }
-
-    internal ExecutedNotebook Executed
-    {
-        get
-        {
-            Jupyter.Needed();
-            return _executed.Value;
-        }
-    }
-
-    /// <summary>Its page after a browser without a network has drawn it.</summary>
-    internal string Drawn
-    {
-        get
-        {
-            Jupyter.Needed();
-            Browser.Needed();
-            return _drawn.Value;
-        }
-    }
-
-    public void Dispose()
-    {
-        if (_jupyter.IsValueCreated) _jupyter.Value.Dispose();
-    }
 }
