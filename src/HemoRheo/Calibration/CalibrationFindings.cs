@@ -1,7 +1,7 @@
 namespace HemoRheo;
 
 /// <summary>Kinds of finding raised where instruments are checked.</summary>
-public static class CalibrationFindings
+public static partial class CalibrationFindings
 {
     /// <summary>A check is beyond its limit.</summary>
     public static FindingKind CheckFailed { get; } = new(

@@ -1,7 +1,7 @@
 namespace HemoRheo;
 
 /// <summary>What can be found about a fit.</summary>
-public static class FittingFindings
+public static partial class FittingFindings
 {
     /// <summary>There are fewer points, or fewer different rates, than parameters.</summary>
     public static FindingKind TooFewPoints { get; } = new(
