@@ -36,8 +36,7 @@ internal sealed record CheckReading(InstrumentCheck? Check, Finding? Fault)
             return Without(CalibrationFindings.TemperatureUnusable.At(where, $"Check '{recording.Sample}' was taken at {temperature}, where the viscosity of water is not known."));
         }
 
-        var errors = new ErrorModel(study.Errors.Relative, new(study.Errors.Floor), study.Errors.Known);
-        FittedLaw fit = curve.Fit(FlowLaw.Newtonian, errors);
+        FittedLaw fit = curve.Fit(FlowLaw.Newtonian, ReadingErrorModel.Of(study, curve));
         if (!fit.Usable)
         {
             return Without(CalibrationFindings.FitUnusable.At(where, $"Check '{recording.Sample}' gives no viscosity: {fit.Convergence.Message}{string.Concat(fit.Findings.Select(finding => "; " + finding.Message))}"));
@@ -54,7 +53,7 @@ internal sealed record CheckReading(InstrumentCheck? Check, Finding? Fault)
         var expected = fluid.ViscosityAt(temperature);
         var error = new Value(fit.Scaled[0] - Math.Log(expected.PascalSeconds), CheckBudget.Of(instrument, recording, fluid, temperature, fit).ToItems());
         var name = recording.Loading == 1 ? recording.Sample : Invariant($"{recording.Sample}/{recording.Loading}");
-        var findings = recording.Findings.Concat(fit.Curve.SetAside.SelectMany(aside => aside.Findings)).Concat(fit.Curve.Findings).Concat(fit.Findings).Concat(OwnFindings(instrument, recording, fit));
+        var findings = recording.Findings.Concat(fit.Curve.SetAside.SelectMany(aside => aside.Findings)).Concat(fit.Curve.Findings).Concat(fit.Findings).Concat(ReadingErrorModel.Findings(study, fit.Curve)).Concat(OwnFindings(instrument, recording, fit));
         return new InstrumentCheck(
             name, instrument.Name, fluid, recording.StartedAt, temperature, measured, expected, error, instrument.CheckLimit, CheckOutcome.CannotTell, 0, fit, findings.ToItems()).Judged(study.Analysis.Level);
     }

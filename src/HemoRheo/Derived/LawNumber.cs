@@ -16,6 +16,8 @@ public sealed record LawNumber(string Name, string Symbol, Unit Shown, string La
         return new(fit.Scaled[Index], gradient);
     }
 
+    internal override bool ReachesBeyond(FlowCurve curve) => this == CassonYieldStress;
+
     /// <inheritdoc/>
     public override string ToString() => Name;
 }

@@ -19,6 +19,14 @@ public abstract record Measurand(string Name, string Symbol, Unit Shown, bool Lo
     /// <summary>Viscosity at a shear rate relative to the plasma of the same sample.</summary>
     public static Measurand RelativeViscosity(ShearRate at) => new RelativeViscosityAtRate(at);
 
+    /// <summary>Shear-thinning index: viscosity at a low rate over viscosity at a high rate; 1 for a Newtonian liquid.</summary>
+    /// <param name="low">The low rate, above zero.</param>
+    /// <param name="high">The high rate, above the low one.</param>
+    /// <exception cref="ArgumentException">The rates are not above zero, or not in this order.</exception>
+    public static Measurand ShearThinningIndex(ShearRate low, ShearRate high) => low.ReciprocalSeconds > 0 && high.ReciprocalSeconds > low.ReciprocalSeconds && double.IsFinite(high.ReciprocalSeconds)
+        ? new ShearThinningIndex(low, high)
+        : throw new ArgumentException($"A shear-thinning index needs a low rate above zero and a high rate above that; these are {low} and {high}.");
+
     /// <summary>From the working scale to the SI number.</summary>
     public double ToSi(double working) => Logarithmic ? Math.Exp(working) : working;
 
@@ -30,6 +38,9 @@ public abstract record Measurand(string Name, string Symbol, Unit Shown, bool Lo
 
     /// <summary>The measurand of one fit, with its gradient; null where it does not come from a fit of this law alone.</summary>
     internal abstract FitValue? From(FittedLaw fit);
+
+    /// <summary>Whether the measurand speaks of rates that the curve does not reach.</summary>
+    internal virtual bool ReachesBeyond(FlowCurve curve) => false;
 
     /// <inheritdoc/>
     public override string ToString() => Name;

@@ -18,6 +18,8 @@ public sealed record ViscosityAtRate(ShearRate Rate) : Measurand(
         return new(Math.Log(stress / rate), gradient);
     }
 
+    internal override bool ReachesBeyond(FlowCurve curve) => !curve.Covers(Rate);
+
     /// <inheritdoc/>
     public override string ToString() => Name;
 }

@@ -15,6 +15,32 @@ public sealed record ErrorModel(double Relative, ShearStress Floor, bool ScaleKn
     /// <summary>Sizes that are known up to a common scale.</summary>
     public static ErrorModel UpToScale(double relative, ShearStress floor) => new(relative, floor, false);
 
+    /// <summary>This error model with the resolution of the torque in its floor: <c>errors.WithTorqueResolution(newtonMeters: 1e-8, curve.StressPerTorque)</c>.</summary>
+    /// <param name="newtonMeters">The step in which the instrument gives torques, N.m. A torque lies anywhere within a step, so its standard deviation is step / sqrt(12); as a stress it joins the floor in quadrature.</param>
+    /// <param name="stressPerTorque">Stress per torque of the geometry, Pa/(N.m), as <see cref="FlowCurve.StressPerTorque"/> has it.</param>
+    /// <exception cref="ArgumentException">The step is below zero or not finite, or the stress per torque is not known or not above zero.</exception>
+    /// <remarks>Where the sizes are known up to a scale only, the scale multiplies this part too. Source: JCGM 100:2008 (GUM), 4.3.7 and F.2.2.1.</remarks>
+    public ErrorModel WithTorqueResolution(double newtonMeters, double? stressPerTorque)
+    {
+        if (!(newtonMeters >= 0 && double.IsFinite(newtonMeters)))
+        {
+            throw new ArgumentException(FormattableString.Invariant($"The resolution of a torque is zero or above, in N.m; this one is {newtonMeters}."), nameof(newtonMeters));
+        }
+
+        if (stressPerTorque is not { } perTorque)
+        {
+            throw new ArgumentException("The curve knows no geometry, so a torque cannot be turned into a stress. Declare the geometry, or give the stress per torque, Pa/(N.m).", nameof(stressPerTorque));
+        }
+
+        if (!(perTorque > 0 && double.IsFinite(perTorque)))
+        {
+            throw new ArgumentException(FormattableString.Invariant($"Stress per torque is above zero, in Pa/(N.m); this one is {perTorque}."), nameof(stressPerTorque));
+        }
+
+        var resolution = newtonMeters * perTorque / Math.Sqrt(12);
+        return resolution == 0 ? this : this with { Floor = ShearStress.FromPascals(Math.Sqrt(Floor.Pascals * Floor.Pascals + resolution * resolution)) };
+    }
+
     /// <inheritdoc/>
     public override string ToString() => string.Create(
         System.Globalization.CultureInfo.InvariantCulture,

@@ -16,13 +16,13 @@ internal static class StudyLoadings
         var other = ramp == Ramp.Down ? Ramp.Up : Ramp.Down;
         FlowCurve Screened(Recording recording, Ramp which) => recording.ToCurve(study, which).Screened(study, records.GetValueOrDefault(recording.Sample));
         var curves = readings.Blood.Select(recording => Screened(recording, ramp)).ToArray();
-        var errors = new ErrorModel(study.Errors.Relative, ShearStress.FromPascals(study.Errors.Floor), study.Errors.Known);
+        ErrorModel[] errors = [.. curves.Select(curve => ReadingErrorModel.Of(study, curve))];
 
         var fits = new List<FittedLaw[]>();
         foreach (var law in study.Analysis.Laws.Select(FlowLaw.Named))
         {
             cancel.ThrowIfCancellationRequested();
-            fits.Add(Fits.OfAll(curves, law, errors));
+            fits.Add(FitsByErrors.OfAll(curves, law, errors));
             progress?.Report(new("fitting", fits.Count * curves.Length, study.Analysis.Laws.Count * curves.Length));
         }
 
@@ -35,6 +35,7 @@ internal static class StudyLoadings
             var laws = fits.Select(all => all[i]).ToItems();
             var findings = recording.Findings
                 .Concat(curves[i].Findings)
+                .Concat(ReadingErrorModel.Findings(study, curves[i]))
                 .Concat(curves[i].SetAside.SelectMany(aside => aside.Findings))
                 .Concat(laws.Where(fit => fit.Law.Name == study.Analysis.DecideBy).SelectMany(fit => fit.Findings))
                 .Concat(standing.Findings)

@@ -9,6 +9,7 @@ namespace HemoRheo;
 /// <param name="CheckLimit">Largest relative error a check may show, e.g. 0.03.</param>
 /// <param name="CheckScatter">Declared standard deviation of one check's ln error, used while the checks themselves have no degrees of freedom; null when not declared.</param>
 /// <param name="Adjusted">Moments at which the instrument was adjusted or repaired: each starts a new period.</param>
+/// <param name="TorqueResolution">Step in which it gives torques, N.m; its part of each reading's floor depends on the geometry. Null when not declared: nothing is added to the declared floor.</param>
 public sealed record Instrument(
     string Name,
     double? TorqueFloor,
@@ -17,4 +18,5 @@ public sealed record Instrument(
     TimeSpan CheckEvery,
     double CheckLimit,
     double? CheckScatter,
-    Items<DateTimeOffset> Adjusted);
+    Items<DateTimeOffset> Adjusted,
+    double? TorqueResolution = null);

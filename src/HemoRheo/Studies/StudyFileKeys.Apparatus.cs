@@ -8,6 +8,7 @@ public static partial class StudyFileKeys
         Text("[[instruments]]", "name", "Name that exports and tables use.", "R1"),
         Optional(Amount("[[instruments]]", "torque_floor", Quantity.Torque, KeyBounds.Positive, "Torque below which readings are set aside; without it every reading is marked.", "0.1 µN.m")),
         Amount("[[instruments]]", "torque_zero", Quantity.Torque, KeyBounds.NotNegative, "Standard uncertainty of the day's torque zero.", "0.005 µN.m"),
+        Optional(Amount("[[instruments]]", "torque_resolution", Quantity.Torque, KeyBounds.Positive, "Step in which the instrument gives torques; joins the floor of the readings' errors by each curve's geometry.", "0.01 µN.m")),
         Amount("[[instruments]]", "thermometer", Quantity.TemperatureDifference, KeyBounds.NotNegative, "Standard uncertainty of the thermometer.", "0.1 K"),
         Amount("[[instruments]]", "check_every", Quantity.Time, KeyBounds.Positive, "How long a passed check vouches for the instrument.", "8 d"),
         Amount("[[instruments]]", "check_limit", Quantity.Fraction, KeyBounds.BetweenZeroAndOne, "Largest relative error a check may show.", "3 %"),

@@ -11,7 +11,8 @@ internal sealed partial class StudyFileReader
         section.Span("check_every"),
         section.Amount("check_limit"),
         section.OptionalAmount("check_scatter"),
-        section.Moments("adjusted"));
+        section.Moments("adjusted"),
+        section.OptionalAmount("torque_resolution"));
 
     private static Geometry Geometry(SectionReader section)
     {

@@ -114,6 +114,7 @@ shear_stress = { header = "Stress [mPa]", unit = "mPa" }
 name = "R1"
 torque_floor = "0.1 µN.m"                 # readings below it are set aside
 torque_zero = "0.005 µN.m"                # standard uncertainty of the day's torque zero
+# torque_resolution = "0.01 µN.m"         # step in which torques are given; joins the floor of [errors] by each curve's geometry
 thermometer = "0.1 K"                     # standard uncertainty
 check_every = "8 d"                       # how long a passed check vouches for the instrument
 check_limit = "3 %"                       # largest error a check may show
