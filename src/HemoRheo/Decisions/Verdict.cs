@@ -9,6 +9,12 @@ namespace HemoRheo;
 /// <remarks>Source: JCGM 106:2012, 7 (conformance probability).</remarks>
 public sealed record Verdict(Outcome Outcome, double Below, double Within, double Above, double Level)
 {
+    /// <summary>Probability that it is wrong to take the value for one between the limits.</summary>
+    public double WrongAcceptance => 1 - Within;
+
+    /// <summary>Probability that it is wrong to take the value for one beyond the limits.</summary>
+    public double WrongRejection => Within;
+
     /// <summary>Judges a value against limits on its working scale.</summary>
     /// <param name="value">The value, with the contributions it shares with the limits already taken out.</param>
     /// <param name="limits">Limits on the value's working scale, taken as exact; an end may be infinite.</param>

@@ -87,9 +87,13 @@ public sealed record Value(double X, Items<Contribution> Parts)
     /// <param name="level">Coverage, between 0 and 1.</param>
     public Interval Interval(double level = 0.95)
     {
-        var reach = StudentQuantile.At(DegreesOfFreedom, (1 + level) / 2) * StandardUncertainty;
+        var reach = ExpandedUncertainty(level);
         return new(X - reach, X + reach);
     }
+
+    /// <summary>Expanded uncertainty on the working scale: half the width of the interval.</summary>
+    /// <param name="level">Coverage, between 0 and 1.</param>
+    public double ExpandedUncertainty(double level = 0.95) => StudentQuantile.At(DegreesOfFreedom, (1 + level) / 2) * StandardUncertainty;
 
     /// <summary>The probability that the quantity lies below a limit on the working scale.</summary>
     public double ProbabilityBelow(double limit) => Probability(limit - X);
