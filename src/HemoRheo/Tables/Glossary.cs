@@ -73,6 +73,18 @@ public static class Glossary
         new("curves", "How many curves."),
         new("fits", "Whether the law fits: yes, or no, for a single fit with what contradicts it, its own curve or the pooled evidence of the whole study."),
         new("pattern probability", "Probability of mean residuals as large at the same places along the curves if the law is right, whatever the size of the errors."),
+        new("parameters", "Parameters that the data had to give: those of the law, and the size of the errors where it is not known."),
+        new("-2 log likelihood", "Twice the negative log likelihood of normal errors, the logarithms of their variances included."),
+        new("AICc", "Akaike's criterion with the correction for few points; lower is better, and only differences count."),
+        new("difference", "AICc less the lowest one among the laws compared."),
+        new("weight", "Akaike weight: relative support among the laws compared, one in sum."),
+        new("residual signs", "Signs of the residuals along the curve, from low rates to high ones."),
+        new("residual correlation", "Correlation of neighboring residuals along the curve."),
+        new("correlation probability", "Probability of a correlation as large or larger if the law is right and readings are independent."),
+        new("against", "What contradicts the law, or why it takes no part."),
+        new("general law", "Flow law of which the law is a special case."),
+        new("special case", "Numbers of the general law at which it is the simple one."),
+        new("statistic", "Chi-square where the size of the errors is known, F where it is estimated."),
         new("source", "Where the number, rule or contribution comes from."),
 
         // Values and their budget.
