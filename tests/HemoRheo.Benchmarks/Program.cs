@@ -1,11 +1,13 @@
 using HemoRheo.Benchmarks;
+using HemoRheo.Benchmarks.Pooled;
 using HemoRheo.Benchmarks.Speed;
 
 return args switch
 {
     ["coverage", var studies] => Coverage(int.Parse(studies, System.Globalization.CultureInfo.InvariantCulture)),
+    ["correlation", var studies] => Lines(CorrelationRun.Run(int.Parse(studies, System.Globalization.CultureInfo.InvariantCulture))),
     ["speed"] => Speed(),
-    ["nist", "--folder", var folder] => Nist(folder),
+    ["nist", "--folder", var folder] => Lines(CertifiedRun.Run(folder)),
     _ => Usage(),
 };
 
@@ -22,15 +24,16 @@ static int Speed()
     return 0;
 }
 
-static int Nist(string folder)
+static int Lines(IEnumerable<string> lines)
 {
-    foreach (var line in CertifiedRun.Run(folder)) Console.WriteLine(line);
+    foreach (var line in lines) Console.WriteLine(line);
     return 0;
 }
 
 static int Usage()
 {
     Console.WriteLine("coverage N   coverage of 95 % intervals over N simulated studies, written, read and analyzed through the public API");
+    Console.WriteLine("correlation N   correlated readings over N simulated studies: the correlation found, coverage of the fit's intervals, false alarms of the tests of fit");
     Console.WriteLine("speed        fits a second on one thread");
     Console.WriteLine("nist --folder DIR   the 27 certified nonlinear problems from both starts; DIR holds their .dat files");
     return 2;

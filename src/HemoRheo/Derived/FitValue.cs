@@ -28,7 +28,7 @@ internal sealed class FitValue(double x, double[] gradient)
     {
         var label = fit.Curve.Label;
         var place = $"{label.Sample}/{label.Loading}/{fit.Law.Name}";
-        var (estimate, df) = fit.Errors.ScaleKnown ? ("", double.PositiveInfinity) : ($"residuals of {place}", fit.Fit.DegreesOfFreedom);
+        var (estimate, df) = fit.Errors.ScaleKnown ? ("", double.PositiveInfinity) : ($"residuals of {place}", fit.Fit.EffectiveDegreesOfFreedom);
         return new(X, Columns(fit).Select((amount, k) => new Contribution(new(SourceKind.Fit, $"{place}/{k}"), amount, estimate, df)).ToItems());
     }
 }

@@ -41,6 +41,9 @@ public sealed record ErrorModel(double Relative, ShearStress Floor, bool ScaleKn
         return resolution == 0 ? this : this with { Floor = ShearStress.FromPascals(Math.Sqrt(Floor.Pascals * Floor.Pascals + resolution * resolution)) };
     }
 
+    /// <summary>Variance of a reading, Pa^2, where the law says this stress.</summary>
+    internal double VarianceAt(double pascals) => Relative * pascals * (Relative * pascals) + Floor.Pascals * Floor.Pascals;
+
     /// <inheritdoc/>
     public override string ToString() => string.Create(
         System.Globalization.CultureInfo.InvariantCulture,

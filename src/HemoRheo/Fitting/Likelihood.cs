@@ -6,20 +6,19 @@ internal static class Likelihood
 {
     private const double LogTwoPi = 1.8378770664093454836;
 
-    /// <summary>-2 log likelihood of normal errors; where the scale is not known, at its most likely size, chi-square over points.</summary>
+    /// <summary>
+    /// -2 log likelihood of normal errors; where the scale is not known, at its most likely size, chi-square over points.
+    /// For correlated readings at the least generalized sum of squares, one linear step from the fit.
+    /// </summary>
     /// <param name="fit">A fit that ended with estimates.</param>
     public static double MinusTwiceLog(FittedLaw fit)
     {
         Span<double> slopes = stackalloc double[fit.Scaled.Count];
         var logs = 0.0;
-        foreach (var point in fit.Curve.Points)
-        {
-            var (relative, floor) = (fit.Errors.Relative * fit.Law.StressAt(point.Rate.ReciprocalSeconds, fit.Scaled.Span, slopes), fit.Errors.Floor.Pascals);
-            logs += Math.Log(relative * relative + floor * floor);
-        }
-
+        foreach (var point in fit.Curve.Points) logs += Math.Log(fit.Errors.VarianceAt(fit.Law.StressAt(point.Rate.ReciprocalSeconds, fit.Scaled.Span, slopes)));
         double n = fit.Residuals.Count;
-        return n * LogTwoPi + logs + (fit.Errors.ScaleKnown ? fit.Fit.ChiSquare : n * (1 + Math.Log(fit.Fit.ChiSquare / n)));
+        var (squares, logDeterminant) = fit.Correlation > 0 && WeightedDesign.Of(fit) is { } design ? design.Generalized(fit.Residuals, fit.Correlation) : (fit.Fit.ChiSquare, 0);
+        return n * LogTwoPi + logs + logDeterminant + (fit.Errors.ScaleKnown ? squares : n * (1 + Math.Log(squares / n)));
     }
 
     /// <summary>Parameters that the data had to give: those of the law, and the scale of the errors where it is not known. One that ended at its bound counts too.</summary>

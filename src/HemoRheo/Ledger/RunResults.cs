@@ -84,6 +84,8 @@ internal static class RunResults
             }
         }
 
+        yield return Number("correlation of readings/used", pool.Correlation.Value);
+        if (pool.Correlation.Estimate is { } estimate) yield return Number("correlation of readings/estimate", estimate);
         foreach (var law in pool.Laws)
         {
             yield return Number($"evidence/{law.Law}/chi-square", law.ChiSquare);

@@ -47,6 +47,22 @@ public static class PoolingFindings
         "One recording copied under the number of a second loading.",
         "See the export files of the replicates.");
 
+    /// <summary>Readings of a ramp are correlated.</summary>
+    public static FindingKind ReadingsCorrelated { get; } = new(
+        "readings-correlated", Severity.Note,
+        "Neighboring readings of a ramp are correlated beyond chance; standard errors and tests of fit know it.",
+        "Slow drift of torque or temperature within a ramp, or smoothing inside the instrument.",
+        "Nothing; or wait longer at each rate. A correlation that is known may be declared in the study file.",
+        "Pooled products of neighboring residuals, this project; used below a probability of 0.01");
+
+    /// <summary>The declared correlation is not that of the residuals.</summary>
+    public static FindingKind CorrelationOffDeclared { get; } = new(
+        "correlation-not-as-declared", Severity.Warning,
+        "The residuals of the study contradict the declared correlation of neighboring readings by more than three standard errors, and the declared one is used.",
+        "A correlation taken from other measurements, or a law that misses each curve in a way of its own.",
+        "Look at the residuals; correct point_correlation in the study file, or leave it out to have it estimated.",
+        "Pooled products of neighboring residuals, this project");
+
     /// <summary>The study's curves together contradict a law.</summary>
     public static FindingKind LawDoesNotFit { get; } = new(
         "law-does-not-fit", Severity.Fault,

@@ -16,11 +16,13 @@ public static class StudyEvaluation
         var histories = study.CheckInstruments(readings);
         var byInstrument = histories.ToDictionary(history => history.Instrument.Name);
         var records = readings.Samples.ToDictionary(record => record.Sample);
-        var loadings = StudyLoadings.Of(study, readings, records, byInstrument, progress, cancel);
+        var independent = StudyLoadings.Of(study, readings, records, byInstrument, progress, cancel);
+        var correlation = CorrelationPool.Of(SoundFits(independent, FlowLaw.Named(study.Analysis.DecideBy)), study.Errors.PointCorrelation);
+        var loadings = StudyLoadings.Knowing(study, correlation, independent);
         var samples = loadings.GroupBy(loading => loading.Recording.Sample).OrderBy(sample => sample.Key, StringComparer.Ordinal).Select(sample => (Name: sample.Key, Loadings: sample.ToItems())).ToArray();
 
         var laws = study.Analysis.Laws.Select(FlowLaw.Named).ToArray();
-        var evidence = laws.ToDictionary(law => law.Name, law => LawJudgment.Judge(law, [.. loadings.Select(loading => (Loading: loading, Fit: FitOf(loading, law))).Where(item => NativeValues.Sound(item.Loading, item.Fit)).Select(item => item.Fit)]));
+        var evidence = laws.ToDictionary(law => law.Name, law => LawJudgment.Judge(law, SoundFits(loadings, law)));
         var sets = laws.SelectMany(law => MeasurandSet.Of(study, law).Select(measurands => new MeasurandSet(law, measurands, Scatter(study, law, measurands, samples.Select(sample => sample.Loadings))))).ToArray();
 
         var native = samples.ToDictionary(sample => sample.Name, sample => sets.SelectMany(set => NativeValues.Of(study, sample.Name, sample.Loadings, set, evidence[set.Law.Name])).ToArray());
@@ -36,7 +38,7 @@ public static class StudyEvaluation
             progress?.Report(new("budgets", results.Count, samples.Length));
         }
 
-        var pool = new StudyPool(sets.Select(set => set.Scatter).ToItems(), laws.Select(law => evidence[law.Name]).ToItems(), slopes, PoolFindings(study, sets, evidence.Values, slopes).ToItems());
+        var pool = new StudyPool(sets.Select(set => set.Scatter).ToItems(), laws.Select(law => evidence[law.Name]).ToItems(), slopes, correlation, CorrelationPool.Findings(correlation).Concat(PoolFindings(study, sets, evidence.Values, slopes)).ToItems());
         return new(study, readings, histories, pool, results.ToItems());
     }
 
@@ -78,6 +80,9 @@ public static class StudyEvaluation
             else if (law.Probability < 1e-3) yield return PoolingFindings.ScatterLargerThanDeclared.At(Where.Nowhere, law.Words, law.ChiSquare / law.DegreesOfFreedom, 1);
         }
     }
+
+    private static FittedLaw[] SoundFits(IEnumerable<LoadingResult> loadings, FlowLaw law) =>
+        [.. loadings.Select(loading => (Loading: loading, Fit: FitOf(loading, law))).Where(item => NativeValues.Sound(item.Loading, item.Fit)).Select(item => item.Fit)];
 
     private static FittedLaw FitOf(LoadingResult loading, FlowLaw law) => loading.Fits.First(fit => fit.Law == law);
 }

@@ -3,7 +3,7 @@ namespace HemoRheo;
 /// <summary>Makes the loadings of a study: curves, screening, fits, standing of the instrument.</summary>
 internal static class StudyLoadings
 {
-    /// <summary>Every loading, in the order of the recordings.</summary>
+    /// <summary>Every loading, in the order of the recordings, with fits that take readings as independent and without findings yet.</summary>
     public static LoadingResult[] Of(
         Study study,
         StudyReadings readings,
@@ -32,15 +32,21 @@ internal static class StudyLoadings
             var standing = histories.TryGetValue(recording.Instrument, out var history)
                 ? history.At(recording.StartedAt)
                 : new InstrumentStanding(InstrumentStatus.Unknown, $"The study file declares no instrument {recording.Instrument}.", null, []);
-            var laws = fits.Select(all => all[i]).ToItems();
-            var findings = recording.Findings
-                .Concat(curves[i].Findings)
-                .Concat(ReadingErrorModel.Findings(study, curves[i]))
-                .Concat(curves[i].SetAside.SelectMany(aside => aside.Findings))
-                .Concat(laws.Where(fit => fit.Law.Name == study.Analysis.DecideBy).SelectMany(fit => fit.Findings))
-                .Concat(standing.Findings)
-                .ToItems();
-            return new LoadingResult(recording, curves[i], hasOther ? Screened(recording, other) : null, laws, standing, findings);
+            return new LoadingResult(recording, curves[i], hasOther ? Screened(recording, other) : null, fits.Select(all => all[i]).ToItems(), standing, []);
         }).ToArray();
     }
+
+    /// <summary>The same loadings with fits that know how readings are correlated, and with their findings.</summary>
+    public static LoadingResult[] Knowing(Study study, PointCorrelation correlation, IEnumerable<LoadingResult> loadings) => [.. loadings.Select(loading =>
+    {
+        var fits = correlation.Value == 0 ? loading.Fits : loading.Fits.Select(fit => fit.WithCorrelation(correlation.Value, correlation.StandardError)).ToItems();
+        var findings = loading.Recording.Findings
+            .Concat(loading.Curve.Findings)
+            .Concat(ReadingErrorModel.Findings(study, loading.Curve))
+            .Concat(loading.Curve.SetAside.SelectMany(aside => aside.Findings))
+            .Concat(fits.Where(fit => fit.Law.Name == study.Analysis.DecideBy).SelectMany(fit => fit.Findings))
+            .Concat(loading.Standing.Findings)
+            .ToItems();
+        return loading with { Fits = fits, Findings = findings };
+    })];
 }

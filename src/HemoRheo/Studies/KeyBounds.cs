@@ -9,4 +9,5 @@ internal enum KeyBounds
     BetweenZeroAndOne,
     BodyOrRoom,
     Level,
+    Correlation,
 }

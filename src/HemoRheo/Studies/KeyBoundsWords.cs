@@ -10,6 +10,7 @@ internal static class KeyBoundsWords
         KeyBounds.BetweenZeroAndOne => number is > 0 and < 1,
         KeyBounds.BodyOrRoom => number is >= 0 and <= 100,
         KeyBounds.Level => number is > 0.5 and < 1,
+        KeyBounds.Correlation => number is >= 0 and < 1,
         _ => true,
     };
 
@@ -20,6 +21,7 @@ internal static class KeyBoundsWords
         KeyBounds.BetweenZeroAndOne => "between 0 and 1 L/L (0 and 100 %)",
         KeyBounds.BodyOrRoom => "between 0 and 100 °C",
         KeyBounds.Level => "greater than 0.5 and less than 1",
+        KeyBounds.Correlation => "0 or greater and less than 1",
         _ => "any number",
     };
 }

@@ -14,6 +14,7 @@ public static partial class StudyFileKeys
         Amount("[errors]", "floor", Quantity.ShearStress, KeyBounds.NotNegative, "Standard deviation of one reading's stress near zero.", "0.3 mPa"),
         Truth("[errors]", "known", "true: these sizes are known. false: known up to a factor that each fit estimates.", "true"),
         Optional(Amount("[errors]", "loading", Quantity.Fraction, KeyBounds.Positive, "Relative standard deviation between loadings of one sample, used when no sample is loaded twice.", "2 %")),
+        Optional(Number("[errors]", "point_correlation", KeyBounds.Correlation, "Correlation of neighboring readings of a ramp; 0 declares that there is none. Left out, it is estimated over the study.", "0.3")),
 
         Default("\"37 °C\"", Amount("[screening]", "temperature", Quantity.Temperature, KeyBounds.BodyOrRoom, "Temperature at which blood is to be measured.", "37 °C")),
         Default("\"0.5 K\"", Amount("[screening]", "temperature_tolerance", Quantity.TemperatureDifference, KeyBounds.Positive, "Largest departure from it.", "0.5 K")),

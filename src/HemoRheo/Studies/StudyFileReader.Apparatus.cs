@@ -57,7 +57,7 @@ internal sealed partial class StudyFileReader
 
     private static ReadingErrors Errors(SectionReader section)
     {
-        var errors = new ReadingErrors(section.Amount("relative"), section.Amount("floor"), section.Truth("known"), section.OptionalAmount("loading"));
+        var errors = new ReadingErrors(section.Amount("relative"), section.Amount("floor"), section.Truth("known"), section.OptionalAmount("loading"), section.Has("point_correlation") ? section.Number("point_correlation") : null);
         if (errors is { Relative: 0, Floor: 0 }) section.Refuse("relative", "readings without any error", "relative or floor greater than 0", "give the size of at least one");
         return errors;
     }

@@ -162,6 +162,7 @@ relative = "1 %"
 floor = "0.3 mPa"
 known = true                              # false: known up to a factor that each fit estimates
 loading = "2 %"                           # between loadings; used when no sample is loaded twice
+# point_correlation = 0.3                 # of neighboring readings of a ramp, 0: none; left out, it is estimated
 
 [screening]                               # every key may be left out; these are the defaults
 temperature = "37 °C"

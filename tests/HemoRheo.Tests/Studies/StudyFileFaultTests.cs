@@ -26,6 +26,8 @@ public sealed class StudyFileFaultTests
     [InlineData("kind = \"water\" ", "kind = ¦\"watr\" ", "the text \"watr\"", "did you mean \"water\"?")]
     [InlineData("level = 0.95", "level = ¦0.5", "the number 0.5", "correct level")]
     [InlineData("level = 0.95", "level = ¦1", "the number 1", "correct level")]
+    [InlineData("# point_correlation = 0.3", "point_correlation = ¦1", "the number 1", "correct point_correlation")]
+    [InlineData("# point_correlation = 0.3", "point_correlation = ¦-0.1", "the number -0.1", "correct point_correlation")]
     [InlineData("[\"1 1/s\", \"10 1/s\", \"100 1/s\"]", "¦[\"10 1/s\", \"1 1/s\"]", "1 1/s after 10 1/s", "ascending order")]
     [InlineData("[\"1 1/s\", \"10 1/s\", \"100 1/s\"]", "[\"1 1/s\", ¦\"-10 1/s\"]", "-10 1/s", "correct standard_rates")]
     [InlineData("[\"1 1/s\", \"10 1/s\", \"100 1/s\"]", "[¦1, \"10 1/s\"]", "the number 1", "1 1/s")]

@@ -21,6 +21,15 @@ public sealed class StudyTemplateTests
     }
 
     [Fact]
+    public void A_correlation_of_readings_is_estimated_unless_the_file_declares_it()
+    {
+        using var folder = StudyFolder.Valid();
+        Assert.Null(Study.Open(folder.StudyFile).Errors.PointCorrelation);
+        folder.Write("study.toml", Study.Template().Replace("# point_correlation = ", "point_correlation = ", StringComparison.Ordinal));
+        Assert.Equal(0.3, Study.Open(folder.StudyFile).Errors.PointCorrelation);
+    }
+
+    [Fact]
     public void Lists_every_column_of_every_table_with_its_unit()
     {
         using var folder = StudyFolder.Valid();
