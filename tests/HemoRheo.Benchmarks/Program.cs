@@ -4,10 +4,13 @@ using HemoRheo.Benchmarks.Speed;
 
 return args switch
 {
-    ["coverage", var studies] => Coverage(int.Parse(studies, System.Globalization.CultureInfo.InvariantCulture)),
-    ["correlation", var studies] => Lines(CorrelationRun.Run(int.Parse(studies, System.Globalization.CultureInfo.InvariantCulture))),
+    ["coverage", var studies] => Coverage(Number(studies)),
+    ["correlation", var studies] => Lines(CorrelationRun.Run(Number(studies))),
     ["speed"] => Speed(),
     ["nist", "--folder", var folder] => Lines(CertifiedRun.Run(folder)),
+    ["chart", var charts] => Lines(ChartRun.Run(Number(charts))),
+    ["history", var checks] => Lines(LogRun.Times(Number(checks))),
+    ["write-log", var path, var name, var checks] => LogRun.Write(path, name, Number(checks)),
     _ => Usage(),
 };
 
@@ -24,6 +27,8 @@ static int Speed()
     return 0;
 }
 
+static int Number(string text) => int.Parse(text, System.Globalization.CultureInfo.InvariantCulture);
+
 static int Lines(IEnumerable<string> lines)
 {
     foreach (var line in lines) Console.WriteLine(line);
@@ -36,5 +41,8 @@ static int Usage()
     Console.WriteLine("correlation N   correlated readings over N simulated studies: the correlation found, coverage of the fit's intervals, false alarms of the tests of fit");
     Console.WriteLine("speed        fits a second on one thread");
     Console.WriteLine("nist --folder DIR   the 27 certified nonlinear problems from both starts; DIR holds their .dat files");
+    Console.WriteLine("chart N   false alarms of the control chart's rules over N simulated charts, and how well changes are dated over N/100");
+    Console.WriteLine("history N   times of an instrument's log of N checks");
+    Console.WriteLine("write-log PATH NAME N   records N checks in a log; what a test kills");
     return 2;
 }

@@ -1,0 +1,53 @@
+namespace HemoRheo;
+
+/// <summary>Between checks of a study and checks of a log.</summary>
+public static class LoggedChecks
+{
+    /// <summary>A judged check as the log keeps it.</summary>
+    /// <param name="check">The check.</param>
+    /// <param name="readings">What it was read from; names the export's digest.</param>
+    public static LoggedCheck ToLog(this InstrumentCheck check, StudyReadings readings)
+    {
+        var curve = check.Fit.Curve;
+        var export = curve.Label.Recording?.Where.File;
+        return new(
+            check.Instrument,
+            curve.Label.Sample,
+            curve.Label.Loading,
+            check.At,
+            check.Fluid.Name,
+            check.Fluid.Lot,
+            check.Temperature,
+            check.Measured,
+            check.Expected,
+            check.Error,
+            check.Limit,
+            check.Outcome,
+            check.ProbabilityWithin,
+            curve.Points.Select(point => Reading(point, curve, check.Expected)).ToItems(),
+            export,
+            readings.Files.FirstOrDefault(file => file.Path == export)?.Digest);
+    }
+
+    /// <summary>The control chart of a log: one point a filling, started anew at every adjustment.</summary>
+    /// <param name="log">The log as it was read.</param>
+    /// <param name="baseline">How many checks the limits rest on, at least 20.</param>
+    /// <exception cref="ArgumentOutOfRangeException">A baseline of fewer than 20 checks was asked for.</exception>
+    public static ControlChart ControlChart(this LogContents log, int baseline = HemoRheo.ControlChart.LeastBaseline) => HemoRheo.ControlChart.Of(
+        log.Instrument,
+        log.Checks.GroupBy(check => (check.Name, check.Filling, check.Fluid, check.Lot, DateOnly.FromDateTime(check.At.DateTime))).Select(filling => OfFilling([.. filling])),
+        log.Adjustments.Select(adjustment => adjustment.At),
+        baseline);
+
+    private static LoggedReading Reading(FlowPoint point, FlowCurve curve, Viscosity expected)
+    {
+        var torque = point.Reading?.Torque ?? point.Stress.Pascals / curve.StressPerTorque;
+        return new(point.Rate.ReciprocalSeconds, torque, Math.Log(point.ApparentViscosity.PascalSeconds / expected.PascalSeconds));
+    }
+
+    private static ChartedCheck OfFilling(LoggedCheck[] readings)
+    {
+        var worst = readings.Any(check => check.Outcome == CheckOutcome.Fails) ? CheckOutcome.Fails : readings[0].Outcome;
+        return new(readings[0].Name, readings[0].At, Value.Mean([.. readings.Select(check => check.Error)]), $"{readings[0].Fluid}, {readings[0].Lot}", worst);
+    }
+}
