@@ -106,7 +106,7 @@ public class ControlChartTests
         Assert.Equal(0.05, chart.Current.Baseline!.Center.X, 1e-12);
         Assert.Empty(chart.Findings);
         var empty = ControlChart.Of("R1", Steady.Select((x, i) => Check(i, x)), [Start.AddDays(1000)]);
-        Assert.Equal(0, empty.Current.Points.Count);
+        Assert.Empty(empty.Current.Points);
         Assert.Equal("chart-provisional", Assert.Single(empty.Current.Findings).Code);
     }
 

@@ -39,22 +39,21 @@ public sealed class InstrumentLogProcessTests : IDisposable
     }
 
     [Fact]
-    public void Two_programs_that_write_at_once_lose_nothing()
+    public async Task Two_programs_that_write_at_once_lose_nothing()
     {
         const int checks = 40;
         var folder = _folders[0];
         using var one = Start(folder, "one", checks);
         using var other = Start(folder, "other", checks);
-        var (saidByOne, saidByOther) = (one.StandardOutput.ReadToEndAsync(TestContext.Current.CancellationToken), other.StandardOutput.ReadToEndAsync(TestContext.Current.CancellationToken));
-        one.WaitForExit();
-        other.WaitForExit();
+        var said = await Task.WhenAll(one.StandardOutput.ReadToEndAsync(TestContext.Current.CancellationToken), other.StandardOutput.ReadToEndAsync(TestContext.Current.CancellationToken));
+        await Task.WhenAll(one.WaitForExitAsync(TestContext.Current.CancellationToken), other.WaitForExitAsync(TestContext.Current.CancellationToken));
         Assert.Equal((0, 0), (one.ExitCode, other.ExitCode));
         var contents = folder.Log.Read();
         Assert.True(contents.Verification.Sound, contents.Verification.ToString());
         var names = contents.Entries.Select(entry => entry.What).OfType<LoggedCheck>().Select(check => check.Name).ToArray();
         Assert.Equal(2 * checks, names.Length);
         foreach (var writer in new[] { "one", "other" }) Assert.Equal(Enumerable.Range(0, checks).Select(i => $"{writer}-{i}"), names.Where(name => name.StartsWith($"{writer}-", StringComparison.Ordinal)));
-        Assert.Equal(2 * checks, (saidByOne.Result + saidByOther.Result).Split('\n', StringSplitOptions.RemoveEmptyEntries).Distinct().Count());
+        Assert.Equal(2 * checks, string.Concat(said).Split('\n', StringSplitOptions.RemoveEmptyEntries).Distinct().Count());
     }
 
     /// <summary>Kills a writer a while after its first entry; the last number it said, and whether it left a journal.</summary>
