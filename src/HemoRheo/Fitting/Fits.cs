@@ -1,36 +1,46 @@
+using System.Collections.Concurrent;
+
 namespace HemoRheo;
 
-/// <summary>Fits of one law to many curves: four a group, each with the same bits as alone.</summary>
+/// <summary>Fits of one law to many curves: four a group, each with the same bits as alone, on any number of threads.</summary>
 internal static class Fits
 {
     public static FittedLaw[] OfAll(IReadOnlyList<FlowCurve> curves, FlowLaw law, ErrorModel errors)
     {
         ArgumentNullException.ThrowIfNull(curves);
+        return InParallel(curves, law, [.. Enumerable.Repeat(errors, curves.Count)], 1, CancellationToken.None);
+    }
+
+    /// <summary>One fit a curve, in the order of the curves; the same bits on any number of threads.</summary>
+    /// <param name="curves">The curves.</param>
+    /// <param name="law">The law.</param>
+    /// <param name="errors">One error model a curve.</param>
+    /// <param name="threads">Threads at most; -1 for as many as there are.</param>
+    /// <param name="cancel">Ends the work between two groups.</param>
+    public static FittedLaw[] InParallel(IReadOnlyList<FlowCurve> curves, FlowLaw law, IReadOnlyList<ErrorModel> errors, int threads, CancellationToken cancel)
+    {
+        ArgumentNullException.ThrowIfNull(curves);
         ArgumentNullException.ThrowIfNull(law);
-        Check(errors);
+        foreach (var model in errors) Check(model);
         var fits = new FittedLaw[curves.Count];
         var data = new CurveData[curves.Count];
         var sound = new List<int>(curves.Count);
         for (var i = 0; i < fits.Length; i++)
         {
-            data[i] = CurveData.Of(curves[i], law);
-            if (data[i].Fault is { } fault) fits[i] = FitReport.Unfitted(law, curves[i], errors, fault);
+            data[i] = CurveData.Of(curves[i], law, errors[i]);
+            if (data[i].Fault is { } fault) fits[i] = FitReport.Unfitted(law, curves[i], errors[i], fault);
             else sound.Add(i);
         }
 
-        foreach (var group in sound.Chunk(Lane.Count))
-        {
-            CurveData[] members = [.. group.Select(i => data[i])];
-            double[][] starts = [.. members.Select(curve => StartOf(law, curve))];
-            var outcomes = LaneGroup.Solve(law, members, starts, errors);
-            for (var lane = 0; lane < group.Length; lane++)
-            {
-                var solution = outcomes[lane].Good ? outcomes[lane].Solution : Rescue.Of(law, members[lane], starts[lane], errors, outcomes[lane]);
-                fits[group[lane]] = FitReport.Of(law, curves[group[lane]], errors, solution);
-            }
-        }
-
+        int[][] groups = [.. sound.Chunk(Lane.Count)];
+        Parallel.ForEach(Partitioner.Create(groups, loadBalance: true), new ParallelOptions { MaxDegreeOfParallelism = threads, CancellationToken = cancel }, Fit);
         return fits;
+
+        void Fit(int[] group)
+        {
+            var fitted = OfGroup(law, [.. group.Select(i => curves[i])], [.. group.Select(i => data[i])]);
+            for (var lane = 0; lane < group.Length; lane++) fits[group[lane]] = fitted[lane];
+        }
     }
 
     /// <summary>Where a curve's fit starts, on the fitting scale.</summary>
@@ -40,6 +50,31 @@ internal static class Fits
         law.FirstGuess(curve.Rates, curve.Stresses, guess);
         return law.ToScaled(guess);
     }
+
+    /// <summary>Up to four curves. A user's law that throws ends the fit of the curve that made it throw, and no other.</summary>
+    private static FittedLaw[] OfGroup(FlowLaw law, FlowCurve[] curves, CurveData[] data)
+    {
+        try
+        {
+            double[][] starts = [.. data.Select(curve => StartOf(law, curve))];
+            var outcomes = LaneGroup.Outcomes(law, data, starts);
+            return [.. curves.Select((curve, lane) => Report(law, curve, data[lane], outcomes[lane].Good ? outcomes[lane].Solution : Rescue.Of(law, data[lane], starts[lane], outcomes[lane])))];
+        }
+        catch (Exception) when (law is UserLaw && curves.Length > 1)
+        {
+            return [.. curves.Select((curve, lane) => OfGroup(law, [curve], [data[lane]])[0])];
+        }
+        catch (Exception thrown) when (law is UserLaw)
+        {
+            return [Failed(law, curves[0], data[0], $"throws: {thrown.Message}")];
+        }
+    }
+
+    private static FittedLaw Report(FlowLaw law, FlowCurve curve, CurveData data, CurveSolution solution) =>
+        solution.End.Reason is StopReason.BadData ? Failed(law, curve, data, "gives a stress or a slope that is not finite at a rate of the curve, where the fit starts") : FitReport.Of(law, curve, data.Errors, solution);
+
+    private static FittedLaw Failed(FlowLaw law, FlowCurve curve, CurveData data, string words) =>
+        FitReport.Unfitted(law, curve, data.Errors, FittingFindings.LawFailed.At(curve.Label.Where, $"{law.Name} {words}."));
 
     private static void Check(ErrorModel errors)
     {

@@ -1,86 +1,111 @@
 namespace HemoRheo;
 
-/// <summary>Up to four curves solved side by side, one a lane.</summary>
-internal static class LaneGroup
+/// <summary>Up to four curves solved side by side, one a lane. One group serves one thread, again and again, without allocating; only the outcomes that are read are new.</summary>
+internal sealed class LaneGroup
 {
     /// <summary>Smallest pivot of the normal equations with which a lane is trusted; the general path takes over below.</summary>
     private const double SmallestPivot = 1e-8;
 
-    /// <summary>Solves curves from given starts.</summary>
+    private static readonly ThreadLocal<LaneGroup> Own = new(() => new());
+
+    private readonly LaneProblem _problem = new();
+    private readonly LaneSolver _solver = new();
+    private readonly Lane[] _inverse = new Lane[LaneDual.Slopes * LaneDual.Slopes];
+    private readonly Lane[] _response = new Lane[LaneDual.Slopes];
+    private int? _held;
+
+    private LaneGroup()
+    {
+    }
+
+    public static LaneGroup OfThisThread => Own.Value!;
+
+    /// <summary>Solves curves from given starts, and gives one outcome a curve.</summary>
     /// <param name="law">The law.</param>
     /// <param name="curves">One to four curves.</param>
     /// <param name="starts">Starts on the fitting scale, one a curve.</param>
-    /// <param name="errors">The error model.</param>
     /// <param name="held">Number of the parameter that is held at its start; null to fit all.</param>
-    /// <returns>One outcome a curve.</returns>
-    public static LaneOutcome[] Solve(FlowLaw law, ReadOnlySpan<CurveData> curves, ReadOnlySpan<double[]> starts, ErrorModel errors, int? held = null)
+    public static LaneOutcome[] Outcomes(FlowLaw law, ReadOnlySpan<CurveData> curves, ReadOnlySpan<double[]> starts, int? held = null)
     {
-        var size = law.Parameters.Count;
+        var group = OfThisThread;
+        group.Begin(law, curves, held);
+        for (var lane = 0; lane < Lane.Count; lane++) group.Put(law, lane, At(curves, lane), At(starts, lane));
+        group.Solve(law);
+        return group.Read(curves);
+    }
+
+    /// <summary>Makes room for curves, each of which must then be put.</summary>
+    public void Begin(FlowLaw law, ReadOnlySpan<CurveData> curves, int? held = null)
+    {
         var points = 0;
         foreach (var curve in curves) points = Math.Max(points, curve.Rates.Length);
-        var (x, y, present) = (new Lane[points], new Lane[points], new Lane[points]);
-        for (var i = 0; i < points; i++)
-        {
-            (x[i], y[i], present[i]) = Point(curves, i);
-        }
+        _held = held;
+        _problem.Begin(points, law.Parameters.Count, curves[0].Deviations is not null);
+        if (held is { } parameter) _problem.Hold(parameter);
+    }
 
-        var (start, free, wall) = (new Lane[size], new Lane[size], new Lane[size]);
-        for (var k = 0; k < size; k++)
-        {
-            start[k] = new(starts[0][k], At(starts, 1)[k], At(starts, 2)[k], At(starts, 3)[k]);
-            free[k] = k == held ? Lane.Zero : Lane.Everywhere;
-            wall[k] = new(double.NegativeInfinity);
-        }
+    public void Put(FlowLaw law, int lane, CurveData curve, ReadOnlySpan<double> start)
+    {
+        _problem.Put(lane, curve.Rates, curve.Stresses, start, curve.Errors.Relative, curve.Errors.Floor.Pascals, curve.Deviations);
+        if (law.Boundary is { } boundary && _held is null) _problem.Fence(lane, boundary.Parameter, WallOf(law, curve));
+    }
 
-        if (law.Boundary is { } boundary && held is null)
-        {
-            wall[boundary.Parameter] = new(WallOf(law, curves[0]), WallOf(law, At(curves, 1)), WallOf(law, At(curves, 2)), WallOf(law, At(curves, 3)));
-        }
+    public void Solve(FlowLaw law) => _solver.Solve(law, _problem);
 
-        var solution = LaneSolver.Solve(law.StressesAndSlopes, new LaneProblem(x, y, present, start, free, wall, errors.Relative, errors.Floor.Pascals));
-        var outcomes = new LaneOutcome[curves.Length];
-        for (var lane = 0; lane < outcomes.Length; lane++) outcomes[lane] = Read(solution, lane, curves[lane].Rates.Length, held);
-        return outcomes;
+    /// <summary>Whether the numbers of a lane stand as they are.</summary>
+    public bool IsGood(int lane)
+    {
+        var end = _solver.Ends[lane];
+        return end.Converged && !end.AtWall && _solver.LeastPivot[lane] >= SmallestPivot;
+    }
+
+    /// <summary>How a lane ended.</summary>
+    public LaneEnd EndOf(int lane) => _solver.Ends[lane];
+
+    /// <summary>Sum of squares of a lane.</summary>
+    public double ChiSquareOf(int lane) => _solver.ChiSquare[lane];
+
+    /// <summary>Writes the estimates of a lane, on the fitting scale.</summary>
+    public void Estimates(int lane, Span<double> scaled)
+    {
+        for (var k = 0; k < scaled.Length; k++) scaled[k] = _solver.Estimates[k][lane];
     }
 
     /// <summary>The scaled value at which a curve's parameter has run to its bound.</summary>
     public static double WallOf(FlowLaw law, CurveData curve) =>
         law.Boundary is { } boundary ? law.Parameters[boundary.Parameter].ToScaled(boundary.WallAt(curve.LowestStress)) : double.NegativeInfinity;
 
-    private static LaneOutcome Read(LaneSolution solution, int lane, int points, int? held)
+    private LaneOutcome[] Read(ReadOnlySpan<CurveData> curves)
     {
-        var solved = new CurveSolution(
-            Column(solution.Parameters, lane, solution.Parameters.Length),
-            Column(solution.Inverse, lane, solution.Inverse.Length),
-            Column(solution.Response, lane, solution.Response.Length),
-            Column(solution.Residuals, lane, points),
-            solution.ChiSquare[lane],
-            solution.Ends[lane],
-            held);
-        var atWall = solution.AtWall.TrueAt(lane);
-        return new(solved, atWall, !atWall && solved.End.Converged && solution.LeastPivot[lane] >= SmallestPivot);
-    }
-
-    private static double[] Column(Lane[] lanes, int lane, int count)
-    {
-        var column = new double[count];
-        for (var i = 0; i < count; i++) column[i] = lanes[i][lane];
-        return column;
-    }
-
-    private static (Lane X, Lane Y, Lane Present) Point(ReadOnlySpan<CurveData> curves, int i)
-    {
-        Span<double> x = stackalloc double[Lane.Count];
-        Span<double> y = stackalloc double[Lane.Count];
-        Span<double> there = stackalloc double[Lane.Count];
-        for (var lane = 0; lane < Lane.Count; lane++)
+        var size = _problem.Size;
+        var inverse = _inverse.AsSpan(0, size * size);
+        var response = _response.AsSpan(0, size);
+        _solver.Inverse(inverse);
+        _solver.Response(response);
+        var outcomes = new LaneOutcome[curves.Length];
+        for (var lane = 0; lane < outcomes.Length; lane++)
         {
-            var curve = At(curves, lane);
-            var has = i < curve.Rates.Length;
-            (x[lane], y[lane], there[lane]) = has ? (curve.Rates[i], curve.Stresses[i], 1) : (1, 1, 0);
+            var residuals = new double[curves[lane].Rates.Length];
+            for (var i = 0; i < residuals.Length; i++) residuals[i] = _solver.Residual(i)[lane];
+            var solution = new CurveSolution(
+                Column(_solver.Estimates, lane),
+                Column(inverse, lane),
+                Column(response, lane),
+                residuals,
+                _solver.ChiSquare[lane],
+                _solver.Ends[lane].Said(),
+                _held);
+            outcomes[lane] = new(solution, _solver.Ends[lane].AtWall, IsGood(lane));
         }
 
-        return (new(x[0], x[1], x[2], x[3]), new(y[0], y[1], y[2], y[3]), new Lane(there[0], there[1], there[2], there[3]) > Lane.Zero);
+        return outcomes;
+    }
+
+    private static double[] Column(ReadOnlySpan<Lane> lanes, int lane)
+    {
+        var column = new double[lanes.Length];
+        for (var i = 0; i < column.Length; i++) column[i] = lanes[i][lane];
+        return column;
     }
 
     /// <summary>Lanes without a curve of their own repeat the last one.</summary>

@@ -17,14 +17,14 @@ internal static class Refits
         Array.Fill(estimates, double.NaN);
         foreach (var group in Enumerable.Range(0, replicates).Chunk(Lane.Count))
         {
-            CurveData[] drawn = [.. group.Select(i => Drawn(rates, i, draw))];
+            CurveData[] drawn = [.. group.Select(i => Drawn(rates, i, fit.Errors, draw))];
             int[] sound = [.. Enumerable.Range(0, drawn.Length).Where(i => drawn[i].LowestStress > 0)];
             if (sound.Length == 0) continue;
             CurveData[] curves = [.. sound.Select(i => drawn[i])];
-            var outcomes = LaneGroup.Solve(fit.Law, curves, [.. curves.Select(_ => start)], fit.Errors);
+            var outcomes = LaneGroup.Outcomes(fit.Law, curves, [.. curves.Select(_ => start)]);
             for (var lane = 0; lane < curves.Length; lane++)
             {
-                var solution = outcomes[lane].Good ? outcomes[lane].Solution : Rescue.Of(fit.Law, curves[lane], start, fit.Errors, outcomes[lane]);
+                var solution = outcomes[lane].Good ? outcomes[lane].Solution : Rescue.Of(fit.Law, curves[lane], start, outcomes[lane]);
                 if (solution.End.Converged) solution.Scaled.CopyTo(estimates, group[sound[lane]] * size);
             }
         }
@@ -32,11 +32,11 @@ internal static class Refits
         return estimates;
     }
 
-    private static CurveData Drawn(double[] rates, int replicate, Action<int, Span<double>> draw)
+    private static CurveData Drawn(double[] rates, int replicate, ErrorModel errors, Action<int, Span<double>> draw)
     {
         var stresses = new double[rates.Length];
         draw(replicate, stresses);
-        return new(rates, stresses, null);
+        return new(rates, stresses, errors);
     }
 
     /// <summary>The estimates; a parameter that is held starts inside its range.</summary>

@@ -13,7 +13,8 @@ public sealed record Casson(ShearStress YieldStress, Viscosity CassonViscosity)
         new("Casson", 1959, "in Mill (ed.), Rheology of Disperse Systems, Pergamon, 84-104"),
         [new("yield stress", "τ_y", "Pa"), new("Casson viscosity", "η_C", "Pa.s")],
         new(0.1, 1000),
-        new(0, "Newtonian", Wall: 1e-8, Inside: 1e-2, OfLowestStress: true));
+        new(0, "Newtonian", Wall: 1e-8, Inside: 1e-2, OfLowestStress: true),
+        Formula.ByHand);
 
     /// <inheritdoc/>
     public override string ToString() => $"yield stress {YieldStress}, Casson viscosity {CassonViscosity}";
@@ -55,5 +56,20 @@ public sealed record Casson(ShearStress YieldStress, Viscosity CassonViscosity)
 
         [MethodImpl(MethodImplOptions.AggressiveInlining)]
         public T Stress<T>(T rate, ReadOnlySpan<T> p) where T : struct, ILawNumber<T> => T.Square(T.Sqrt(p[0]) + T.Sqrt(p[1] * rate));
+
+        /// <summary>With the two roots a and b the stress is (a + b)^2, and its slopes with respect to the logarithms are a (a + b) and b (a + b).</summary>
+        public static void ByHand(ReadOnlySpan<Lane> rates, ReadOnlySpan<Lane> natural, Span<Lane> stresses, Span<Lane> slopes)
+        {
+            var (a, viscosity) = (Lane.Sqrt(natural[0]), natural[1]);
+            var bySecond = slopes.Slice(rates.Length, rates.Length);
+            for (var i = 0; i < rates.Length; i++)
+            {
+                var b = Lane.Sqrt(viscosity * rates[i]);
+                var sum = a + b;
+                stresses[i] = Lane.Square(sum);
+                slopes[i] = a * sum;
+                bySecond[i] = b * sum;
+            }
+        }
     }
 }

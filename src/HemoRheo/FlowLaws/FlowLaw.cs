@@ -5,7 +5,7 @@ namespace HemoRheo;
 /// <param name="Source">Where it was published.</param>
 /// <param name="Parameters">Its parameters, in the order its formula takes them; at most five.</param>
 /// <param name="ValidRates">Shear rates for which the literature uses it with blood, 1/s.</param>
-public abstract record FlowLaw(string Name, Citation Source, Items<LawParameter> Parameters, Interval ValidRates)
+public abstract record FlowLaw(string Name, Citation Source, Items<LawParameter> Parameters, Interval ValidRates) : ILaneModel
 {
     /// <summary>Constant viscosity.</summary>
     public static FlowLaw<Newtonian> Newtonian => HemoRheo.Newtonian.Law;
@@ -68,14 +68,18 @@ public abstract record FlowLaw(string Name, Citation Source, Items<LawParameter>
     /// </remarks>
     /// <exception cref="ArgumentException">The formula, tried once at the starts, reads too many parameters, ignores one, throws, or gives no finite stress; or a parameter has no start.</exception>
     public static FlowLaw<NamedValues> Custom<TFormula>(string name, TFormula formula, params LawParameter[] parameters) where TFormula : struct, IFormula =>
-        LawProbe.Checked(name, formula.Stress, parameters);
+        LawProbe.Checked(name, items => new StructLaw<TFormula>(name, formula, items), parameters);
 
     /// <summary>A user's own law as a lambda: <c>FlowLaw.Custom("mine", (rate, p) => p[0] * LaneDual.Pow(rate, p[1]), ...)</c>. It may use variables of the cell.</summary>
     /// <param name="name">Its name.</param>
     /// <param name="function">The formula; functions are those of <see cref="LaneDual"/>.</param>
     /// <param name="parameters">One to five parameters, each with a <see cref="LawParameter.Start"/>.</param>
     /// <exception cref="ArgumentException">As for the form with a struct.</exception>
-    public static FlowLaw<NamedValues> Custom(string name, LawFunction function, params LawParameter[] parameters) => LawProbe.Checked(name, function, parameters);
+    public static FlowLaw<NamedValues> Custom(string name, LawFunction function, params LawParameter[] parameters)
+    {
+        ArgumentNullException.ThrowIfNull(function);
+        return LawProbe.Checked(name, items => new LambdaLaw(name, function, items), parameters);
+    }
 
     /// <summary>Shear stress at a shear rate.</summary>
     /// <param name="rate">Shear rate, not below zero.</param>
@@ -138,6 +142,11 @@ public abstract record FlowLaw(string Name, Citation Source, Items<LawParameter>
 
     /// <summary>Stresses and slopes with respect to the scaled parameters, one curve a lane: slope k of point i at k * rates.Length + i.</summary>
     internal abstract void StressesAndSlopes(ReadOnlySpan<Lane> rates, ReadOnlySpan<Lane> scaled, Span<Lane> stresses, Span<Lane> slopes);
+
+    /// <summary>The same with exact slopes from the formula, also where a law has slopes by hand.</summary>
+    internal virtual void ByFormula(ReadOnlySpan<Lane> rates, ReadOnlySpan<Lane> scaled, Span<Lane> stresses, Span<Lane> slopes) => StressesAndSlopes(rates, scaled, stresses, slopes);
+
+    void ILaneModel.Evaluate(ReadOnlySpan<Lane> x, ReadOnlySpan<Lane> parameters, Span<Lane> values, Span<Lane> slopes) => StressesAndSlopes(x, parameters, values, slopes);
 
     private void CheckCount(int count)
     {

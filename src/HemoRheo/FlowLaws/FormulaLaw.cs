@@ -1,9 +1,7 @@
-using System.Runtime.CompilerServices;
-
 namespace HemoRheo;
 
-/// <summary>A law made of a formula: the loops live here, so that they are compiled anew for each formula.</summary>
-internal sealed record FormulaLaw<F, TValues>(string Name, Citation Source, Items<LawParameter> Parameters, Interval ValidRates, LawBoundary? Limit = null)
+/// <summary>A built-in law, made of a formula.</summary>
+internal sealed record FormulaLaw<F, TValues>(string Name, Citation Source, Items<LawParameter> Parameters, Interval ValidRates, LawBoundary? Limit = null, HandSlopes? ByHand = null)
     : FlowLaw<TValues>(Name, Source, Parameters, ValidRates)
     where F : struct, ILawFormula<TValues>
 {
@@ -17,30 +15,18 @@ internal sealed record FormulaLaw<F, TValues>(string Name, Citation Source, Item
 
     internal override void StressesAndSlopes(ReadOnlySpan<Lane> rates, ReadOnlySpan<Lane> scaled, Span<Lane> stresses, Span<Lane> slopes)
     {
-        var count = scaled.Length;
-        Span<LaneDual> seeds = stackalloc LaneDual[LaneDual.Slopes];
-        for (var k = 0; k < count; k++)
+        if (ByHand is null)
         {
-            var natural = Parameters[k].ToNatural(scaled[k]);
-            seeds[k] = LaneDual.Seed(natural, k, Parameters[k].SlopeOf(natural));
+            ByFormula(rates, scaled, stresses, slopes);
+            return;
         }
 
-        ReadOnlySpan<LaneDual> p = seeds[..count];
-        for (var i = 0; i < rates.Length; i++)
-        {
-            var stress = default(F).Stress(new LaneDual(rates[i]), p);
-            stresses[i] = stress.Value;
-            Store(stress, slopes, i, rates.Length, count);
-        }
+        Span<Lane> natural = stackalloc Lane[LaneDual.Slopes];
+        for (var k = 0; k < scaled.Length; k++) natural[k] = Parameters[k].ToNatural(scaled[k]);
+        ByHand(rates, natural[..scaled.Length], stresses, slopes);
     }
 
-    [MethodImpl(MethodImplOptions.AggressiveInlining)]
-    private static void Store(in LaneDual stress, Span<Lane> slopes, int i, int stride, int count)
-    {
-        slopes[i] = stress.S0;
-        if (count > 1) slopes[stride + i] = stress.S1;
-        if (count > 2) slopes[2 * stride + i] = stress.S2;
-        if (count > 3) slopes[3 * stride + i] = stress.S3;
-        if (count > 4) slopes[4 * stride + i] = stress.S4;
-    }
+    /// <summary>The same with exact slopes from the formula, also where there are slopes by hand.</summary>
+    internal override void ByFormula(ReadOnlySpan<Lane> rates, ReadOnlySpan<Lane> scaled, Span<Lane> stresses, Span<Lane> slopes) =>
+        FormulaLoops.Run(default(F), Parameters, rates, scaled, stresses, slopes);
 }

@@ -7,13 +7,12 @@ internal static class LawProbe
 {
     private static ReadOnlySpan<double> Rates => [1, 10, 100];
 
-    public static FlowLaw<NamedValues> Checked(string name, LawFunction function, LawParameter[] parameters)
+    public static FlowLaw<NamedValues> Checked(string name, Func<Items<LawParameter>, UserLaw> make, LawParameter[] parameters)
     {
         ArgumentException.ThrowIfNullOrWhiteSpace(name);
-        ArgumentNullException.ThrowIfNull(function);
         ArgumentNullException.ThrowIfNull(parameters);
         CheckParameters(name, parameters);
-        var law = new CustomLaw(name, function, parameters.ToItems());
+        var law = make(parameters.ToItems());
         double[] starts = [.. parameters.Select(parameter => parameter.Start!.Value)];
         var scaled = law.ToScaled(starts);
         var (slopes, seen) = (new double[scaled.Length], new bool[scaled.Length]);
@@ -28,7 +27,7 @@ internal static class LawProbe
         return ignored < 0 ? law : throw Wrong(law, $"ignores its parameter '{parameters[ignored].Name}', p[{ignored}]: the stress does not change with it. Remove the parameter, or use it");
     }
 
-    private static double Tried(CustomLaw law, double rate, double[] scaled, double[] slopes)
+    private static double Tried(UserLaw law, double rate, double[] scaled, double[] slopes)
     {
         try
         {
@@ -55,5 +54,5 @@ internal static class LawProbe
         }
     }
 
-    private static ArgumentException Wrong(CustomLaw law, FormattableString words) => new($"The formula of '{law.Name}' {words.ToString(CultureInfo.InvariantCulture)}.");
+    private static ArgumentException Wrong(UserLaw law, FormattableString words) => new($"The formula of '{law.Name}' {words.ToString(CultureInfo.InvariantCulture)}.");
 }

@@ -14,7 +14,8 @@ public sealed record Quemada(Viscosity HighShearViscosity, ShearRate CriticalRat
         new("Quemada", 1978, "Rheologica Acta 17:632-642"),
         [new("high-shear viscosity", "η_∞", "Pa.s"), new("critical rate", "γ_c", "1/s"), new("ratio", "r", "1", 0, 1)],
         new(0.1, 1000),
-        new(2, "Casson", Wall: 1e-4, Inside: 0.05, OfLowestStress: false));
+        new(2, "Casson", Wall: 1e-4, Inside: 0.05, OfLowestStress: false),
+        Formula.ByHand);
 
     /// <inheritdoc/>
     public override string ToString() => string.Create(
@@ -74,8 +75,29 @@ public sealed record Quemada(Viscosity HighShearViscosity, ShearRate CriticalRat
         [MethodImpl(MethodImplOptions.AggressiveInlining)]
         public T Stress<T>(T rate, ReadOnlySpan<T> p) where T : struct, ILawNumber<T>
         {
-            var s = T.Sqrt(rate / p[1]);
-            return rate * p[0] * T.Square((1 + s) / (p[2] + s));
+            var s = T.Sqrt(rate * (1 / p[1]));
+            return rate * p[0] * T.Square((1 + s) * (1 / (p[2] + s)));
+        }
+
+        /// <summary>With u = 1 / (r + s) and w = rate x viscosity x (1 + s) u^2 the stress is (1 + s) w, its slope with respect to log critical rate (1 - r) s u w, and with respect to logit r -2 r (1 - r) u (1 + s) w.</summary>
+        public static void ByHand(ReadOnlySpan<Lane> rates, ReadOnlySpan<Lane> natural, Span<Lane> stresses, Span<Lane> slopes)
+        {
+            var (viscosity, r) = (natural[0], natural[2]);
+            var inverse = 1 / natural[1];
+            var (rest, twice) = (1 - r, -2 * r * (1 - r));
+            var bySecond = slopes.Slice(rates.Length, rates.Length);
+            var byThird = slopes.Slice(2 * rates.Length, rates.Length);
+            for (var i = 0; i < rates.Length; i++)
+            {
+                var s = Lane.Sqrt(rates[i] * inverse);
+                var u = 1 / (r + s);
+                var ratio = (1 + s) * u;
+                var stress = rates[i] * viscosity * Lane.Square(ratio);
+                stresses[i] = stress;
+                slopes[i] = stress;
+                bySecond[i] = rates[i] * viscosity * ratio * (rest * s * u * u);
+                byThird[i] = twice * u * stress;
+            }
         }
     }
 }

@@ -35,10 +35,10 @@ public static class LeastSquares
         return Solve(new FormulaModel<TFormula>(formula, predictors).Evaluate, data, start);
     }
 
-    /// <summary>Fits a model. Variance of a datum: (relative * model)^2 + floor^2 at the fitted model; the defaults are ordinary least squares.</summary>
-    internal static LeastSquaresSolution Solve(PointModel model, ReadOnlySpan<double> data, ReadOnlySpan<double> start, double relative = 0, double floor = 1)
+    /// <summary>Fits a model. Variance of a datum: (relative * model)^2 + floor^2 at the fitted model, or the square of a given deviation; the defaults are ordinary least squares.</summary>
+    internal static LeastSquaresSolution Solve(PointModel model, ReadOnlySpan<double> data, ReadOnlySpan<double> start, double relative = 0, double floor = 1, double[]? deviations = null)
     {
-        var state = new LeastSquaresState(model, data.ToArray(), start.ToArray(), relative, floor);
+        var state = new LeastSquaresState(model, data.ToArray(), start.ToArray(), relative, floor, deviations);
         if (!state.IsFinite)
         {
             return state.Solved(new(StopReason.BadData, 0, "the model is not finite at the start"));

@@ -10,6 +10,7 @@ internal sealed class LeastSquaresState
     private readonly double[] _data;
     private readonly double _relative;
     private readonly double _floor;
+    private readonly double[]? _deviations;
     private readonly double[] _diagonal;
     private readonly double[] _roots;
     private double[] _at;
@@ -21,9 +22,9 @@ internal sealed class LeastSquaresState
     private HouseholderQr? _damped;
     private double[]? _lastStep;
 
-    public LeastSquaresState(PointModel model, double[] data, double[] start, double relative, double floor)
+    public LeastSquaresState(PointModel model, double[] data, double[] start, double relative, double floor, double[]? deviations = null)
     {
-        (_model, _data, _at, _relative, _floor) = (model, data, start, relative, floor);
+        (_model, _data, _at, _relative, _floor, _deviations) = (model, data, start, relative, floor, deviations);
         var (points, size) = (data.Length, start.Length);
         (_diagonal, _roots) = (new double[size], new double[points]);
         (_trial, _trialValues, _trialSlopes) = (new double[size], new double[points], new double[points * size]);
@@ -183,7 +184,7 @@ internal sealed class LeastSquaresState
         for (var i = 0; i < points; i++)
         {
             var deviation = _relative * _values[i];
-            _roots[i] = 1 / Math.Sqrt(deviation * deviation + _floor * _floor);
+            _roots[i] = _deviations is null ? 1 / Math.Sqrt(deviation * deviation + _floor * _floor) : 1 / _deviations[i];
             var residual = _roots[i] * (_data[i] - _values[i]);
             ChiSquare += residual * residual;
         }

@@ -22,7 +22,7 @@ internal static class StudyLoadings
         foreach (var law in study.Analysis.Laws.Select(FlowLaw.Named))
         {
             cancel.ThrowIfCancellationRequested();
-            fits.Add(FitsByErrors.OfAll(curves, law, errors));
+            fits.Add(Fits.InParallel(curves, law, errors, threads: -1, cancel));
             progress?.Report(new("fitting", fits.Count * curves.Length, study.Analysis.Laws.Count * curves.Length));
         }
 

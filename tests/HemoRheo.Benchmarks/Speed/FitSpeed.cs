@@ -24,7 +24,7 @@ internal static class FitSpeed
         var lines = new List<string> { "law          solver        fits       alone   per second, one thread; iterations a curve" };
         foreach (var law in (FlowLaw[])[FlowLaw.Newtonian, FlowLaw.Casson, FlowLaw.Quemada])
         {
-            var data = curves.Select(curve => CurveData.Of(curve, law)).ToArray();
+            var data = curves.Select(curve => CurveData.Of(curve, law, Errors)).ToArray();
             var iterations = Fits.OfAll(curves, law, Errors).Average(fit => fit.Convergence.Iterations);
             lines.Add(string.Create(
                 CultureInfo.InvariantCulture,
@@ -46,7 +46,7 @@ internal static class FitSpeed
         for (var i = 0; i < data.Length; i += Lane.Count)
         {
             var group = data.AsSpan(i, Lane.Count);
-            LaneGroup.Solve(law, group, [Fits.StartOf(law, group[0]), Fits.StartOf(law, group[1]), Fits.StartOf(law, group[2]), Fits.StartOf(law, group[3])], Errors);
+            LaneGroup.Outcomes(law, group, [Fits.StartOf(law, group[0]), Fits.StartOf(law, group[1]), Fits.StartOf(law, group[2]), Fits.StartOf(law, group[3])]);
         }
     }
 

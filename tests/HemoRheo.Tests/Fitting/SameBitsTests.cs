@@ -40,24 +40,27 @@ public class SameBitsTests
     [Fact]
     public void A_lane_solves_the_same_beside_poisoned_lanes()
     {
-        var clean = Solve(1, [0.3, 0.1, 0.05, 0.02]);
+        var clean = Solved(1);
         foreach (var poison in (double[])[double.NaN, double.PositiveInfinity, -1e300, 1e300])
         {
-            var beside = Solve(poison, [0.3, 0.1, 0.05, 0.02]);
-            Assert.Equal([clean.Parameters[0][1], clean.Parameters[1][1], clean.ChiSquare[1], clean.Inverse[0][1]], [beside.Parameters[0][1], beside.Parameters[1][1], beside.ChiSquare[1], beside.Inverse[0][1]]);
+            var beside = Solved(poison);
+            Assert.Equal([clean.Estimates[0][1], clean.Estimates[1][1], clean.ChiSquare[1], clean.LeastPivot[1]], [beside.Estimates[0][1], beside.Estimates[1][1], beside.ChiSquare[1], beside.LeastPivot[1]]);
             Assert.Equal(clean.Ends[1], beside.Ends[1]);
             Assert.Equal(StopReason.BadData, beside.Ends[0].Reason);
         }
     }
 
-    private static LaneSolution Solve(double first, double[] stresses)
+    private static LaneSolver Solved(double first)
     {
-        double[] rates = [80, 20, 8, 2];
-        var x = rates.Select(rate => new Lane(rate)).ToArray();
-        var y = stresses.Select(stress => new Lane(first == 1 ? stress : first * stress, stress, stress, stress)).ToArray();
-        var present = rates.Select(_ => Lane.Everywhere).ToArray();
-        Lane[] start = [new(first == 1 ? Math.Log(0.004) : first, Math.Log(0.004), -5, -5), new(Math.Log(0.003))];
-        return LaneSolver.Solve(FlowLaw.Casson.StressesAndSlopes, new LaneProblem(x, y, present, start, [Lane.Everywhere, Lane.Everywhere], [new(double.NegativeInfinity), new(double.NegativeInfinity)], 0.01, 0.0003));
+        double[] rates = [80, 20, 8, 2], stresses = [0.3, 0.1, 0.05, 0.02];
+        var (problem, solver) = (new LaneProblem(), new LaneSolver());
+        problem.Begin(4, 2);
+        problem.Put(0, rates, [.. stresses.Select(stress => first * stress)], [first == 1 ? Math.Log(0.004) : first, Math.Log(0.003)], 0.01, 0.0003);
+        problem.Put(1, rates, stresses, [Math.Log(0.004), Math.Log(0.003)], 0.01, 0.0003);
+        problem.Put(2, rates, stresses, [-5, Math.Log(0.003)], 0.01, 0.0003);
+        problem.Put(3, rates, stresses, [-5, Math.Log(0.003)], 0.01, 0.0003);
+        solver.Solve(FlowLaw.Casson, problem);
+        return solver;
     }
 
     private static FlowCurve[] Mixed(int count)

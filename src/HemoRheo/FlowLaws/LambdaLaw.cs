@@ -1,18 +1,8 @@
 namespace HemoRheo;
 
-/// <summary>A user's own law.</summary>
-internal sealed record CustomLaw(string Name, LawFunction Function, Items<LawParameter> Parameters)
-    : FlowLaw<NamedValues>(Name, new("the user", 0, "a law of the user's own"), Parameters, new(0, double.PositiveInfinity))
+/// <summary>A user's own law as a lambda.</summary>
+internal sealed record LambdaLaw(string Name, LawFunction Function, Items<LawParameter> Parameters) : UserLaw(Name, Parameters)
 {
-    internal override LawBoundary? Boundary => null;
-
-    internal override NamedValues Values(IReadOnlyList<double> estimates) => new(Parameters, estimates.ToItems());
-
-    internal override void FirstGuess(ReadOnlySpan<double> perSecond, ReadOnlySpan<double> pascals, Span<double> guess)
-    {
-        for (var k = 0; k < guess.Length; k++) guess[k] = Parameters[k].Start!.Value;
-    }
-
     internal override Lane StressOf(Lane rate, ReadOnlySpan<Lane> natural)
     {
         Span<LaneDual> p = stackalloc LaneDual[LaneDual.Slopes];

@@ -1,0 +1,47 @@
+namespace HemoRheo;
+
+/// <summary>Fits of one law to many curves from given starts, without records: numbers into arrays of the caller. Nothing is allocated once a thread is warm, except for curves that their lane does not settle.</summary>
+internal static class BareFits
+{
+    /// <summary>Fits every curve; each has the bits of a fit alone from the same start.</summary>
+    /// <param name="law">The law.</param>
+    /// <param name="curves">The curves, without faults; standard deviations are given for all of them or for none.</param>
+    /// <param name="starts">Starts on the fitting scale, curve after curve.</param>
+    /// <param name="estimates">Receives the estimates on the fitting scale, curve after curve; minus infinity for a parameter held at its bound.</param>
+    /// <param name="chiSquares">Receives the sums of squares.</param>
+    /// <param name="converged">Receives whether each fit reached a minimum.</param>
+    public static void Of(FlowLaw law, ReadOnlySpan<CurveData> curves, ReadOnlySpan<double> starts, Span<double> estimates, Span<double> chiSquares, Span<bool> converged)
+    {
+        var size = law.Parameters.Count;
+        var lanes = LaneGroup.OfThisThread;
+        for (var from = 0; from < curves.Length; from += Lane.Count)
+        {
+            var members = curves.Slice(from, Math.Min(Lane.Count, curves.Length - from));
+            lanes.Begin(law, members);
+            for (var lane = 0; lane < Lane.Count; lane++)
+            {
+                var member = Math.Min(lane, members.Length - 1);
+                lanes.Put(law, lane, members[member], starts.Slice((from + member) * size, size));
+            }
+
+            lanes.Solve(law);
+            var unsettled = 0;
+            for (var lane = 0; lane < members.Length; lane++)
+            {
+                converged[from + lane] = lanes.IsGood(lane);
+                if (!converged[from + lane]) unsettled++;
+                lanes.Estimates(lane, estimates.Slice((from + lane) * size, size));
+                chiSquares[from + lane] = lanes.ChiSquareOf(lane);
+            }
+
+            for (var lane = 0; unsettled > 0 && lane < members.Length; lane++)
+            {
+                if (converged[from + lane]) continue;
+                var start = starts.Slice((from + lane) * size, size).ToArray();
+                var solution = Rescue.Of(law, members[lane], start, LaneGroup.Outcomes(law, [members[lane]], [start])[0]);
+                solution.Scaled.CopyTo(estimates[((from + lane) * size)..]);
+                (chiSquares[from + lane], converged[from + lane]) = (solution.ChiSquare, solution.End.Converged);
+            }
+        }
+    }
+}

@@ -1,8 +1,0 @@
-namespace HemoRheo;
-
-/// <summary>A model of one predictor in four lanes, one data set a lane: its values and slopes at every point.</summary>
-/// <param name="x">Predictor, point by point.</param>
-/// <param name="parameters">Parameters.</param>
-/// <param name="values">Receives the model's values.</param>
-/// <param name="slopes">Receives slope k of point i at k * x.Length + i.</param>
-internal delegate void LaneModel(ReadOnlySpan<Lane> x, ReadOnlySpan<Lane> parameters, Span<Lane> values, Span<Lane> slopes);
