@@ -37,11 +37,25 @@ internal static class BareFits
             for (var lane = 0; unsettled > 0 && lane < members.Length; lane++)
             {
                 if (converged[from + lane]) continue;
-                var start = starts.Slice((from + lane) * size, size).ToArray();
-                var solution = Rescue.Of(law, members[lane], start, LaneGroup.Outcomes(law, [members[lane]], [start])[0]);
-                solution.Scaled.CopyTo(estimates[((from + lane) * size)..]);
-                (chiSquares[from + lane], converged[from + lane]) = (solution.ChiSquare, solution.End.Converged);
+                var at = (from + lane) * size;
+                (converged[from + lane], chiSquares[from + lane]) = Settle(lanes, law, members[lane], starts.Slice(at, size), estimates.Slice(at, size));
             }
         }
+    }
+
+    /// <summary>A curve that its lane did not settle: at its bound, or by the long way.</summary>
+    private static (bool Converged, double ChiSquare) Settle(LaneGroup lanes, FlowLaw law, CurveData curve, ReadOnlySpan<double> start, Span<double> estimates)
+    {
+        lanes.SolveAlone(law, curve, start);
+        if (lanes.EndOf(0).AtWall && BoundaryCase.Solve(lanes, law, curve, estimates))
+        {
+            lanes.Estimates(0, estimates);
+            return (true, lanes.ChiSquareOf(0));
+        }
+
+        double[] begin = [.. start];
+        var solution = Rescue.Of(law, curve, begin, LaneGroup.Outcomes(law, [curve], [begin])[0]);
+        solution.Scaled.CopyTo(estimates);
+        return (solution.End.Converged, solution.ChiSquare);
     }
 }

@@ -31,7 +31,9 @@ internal sealed class LaneGroup
         group.Begin(law, curves, held);
         for (var lane = 0; lane < Lane.Count; lane++) group.Put(law, lane, At(curves, lane), At(starts, lane));
         group.Solve(law);
-        return group.Read(curves);
+        var outcomes = new LaneOutcome[curves.Length];
+        for (var lane = 0; lane < outcomes.Length; lane++) outcomes[lane] = group.Outcome(lane, curves[lane]);
+        return outcomes;
     }
 
     /// <summary>Makes room for curves, each of which must then be put.</summary>
@@ -48,6 +50,14 @@ internal sealed class LaneGroup
     {
         _problem.Put(lane, curve.Rates, curve.Stresses, start, curve.Errors.Relative, curve.Errors.Floor.Pascals, curve.Deviations);
         if (law.Boundary is { } boundary && _held is null) _problem.Fence(lane, boundary.Parameter, WallOf(law, curve));
+    }
+
+    /// <summary>Solves one curve in all lanes.</summary>
+    public void SolveAlone(FlowLaw law, CurveData curve, ReadOnlySpan<double> start, int? held = null)
+    {
+        Begin(law, new(in curve), held);
+        for (var lane = 0; lane < Lane.Count; lane++) Put(law, lane, curve, start);
+        Solve(law);
     }
 
     public void Solve(FlowLaw law) => _solver.Solve(law, _problem);
@@ -75,30 +85,18 @@ internal sealed class LaneGroup
     public static double WallOf(FlowLaw law, CurveData curve) =>
         law.Boundary is { } boundary ? law.Parameters[boundary.Parameter].ToScaled(boundary.WallAt(curve.LowestStress)) : double.NegativeInfinity;
 
-    private LaneOutcome[] Read(ReadOnlySpan<CurveData> curves)
+    /// <summary>Everything there is to say of a lane.</summary>
+    public LaneOutcome Outcome(int lane, CurveData curve)
     {
         var size = _problem.Size;
         var inverse = _inverse.AsSpan(0, size * size);
         var response = _response.AsSpan(0, size);
         _solver.Inverse(inverse);
         _solver.Response(response);
-        var outcomes = new LaneOutcome[curves.Length];
-        for (var lane = 0; lane < outcomes.Length; lane++)
-        {
-            var residuals = new double[curves[lane].Rates.Length];
-            for (var i = 0; i < residuals.Length; i++) residuals[i] = _solver.Residual(i)[lane];
-            var solution = new CurveSolution(
-                Column(_solver.Estimates, lane),
-                Column(inverse, lane),
-                Column(response, lane),
-                residuals,
-                _solver.ChiSquare[lane],
-                _solver.Ends[lane].Said(),
-                _held);
-            outcomes[lane] = new(solution, _solver.Ends[lane].AtWall, IsGood(lane));
-        }
-
-        return outcomes;
+        var residuals = new double[curve.Rates.Length];
+        for (var i = 0; i < residuals.Length; i++) residuals[i] = _solver.Residual(i)[lane];
+        var end = _solver.Ends[lane];
+        return new(new(Column(_solver.Estimates, lane), Column(inverse, lane), Column(response, lane), residuals, _solver.ChiSquare[lane], end.Said(), _held), end.AtWall, IsGood(lane));
     }
 
     private static double[] Column(ReadOnlySpan<Lane> lanes, int lane)

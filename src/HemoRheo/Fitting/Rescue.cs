@@ -25,37 +25,12 @@ internal static class Rescue
         return best is null ? first : IsBeyondWall(law, curve, best) ? AtBoundary(law, curve, best.Scaled) : best;
     }
 
-    /// <summary>The law with one parameter at its bound; back inside if the sum of squares falls that way.</summary>
     private static CurveSolution AtBoundary(FlowLaw law, CurveData curve, double[] near)
     {
-        var boundary = law.Boundary!;
-        var parameter = boundary.Parameter;
-        var start = near.ToArray();
-        start[parameter] = law.Parameters[parameter].ToScaled(law.Parameters[parameter].Lower);
-        var held = LaneGroup.Outcomes(law, [curve], [start], parameter)[0];
-        if (!held.Good) return held.Solution.Ended(new(StopReason.Singular, held.Solution.End.Iterations, $"{boundary.Law}, its boundary, does not describe the curve either"));
-        if (!FallsInward(law, curve, held.Solution)) return held.Solution;
-        var inside = held.Solution.Scaled.ToArray();
-        inside[parameter] = law.Parameters[parameter].ToScaled(boundary.InsideAt(curve.LowestStress));
-        var again = LaneGroup.Outcomes(law, [curve], [inside])[0];
-        return again.Good ? again.Solution : held.Solution;
-    }
-
-    /// <summary>Whether the sum of squares falls when the held parameter leaves its bound.</summary>
-    private static bool FallsInward(FlowLaw law, CurveData curve, CurveSolution held)
-    {
-        var parameter = law.Boundary!.Parameter;
-        var wall = held.Scaled.ToArray();
-        wall[parameter] = LaneGroup.WallOf(law, curve);
-        var slopes = new double[wall.Length];
-        double score = 0;
-        for (var i = 0; i < curve.Rates.Length; i++)
-        {
-            var stress = law.StressAt(curve.Rates[i], wall, slopes);
-            score += slopes[parameter] * (curve.Stresses[i] - stress) / curve.VarianceOf(i, stress);
-        }
-
-        return score > 0;
+        var lanes = LaneGroup.OfThisThread;
+        var settled = BoundaryCase.Solve(lanes, law, curve, near);
+        var solution = lanes.Outcome(0, curve).Solution;
+        return settled ? solution : solution.Ended(new(StopReason.Singular, solution.End.Iterations, $"{law.Boundary!.Law}, its boundary, does not describe the curve either"));
     }
 
     private static CurveSolution General(FlowLaw law, CurveData curve, double[] start)

@@ -42,7 +42,7 @@ public class TorqueResolutionTests
         var other = Declared.WithTorqueResolution(1e-7, 25000);
         FlowCurve[] curves = [.. WeightedFits.Curves.Values];
         ErrorModel[] errors = [.. curves.Select((_, i) => i % 3 == 1 ? other : Declared)];
-        var fits = FitsByErrors.OfAll(curves, FlowLaw.Casson, errors);
+        var fits = Fits.InParallel(curves, FlowLaw.Casson, errors, threads: 2, TestContext.Current.CancellationToken);
         for (var i = 0; i < curves.Length; i++) Assert.Equal(curves[i].Fit((FlowLaw)FlowLaw.Casson, errors[i]), fits[i]);
     }
 }
