@@ -1,4 +1,5 @@
 using HemoRheo.Benchmarks;
+using HemoRheo.Benchmarks.Laws;
 using HemoRheo.Benchmarks.Pooled;
 using HemoRheo.Benchmarks.Speed;
 
@@ -13,6 +14,7 @@ return args switch
     ["chart", var charts] => Lines(ChartRun.Run(Number(charts))),
     ["history", var checks] => Lines(LogRun.Times(Number(checks))),
     ["write-log", var path, var name, var checks] => LogRun.Write(path, name, Number(checks)),
+    ["laws", var curves] => Lines(LawSimulations.Run(Number(curves))),
     _ => Usage(),
 };
 
@@ -48,5 +50,6 @@ static int Usage()
     Console.WriteLine("chart N   false alarms of the control chart's rules over N simulated charts, and how well changes are dated over N/100");
     Console.WriteLine("history N   times of an instrument's log of N checks");
     Console.WriteLine("write-log PATH NAME N   records N checks in a log; what a test kills");
+    Console.WriteLine("laws N       how often comparisons of laws and flow-behavior classes of single curves are right, over N simulated curves a row");
     return 2;
 }

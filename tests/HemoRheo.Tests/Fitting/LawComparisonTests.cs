@@ -80,6 +80,15 @@ public class LawComparisonTests
         Assert.All((comparison.ToTable().ToText() + comparison.NestedToTable().ToText() + comparison.ResidualsToTable().ToText()).Split('\n'), line => Assert.True(line.Length <= 100, line));
     }
 
+    /// <summary>A likelihood ratio has no known distribution where other parameters of the general law mean nothing.</summary>
+    [Fact]
+    public void A_Newtonian_liquid_within_Quemada_gets_no_probability()
+    {
+        var comparison = Simulated.Exact(FlowLaw.Quemada, 0.003, 2, 0.4).Compare(WeightedFits.Errors, FlowLaw.Newtonian, FlowLaw.Quemada);
+        Assert.Null(Assert.Single(comparison.Nested).Probability);
+        Assert.Equal("chi-square, no known distribution", comparison.NestedToTable().Rows[0][^1].Shown);
+    }
+
     /// <summary>Every nesting is one: the simple law's best curve is within reach of the general law, so its sum of squares is not below that of the general one.</summary>
     [Fact]
     public void A_general_law_never_fits_worse_than_its_special_case()

@@ -75,7 +75,7 @@ public sealed record LawComparison(Items<ComparedLaw> Laws, Items<NestedTest> Ne
     private static string Method(NestedTest test) => (test.ResidualDegreesOfFreedom is { } left ? $"F on {test.DegreesOfFreedom} and {left}" : "chi-square") + test.Kind switch
     {
         NestingKind.AtBound => ", half and half at the bound",
-        NestingKind.OthersMeaningless => ", approximate",
+        NestingKind.OthersMeaningless => ", no known distribution",
         _ => "",
     };
 }

@@ -9,6 +9,6 @@ public enum NestingKind
     /// <summary>At the bound of one parameter: an even mixture of chi-square with all and with one fewer degrees of freedom.</summary>
     AtBound,
 
-    /// <summary>Where other parameters of the general law mean nothing: no chi-square holds, the stated probability is an approximation.</summary>
+    /// <summary>Where other parameters of the general law mean nothing: no chi-square holds, so no probability is stated.</summary>
     OthersMeaningless,
 }
