@@ -15,7 +15,7 @@ namespace HemoRheo;
 /// <remarks>
 /// The likelihood ratio holds the logarithms of the variances, which are taken at the fitted stress. F = (exp(ratio / n) - 1) (n - p) / q, which is the usual F where the variances of both laws agree.
 /// At a bound: half the probability with q and half with q - 1 degrees of freedom (Self and Liang 1987, JASA 82:605-610).
-/// Where other parameters mean nothing: Davies 1977, Biometrika 64:247-254; a chi-square with q degrees of freedom rejected 14 % of simulated Newtonian curves within Cross's law at 5 %.
+/// Where other parameters mean nothing: Davies 1977, Biometrika 64:247-254.
 /// </remarks>
 public sealed record NestedTest(FlowLaw Simple, FlowLaw General, NestingKind Kind, string Where, double Statistic, int DegreesOfFreedom, int? ResidualDegreesOfFreedom, double? Probability)
 {
