@@ -10,6 +10,7 @@ internal sealed class LaneGroup
 
     private readonly LaneProblem _problem = new();
     private readonly LaneSolver _solver = new();
+    private readonly double[] _lowest = new double[Lane.Count];
     private readonly Lane[] _inverse = new Lane[LaneDual.Slopes * LaneDual.Slopes];
     private readonly Lane[] _response = new Lane[LaneDual.Slopes];
     private int? _held;
@@ -49,7 +50,7 @@ internal sealed class LaneGroup
     public void Put(FlowLaw law, int lane, CurveData curve, ReadOnlySpan<double> start)
     {
         _problem.Put(lane, curve.Rates, curve.Stresses, start, curve.Errors.Relative, curve.Errors.Floor.Pascals, curve.Deviations);
-        if (law.Boundary is { } boundary && _held is null) _problem.Fence(lane, boundary.Parameter, WallOf(law, curve));
+        _lowest[lane] = curve.LowestStress;
     }
 
     /// <summary>Solves one curve in all lanes.</summary>
@@ -60,7 +61,11 @@ internal sealed class LaneGroup
         Solve(law);
     }
 
-    public void Solve(FlowLaw law) => _solver.Solve(law, _problem);
+    public void Solve(FlowLaw law)
+    {
+        if (law.Boundary is { } boundary && _held is null) _problem.Fence(boundary.Parameter, WallOf(law, boundary, new(_lowest[0], _lowest[1], _lowest[2], _lowest[3])));
+        _solver.Solve(law, _problem);
+    }
 
     /// <summary>Whether the numbers of a lane stand as they are.</summary>
     public bool IsGood(int lane)
@@ -83,7 +88,9 @@ internal sealed class LaneGroup
 
     /// <summary>The scaled value at which a curve's parameter has run to its bound.</summary>
     public static double WallOf(FlowLaw law, CurveData curve) =>
-        law.Boundary is { } boundary ? law.Parameters[boundary.Parameter].ToScaled(boundary.WallAt(curve.LowestStress)) : double.NegativeInfinity;
+        law.Boundary is { } boundary ? WallOf(law, boundary, new(curve.LowestStress))[0] : double.NegativeInfinity;
+
+    private static Lane WallOf(FlowLaw law, LawBoundary boundary, Lane lowestStress) => law.Parameters[boundary.Parameter].ToScaled(boundary.WallAt(lowestStress));
 
     /// <summary>Everything there is to say of a lane.</summary>
     public LaneOutcome Outcome(int lane, CurveData curve)

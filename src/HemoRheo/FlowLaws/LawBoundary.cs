@@ -9,7 +9,7 @@ namespace HemoRheo;
 internal sealed record LawBoundary(int Parameter, string Law, double Wall, double Inside, bool OfLowestStress)
 {
     /// <summary>The value at which a curve's parameter has run to its bound.</summary>
-    public double WallAt(double lowestStress) => OfLowestStress ? Wall * lowestStress : Wall;
+    public Lane WallAt(Lane lowestStress) => OfLowestStress ? Wall * lowestStress : new(Wall);
 
     /// <summary>The value to start again from.</summary>
     public double InsideAt(double lowestStress) => OfLowestStress ? Inside * lowestStress : Inside;

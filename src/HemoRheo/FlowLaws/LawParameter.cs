@@ -13,13 +13,13 @@ public sealed record LawParameter(string Name, string Symbol, string Unit, doubl
     internal double ToNatural(double scaled) => ToNatural(new Lane(scaled))[0];
 
     /// <summary>From the natural scale to the fitting one; minus infinity at the lower bound.</summary>
-    internal double ToScaled(double natural)
-    {
-        var x = new Lane(natural);
-        return double.IsInfinity(Lower) ? natural
-            : double.IsInfinity(Upper) ? Lane.Log(x - Lower)[0]
-            : Lane.Log((x - Lower) / (Upper - x))[0];
-    }
+    internal double ToScaled(double natural) => ToScaled(new Lane(natural))[0];
+
+    /// <summary>From the natural scale to the fitting one, four at a time.</summary>
+    internal Lane ToScaled(Lane natural) =>
+        double.IsInfinity(Lower) ? natural
+        : double.IsInfinity(Upper) ? Lane.Log(natural - Lower)
+        : Lane.Log((natural - Lower) / (Upper - natural));
 
     /// <summary>From the fitting scale to the natural one, four at a time.</summary>
     internal Lane ToNatural(Lane scaled) =>

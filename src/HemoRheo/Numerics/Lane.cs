@@ -67,18 +67,23 @@ internal readonly struct Lane(Vector256<double> bits) : ILawNumber<Lane>
     public static Lane operator /(double x, Lane y) => new(Vector256.Create(x) / y.Bits);
 
     /// <summary>A mask, true where x lies below y; false where either is not a number.</summary>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public static Lane operator <(Lane x, Lane y) => new(Vector256.LessThan(x.Bits, y.Bits));
 
     /// <summary>A mask, true where x lies above y; false where either is not a number.</summary>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public static Lane operator >(Lane x, Lane y) => new(Vector256.GreaterThan(x.Bits, y.Bits));
 
     /// <summary>Both masks.</summary>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public static Lane operator &(Lane x, Lane y) => new(x.Bits & y.Bits);
 
     /// <summary>Either mask.</summary>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public static Lane operator |(Lane x, Lane y) => new(x.Bits | y.Bits);
 
     /// <summary>The opposite mask.</summary>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public static Lane operator ~(Lane x) => new(~x.Bits);
 
     public bool AnyTrue => Vector256.ExtractMostSignificantBits(Bits) != 0;
@@ -88,15 +93,19 @@ internal readonly struct Lane(Vector256<double> bits) : ILawNumber<Lane>
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public static Lane Select(Lane mask, Lane yes, Lane no) => new(Vector256.ConditionalSelect(mask.Bits, yes.Bits, no.Bits));
 
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public static Lane Abs(Lane x) => new(Vector256.Abs(x.Bits));
 
     /// <summary>The larger; y where x is not a number.</summary>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public static Lane Max(Lane x, Lane y) => Select(x > y, x, y);
 
     /// <summary>The smaller; y where x is not a number.</summary>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public static Lane Min(Lane x, Lane y) => Select(x < y, x, y);
 
     /// <summary>A mask, true where x is a finite number.</summary>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public static Lane IsFinite(Lane x) => Abs(x) < new Lane(double.PositiveInfinity);
 
     /// <summary>A mask, true where x is zero.</summary>

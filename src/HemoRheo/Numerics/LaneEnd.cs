@@ -5,7 +5,7 @@ namespace HemoRheo;
 /// <summary>How a lane ended, as numbers; the words are made when somebody asks.</summary>
 /// <param name="Reason">Why it stopped.</param>
 /// <param name="Iterations">Iterations used.</param>
-/// <param name="Size">The number that decided: a relative step, or a distance to the minimum in standard errors.</param>
+/// <param name="Size">The number that decided: the relative step, or the one to come where steps shrink steadily; or a distance to the minimum in standard errors.</param>
 /// <param name="AtWall">Whether a parameter ran below its wall.</param>
 internal readonly record struct LaneEnd(StopReason Reason, int Iterations, double Size, bool AtWall = false)
 {

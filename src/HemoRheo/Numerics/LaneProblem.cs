@@ -100,8 +100,8 @@ internal sealed class LaneProblem
         AllAreFree = false;
     }
 
-    /// <summary>Ends a lane when a parameter runs below a wall.</summary>
-    public void Fence(int lane, int parameter, double wall) => Numbers(_wall)[Lane.Count * parameter + lane] = wall;
+    /// <summary>Ends a lane when a parameter runs below its wall.</summary>
+    public void Fence(int parameter, Lane wall) => _wall[parameter] = wall;
 
     private static Span<double> Numbers(Span<Lane> lanes) => MemoryMarshal.Cast<Lane, double>(lanes);
 

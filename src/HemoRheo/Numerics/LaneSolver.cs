@@ -20,6 +20,15 @@ internal sealed class LaneSolver
     private LaneProblem _problem = new();
     private LaneSums _here = new();
     private LaneSums _there = new();
+    private Lane _active;
+    private Lane _accept;
+    private Lane _finishing;
+    private Lane _damping;
+    private Lane _relative;
+    private Lane _distance;
+    private Lane _predicted;
+    private Lane _last;
+    private Lane _lastShrinking;
 
     /// <summary>Estimates.</summary>
     public ReadOnlySpan<Lane> Estimates => _at.AsSpan(0, _problem.Size);
@@ -36,71 +45,126 @@ internal sealed class LaneSolver
     /// <summary>Solves; the answer stands in the properties until the next problem.</summary>
     public void Solve(ILaneModel model, LaneProblem problem)
     {
-        _problem = problem;
-        var size = problem.Size;
-        var at = _at.AsSpan(0, size);
-        var trial = _trial.AsSpan(0, size);
-        var step = _step.AsSpan(0, size);
-        var diagonal = _diagonal.AsSpan(0, size);
-        problem.Start.CopyTo(at);
-        diagonal.Clear();
-        _here.Begin(problem);
-        _there.Begin(problem);
-        _here.Evaluate(model, at, default);
-        var active = Lane.IsFinite(_here.ChiSquare);
-        for (var lane = 0; lane < Lane.Count; lane++) _ends[lane] = new(active.TrueAt(lane) ? StopReason.IterationLimit : StopReason.BadData, 0, 0);
-
-        var damping = new Lane(FirstDamping);
-        var last = new Lane(double.PositiveInfinity);
-        for (var iteration = 1; active.AnyTrue && iteration <= IterationLimit; iteration++)
+        Begin(model, problem);
+        for (var iteration = 1; _active.AnyTrue && iteration <= IterationLimit; iteration++)
         {
-            for (var k = 0; k < size; k++) diagonal[k] = Lane.Max(_here.Normal[k * size + k], diagonal[k]);
-            _factor.Factor(_here.Normal, damping, diagonal);
-            _factor.Solve(_here.Gradient, step);
-            var shorten = Shorten(step);
-            for (var k = 0; k < size; k++)
-            {
-                // A lane that is done stands still, so that its next evaluation has the bits of this one.
-                step[k] = step[k] * shorten & active;
-                trial[k] = at[k] + step[k];
-            }
-
-            var (relative, decrement, predicted) = Measure(step, at);
-            _there.Evaluate(model, trial, _here.Weights);
-            var gain = (_here.ChiSquare - _there.ChiSquareAsBefore) / predicted;
-            var finishing = predicted < 1e-10 * _here.ChiSquare + new Lane(1e-20);
-            var accept = active & Lane.IsFinite(_there.ChiSquareAsBefore) & (finishing | gain > new Lane(1e-4)) & _factor.LeastPivot > new Lane(1e-14);
-            if ((active & ~accept).AnyTrue) _here.Take(_there, accept);
-            else (_here, _there) = (_there, _here);
-            for (var k = 0; k < size; k++) at[k] = Lane.Select(accept, trial[k], at[k]);
-            damping = Damp(damping, gain, accept, finishing);
-
-            var atWall = Lane.Zero;
-            for (var k = 0; k < size; k++) atWall |= at[k] < problem.Wall[k];
-            var small = relative < new Lane(StepLimit);
-            var flat = decrement < GradientLimit * Lane.Sqrt(1 + _here.ChiSquare);
-            var stalled = finishing & relative < new Lane(1e-8) & relative > 0.5 * last;
-            var done = accept & (small | flat | stalled | atWall);
-            last = Lane.Select(accept, relative, last);
-            for (var lane = 0; done.AnyTrue && lane < Lane.Count; lane++)
-            {
-                if (!done.TrueAt(lane)) continue;
-                _ends[lane] = small.TrueAt(lane) ? new(StopReason.SmallStep, iteration, relative[lane], atWall.TrueAt(lane))
-                    : flat.TrueAt(lane) ? new(StopReason.SmallGradient, iteration, decrement[lane], atWall.TrueAt(lane))
-                    : atWall.TrueAt(lane) ? new(StopReason.IterationLimit, iteration, relative[lane], true)
-                    : new(StopReason.SmallDecrease, iteration, relative[lane]);
-            }
-
-            active &= ~done;
+            Propose();
+            Measure();
+            _there.Evaluate(model, _trial.AsSpan(0, problem.Size), _here.Weights);
+            Judge();
+            End(iteration);
         }
 
         for (var lane = 0; lane < Lane.Count; lane++)
         {
-            if (active.TrueAt(lane)) _ends[lane] = new(StopReason.IterationLimit, IterationLimit, last[lane]);
+            if (_active.TrueAt(lane)) _ends[lane] = new(StopReason.IterationLimit, IterationLimit, _last[lane]);
         }
 
-        diagonal.Clear();
-        _factor.Factor(_here.Normal, Lane.Zero, diagonal);
+        var none = _diagonal.AsSpan(0, problem.Size);
+        none.Clear();
+        _factor.Factor(_here.Normal, Lane.Zero, none);
+    }
+
+    private void Begin(ILaneModel model, LaneProblem problem)
+    {
+        _problem = problem;
+        var at = _at.AsSpan(0, problem.Size);
+        problem.Start.CopyTo(at);
+        Array.Clear(_diagonal);
+        _here.Begin(problem);
+        _there.Begin(problem);
+        _here.Evaluate(model, at, default);
+        _active = Lane.IsFinite(_here.ChiSquare);
+        for (var lane = 0; lane < Lane.Count; lane++) _ends[lane] = new(_active.TrueAt(lane) ? StopReason.IterationLimit : StopReason.BadData, 0, 0);
+        _damping = new(FirstDamping);
+        _last = new(double.PositiveInfinity);
+        _lastShrinking = new(double.PositiveInfinity);
+    }
+
+    /// <summary>The damped step, none of it longer than a longest one. A lane that is done stands still, so that its next evaluation has the bits of this one.</summary>
+    private void Propose()
+    {
+        var size = _problem.Size;
+        var step = _step.AsSpan(0, size);
+        var diagonal = _diagonal.AsSpan(0, size);
+        for (var k = 0; k < size; k++) diagonal[k] = Lane.Max(_here.Normal[k * size + k], diagonal[k]);
+        _factor.Factor(_here.Normal, _damping, diagonal);
+        _factor.Solve(_here.Gradient, step);
+        var longest = Lane.Zero;
+        foreach (var s in step) longest = Lane.Max(Lane.Abs(s), longest);
+        var shorten = Lane.Select(longest > new Lane(LongestStep), LongestStep / longest, new(1.0));
+        for (var k = 0; k < size; k++)
+        {
+            step[k] = step[k] * shorten & _active;
+            _trial[k] = _at[k] + step[k];
+        }
+    }
+
+    /// <summary>The size of the step, how far the minimum is, and the decrease that the linear model foretells.</summary>
+    private void Measure()
+    {
+        var size = _problem.Size;
+        var step = _step.AsSpan(0, size);
+        var normal = _here.Normal;
+        var gradient = _here.Gradient;
+        var relative = Lane.Zero;
+        var along = Lane.Zero;
+        var curved = Lane.Zero;
+        for (var j = 0; j < step.Length; j++)
+        {
+            relative = Lane.Max(Lane.Abs(step[j]) / (1 + Lane.Abs(_at[j])), relative);
+            along += step[j] * gradient[j];
+            var row = Lane.Zero;
+            for (var k = 0; k < step.Length; k++) row += normal[j * size + k] * step[k];
+            curved += step[j] * row;
+        }
+
+        _relative = relative;
+        _distance = Lane.Sqrt(Lane.Max(along, Lane.Zero));
+        _predicted = along + along - curved;
+    }
+
+    /// <summary>Takes the trial where the sum of squares falls as foretold, or where it is too flat to judge by; sets the damping.</summary>
+    private void Judge()
+    {
+        var gain = (_here.ChiSquare - _there.ChiSquareAsBefore) / _predicted;
+        _finishing = _predicted < 1e-10 * _here.ChiSquare + new Lane(1e-20);
+        _accept = _active & Lane.IsFinite(_there.ChiSquareAsBefore) & (_finishing | gain > new Lane(1e-4)) & _factor.LeastPivot > new Lane(1e-14);
+        if ((_active & ~_accept).AnyTrue) _here.Take(_there, _accept);
+        else (_here, _there) = (_there, _here);
+        for (var k = 0; k < _problem.Size; k++) _at[k] = Lane.Select(_accept, _trial[k], _at[k]);
+
+        var less = _damping * 0.05;
+        less = Lane.Select(less < new Lane(1e-7), Lane.Zero, less);
+        var more = Lane.Max(_damping * 8, new(1e-3));
+        var accepted = Lane.Select(_finishing, Lane.Zero, Lane.Select(gain > new Lane(0.5), less, Lane.Select(gain > new Lane(0.2), _damping, more)));
+        _damping = Lane.Select(_accept, accepted, more);
+    }
+
+    /// <summary>Ends the lanes that have arrived: the step, or the one to come where steps shrink steadily, is small; or a parameter is beyond its wall.</summary>
+    private void End(int iteration)
+    {
+        var atWall = Lane.Zero;
+        for (var k = 0; k < _problem.Size; k++) atWall |= _at[k] < _problem.Wall[k];
+        var shrinking = _relative / _last;
+        var next = Lane.Select(_finishing, _relative * Lane.Max(shrinking, _lastShrinking), _relative);
+        var size = Lane.Min(_relative, next);
+        var small = size < new Lane(StepLimit);
+        var flat = _distance < GradientLimit * Lane.Sqrt(1 + _here.ChiSquare);
+        var stalled = _finishing & _relative < new Lane(1e-8) & _relative > 0.5 * _last;
+        var done = _accept & (small | flat | stalled | atWall);
+        _last = Lane.Select(_accept, _relative, _last);
+        _lastShrinking = Lane.Select(_accept, shrinking, _lastShrinking);
+        if (!done.AnyTrue) return;
+        _active &= ~done;
+        for (var lane = 0; lane < Lane.Count; lane++)
+        {
+            if (!done.TrueAt(lane)) continue;
+            _ends[lane] = small.TrueAt(lane) ? new(StopReason.SmallStep, iteration, size[lane], atWall.TrueAt(lane))
+                : flat.TrueAt(lane) ? new(StopReason.SmallGradient, iteration, _distance[lane], atWall.TrueAt(lane))
+                : atWall.TrueAt(lane) ? new(StopReason.IterationLimit, iteration, _relative[lane], true)
+                : new(StopReason.SmallDecrease, iteration, _relative[lane]);
+        }
     }
 
     /// <summary>Inverse of the normal equations, row by row; zero rows for parameters that were held.</summary>
@@ -134,38 +198,4 @@ internal sealed class LaneSolver
 
     /// <summary>Standardized residual of a point.</summary>
     public Lane Residual(int point) => (_problem.Y[point] - _here.Values[point]) * Lane.Sqrt(_here.Weights[point]);
-
-    /// <summary>Factor that keeps every step on the fitting scale below a longest one.</summary>
-    private static Lane Shorten(ReadOnlySpan<Lane> step)
-    {
-        var longest = Lane.Zero;
-        foreach (var s in step) longest = Lane.Max(Lane.Abs(s), longest);
-        return Lane.Select(longest > new Lane(LongestStep), LongestStep / longest, new(1.0));
-    }
-
-    private (Lane Relative, Lane Decrement, Lane Predicted) Measure(ReadOnlySpan<Lane> step, ReadOnlySpan<Lane> at)
-    {
-        var normal = _here.Normal;
-        var gradient = _here.Gradient;
-        var (relative, along, curved) = (Lane.Zero, Lane.Zero, Lane.Zero);
-        for (var j = 0; j < step.Length; j++)
-        {
-            relative = Lane.Max(Lane.Abs(step[j]) / (1 + Lane.Abs(at[j])), relative);
-            along += step[j] * gradient[j];
-            var row = Lane.Zero;
-            for (var k = 0; k < step.Length; k++) row += normal[j * step.Length + k] * step[k];
-            curved += step[j] * row;
-        }
-
-        return (relative, Lane.Sqrt(Lane.Max(along, Lane.Zero)), along + along - curved);
-    }
-
-    private static Lane Damp(Lane damping, Lane gain, Lane accept, Lane finishing)
-    {
-        var less = damping * 0.05;
-        less = Lane.Select(less < new Lane(1e-7), Lane.Zero, less);
-        var more = Lane.Max(damping * 8, new(1e-3));
-        var accepted = Lane.Select(finishing, Lane.Zero, Lane.Select(gain > new Lane(0.5), less, Lane.Select(gain > new Lane(0.2), damping, more)));
-        return Lane.Select(accept, accepted, more);
-    }
 }
