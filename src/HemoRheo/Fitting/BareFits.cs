@@ -21,7 +21,7 @@ internal static class BareFits
             for (var lane = 0; lane < Lane.Count; lane++)
             {
                 var member = Math.Min(lane, members.Length - 1);
-                lanes.Put(law, lane, members[member], starts.Slice((from + member) * size, size));
+                lanes.Put(lane, members[member], starts.Slice((from + member) * size, size));
             }
 
             lanes.Solve(law);
@@ -44,7 +44,12 @@ internal static class BareFits
     }
 
     /// <summary>A curve that its lane did not settle: at its bound, or by the long way.</summary>
-    private static (bool Converged, double ChiSquare) Settle(LaneGroup lanes, FlowLaw law, CurveData curve, ReadOnlySpan<double> start, Span<double> estimates)
+    /// <param name="lanes">A group of lanes.</param>
+    /// <param name="law">The law.</param>
+    /// <param name="curve">The curve.</param>
+    /// <param name="start">Where it started.</param>
+    /// <param name="estimates">Where its lane ended; receives the estimates.</param>
+    public static (bool Converged, double ChiSquare) Settle(LaneGroup lanes, FlowLaw law, CurveData curve, ReadOnlySpan<double> start, Span<double> estimates)
     {
         lanes.SolveAlone(law, curve, start);
         if (lanes.EndOf(0).AtWall && BoundaryCase.Solve(lanes, law, curve, estimates))

@@ -30,34 +30,46 @@ internal sealed class LaneGroup
     {
         var group = OfThisThread;
         group.Begin(law, curves, held);
-        for (var lane = 0; lane < Lane.Count; lane++) group.Put(law, lane, At(curves, lane), At(starts, lane));
+        for (var lane = 0; lane < Lane.Count; lane++) group.Put(lane, At(curves, lane), At(starts, lane));
         group.Solve(law);
         var outcomes = new LaneOutcome[curves.Length];
         for (var lane = 0; lane < outcomes.Length; lane++) outcomes[lane] = group.Outcome(lane, curves[lane]);
         return outcomes;
     }
 
-    /// <summary>Makes room for curves, each of which must then be put.</summary>
+    /// <summary>Makes room for curves; every lane must then be put.</summary>
     public void Begin(FlowLaw law, ReadOnlySpan<CurveData> curves, int? held = null)
     {
         var points = 0;
         foreach (var curve in curves) points = Math.Max(points, curve.Rates.Length);
+        Begin(law, points, curves[0].Deviations is not null, held);
+    }
+
+    /// <summary>Makes room for curves; every lane must then be put.</summary>
+    public void Begin(FlowLaw law, int points, bool deviationsAreGiven, int? held = null)
+    {
         _held = held;
-        _problem.Begin(points, law.Parameters.Count, curves[0].Deviations is not null);
+        _problem.Begin(points, law.Parameters.Count, deviationsAreGiven);
         if (held is { } parameter) _problem.Hold(parameter);
     }
 
-    public void Put(FlowLaw law, int lane, CurveData curve, ReadOnlySpan<double> start)
+    public void Put(int lane, CurveData curve, ReadOnlySpan<double> start)
     {
         _problem.Put(lane, curve.Rates, curve.Stresses, start, curve.Errors.Relative, curve.Errors.Floor.Pascals, curve.Deviations);
         _lowest[lane] = curve.LowestStress;
+    }
+
+    public void Put(int lane, ReadOnlySpan<double> rates, ReadOnlySpan<double> stresses, ErrorModel errors, ReadOnlySpan<double> start)
+    {
+        _problem.Put(lane, rates, stresses, start, errors.Relative, errors.Floor.Pascals);
+        _lowest[lane] = Lowest(stresses);
     }
 
     /// <summary>Solves one curve in all lanes.</summary>
     public void SolveAlone(FlowLaw law, CurveData curve, ReadOnlySpan<double> start, int? held = null)
     {
         Begin(law, new(in curve), held);
-        for (var lane = 0; lane < Lane.Count; lane++) Put(law, lane, curve, start);
+        for (var lane = 0; lane < Lane.Count; lane++) Put(lane, curve, start);
         Solve(law);
     }
 
@@ -104,6 +116,13 @@ internal sealed class LaneGroup
         for (var i = 0; i < residuals.Length; i++) residuals[i] = _solver.Residual(i)[lane];
         var end = _solver.Ends[lane];
         return new(new(Column(_solver.Estimates, lane), Column(inverse, lane), Column(response, lane), residuals, _solver.ChiSquare[lane], end.Said(), _held), end.AtWall, IsGood(lane));
+    }
+
+    private static double Lowest(ReadOnlySpan<double> stresses)
+    {
+        var lowest = double.PositiveInfinity;
+        foreach (var stress in stresses) lowest = Math.Min(lowest, stress);
+        return lowest;
     }
 
     private static double[] Column(ReadOnlySpan<Lane> lanes, int lane)

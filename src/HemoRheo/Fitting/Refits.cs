@@ -14,29 +14,44 @@ internal static class Refits
         double[] rates = [.. fit.Curve.Points.Select(point => point.Rate.ReciprocalSeconds)];
         var start = StartOf(fit);
         var estimates = new double[replicates * size];
-        Array.Fill(estimates, double.NaN);
-        foreach (var group in Enumerable.Range(0, replicates).Chunk(Lane.Count))
+        var drawn = new double[Lane.Count * rates.Length];
+        var lanes = LaneGroup.OfThisThread;
+        var good = new bool[Lane.Count];
+        for (var from = 0; from < replicates; from += Lane.Count)
         {
-            CurveData[] drawn = [.. group.Select(i => Drawn(rates, i, fit.Errors, draw))];
-            int[] sound = [.. Enumerable.Range(0, drawn.Length).Where(i => drawn[i].LowestStress > 0)];
-            if (sound.Length == 0) continue;
-            CurveData[] curves = [.. sound.Select(i => drawn[i])];
-            var outcomes = LaneGroup.Outcomes(fit.Law, curves, [.. curves.Select(_ => start)]);
-            for (var lane = 0; lane < curves.Length; lane++)
+            var members = Math.Min(Lane.Count, replicates - from);
+            for (var lane = 0; lane < members; lane++) draw(from + lane, Stresses(lane));
+            lanes.Begin(fit.Law, rates.Length, deviationsAreGiven: false);
+            for (var lane = 0; lane < Lane.Count; lane++) lanes.Put(lane, rates, Stresses(Math.Min(lane, members - 1)), fit.Errors, start);
+            lanes.Solve(fit.Law);
+            for (var lane = 0; lane < members; lane++)
             {
-                var solution = outcomes[lane].Good ? outcomes[lane].Solution : Rescue.Of(fit.Law, curves[lane], start, outcomes[lane]);
-                if (solution.End.Converged) solution.Scaled.CopyTo(estimates, group[sound[lane]] * size);
+                good[lane] = lanes.IsGood(lane);
+                lanes.Estimates(lane, EstimatesOf(from + lane));
+            }
+
+            for (var lane = 0; lane < members; lane++)
+            {
+                var sound = AreSound(Stresses(lane));
+                var settled = sound && (good[lane] || BareFits.Settle(lanes, fit.Law, new(rates, Stresses(lane).ToArray(), fit.Errors), start, EstimatesOf(from + lane)).Converged);
+                if (!settled) EstimatesOf(from + lane).Fill(double.NaN);
             }
         }
 
         return estimates;
+
+        Span<double> Stresses(int lane) => drawn.AsSpan(lane * rates.Length, rates.Length);
+        Span<double> EstimatesOf(int replicate) => estimates.AsSpan(replicate * size, size);
     }
 
-    private static CurveData Drawn(double[] rates, int replicate, ErrorModel errors, Action<int, Span<double>> draw)
+    private static bool AreSound(ReadOnlySpan<double> stresses)
     {
-        var stresses = new double[rates.Length];
-        draw(replicate, stresses);
-        return new(rates, stresses, errors);
+        foreach (var stress in stresses)
+        {
+            if (!(stress > 0 && double.IsFinite(stress))) return false;
+        }
+
+        return true;
     }
 
     /// <summary>The estimates; a parameter that is held starts inside its range.</summary>

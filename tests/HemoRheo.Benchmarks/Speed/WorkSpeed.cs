@@ -8,7 +8,7 @@ namespace HemoRheo.Benchmarks.Speed;
 /// <summary>The lane engine beside MathNet.Numerics' Levenberg-Marquardt on the curves of a file.</summary>
 /// <remarks>
 /// Method: one thread; both fit the same curves from the same starts (the law's own first guess) on the same parameter scale, with weights fixed from the data (1 % and 0.3 mPa); neither computes a covariance.
-/// Both are warmed for a second, then timed in turn by the processor time of the process, five rounds each of at least half a second, and the best round counts.
+/// Both are warmed for three seconds, then timed in turn by the processor time of the process, five rounds each of at least half a second, and the best round counts.
 /// Sums of squares are computed alike from the estimates of both; sums within 1e-9 of each other are a tie. Bytes are those the lane engine allocates in one pass over all curves once warm.
 /// </remarks>
 internal static class WorkSpeed
@@ -94,7 +94,7 @@ internal static class WorkSpeed
     private static void Warm(Action work)
     {
         var watch = Stopwatch.StartNew();
-        while (watch.ElapsedMilliseconds < 1000) work();
+        while (watch.ElapsedMilliseconds < 3000) work();
     }
 
     /// <summary>Passes a second of processor time.</summary>
