@@ -1,6 +1,6 @@
 namespace HemoRheo;
 
-/// <summary>A measurand of one fit, with the fit's own uncertainty and no more: the scatter between loadings and the instrument are not in it.</summary>
+/// <summary>A measurand of one fit, with the fit's own uncertainty and no more: the instrument is not in it, and the scatter between loadings only where loadings were fitted together.</summary>
 /// <param name="Measurand">What it is.</param>
 /// <param name="Value">The value on the measurand's working scale.</param>
 /// <param name="Extrapolated">Whether it lies outside the kept shear rates.</param>
@@ -16,5 +16,5 @@ public sealed record Estimate(Measurand Measurand, Value Value, bool Extrapolate
     /// <inheritdoc/>
     public override string ToString() => string.Create(
         System.Globalization.CultureInfo.InvariantCulture,
-        $"{Measurand.Name}: {Shown:G5} {Measurand.Shown} ({Interval().Lower:G5} to {Interval().Upper:G5}, fit alone){(Extrapolated ? ", extrapolated" : "")}");
+        $"{Measurand.Name}: {Shown:G5} {Measurand.Shown} ({Interval().Lower:G5} to {Interval().Upper:G5}, {(Value.Part(SourceKind.Loading) is null ? "fit alone" : "fit and loadings")}){(Extrapolated ? ", extrapolated" : "")}");
 }

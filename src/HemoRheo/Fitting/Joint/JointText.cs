@@ -1,0 +1,36 @@
+using System.Globalization;
+using System.Text;
+
+namespace HemoRheo;
+
+/// <summary>Joint fits as plain text.</summary>
+internal static class JointText
+{
+    /// <summary>A joint fit: how it ended, its parameters, whether the curves share them, and its findings; lines of at most 100 signs.</summary>
+    public static string Of(JointFit fit)
+    {
+        var text = new StringBuilder();
+        text.Append(CultureInfo.InvariantCulture, $"{fit.LawName}, {fit.Curves.Count} curves together{(fit.Usable ? "" : ", not usable")}\n{fit.Convergence.Message}\n");
+        if (fit.Parameters.Count > 0)
+        {
+            text.Append(fit.ToTable().ToText());
+            text.Append(CultureInfo.InvariantCulture, $"chi-square {fit.Fit.ChiSquare:F1} on {fit.Fit.DegreesOfFreedom} degrees of freedom\n");
+        }
+
+        if (fit.Compatibility is { } shared) text.Append(CultureInfo.InvariantCulture, $"{(shared.Contradicts ? "sharing contradicted" : "sharing not contradicted")}: {shared}\n");
+        if (fit.Findings.Count > 0) text.Append(Table.Of("code", "finding").WithRows(fit.Findings, finding => [finding.Code, finding.Message]).ToText());
+        return text.ToString().TrimEnd('\n');
+    }
+
+    /// <summary>A curve in words.</summary>
+    public static string Name(FlowCurve curve) => $"{curve.Label.Sample}, loading {curve.Label.Loading}";
+
+    /// <summary>The unit that a parameter is shown in.</summary>
+    public static Unit ShownUnit(LawParameter parameter) => parameter.Unit switch
+    {
+        "Pa" => ShownUnits.Millipascal,
+        "Pa.s" => ShownUnits.MillipascalSecond,
+        "1/s" => ShownUnits.PerSecond,
+        _ => new(Quantity.Number, parameter.Unit, parameter.Unit, 1),
+    };
+}
