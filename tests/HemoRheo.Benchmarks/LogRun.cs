@@ -23,7 +23,7 @@ internal static class LogRun
             for (var round = 1; round <= 3; round++)
             {
                 var day = checks + round;
-                yield return Invariant($"round {round}: load {Milliseconds(() => InstrumentLog.Open(path).Read()):F0} ms, record {Milliseconds(() => Record(log, day, 0)):F0} ms, verify {Milliseconds(() => log.Verify()):F0} ms, export {Milliseconds(() => log.ToCsv()):F0} ms, read and chart {Milliseconds(() => log.Read().ControlChart()):F0} ms");
+                yield return Invariant($"round {round}: load {Time(() => InstrumentLog.Open(path).Read())}, record {Time(() => Record(log, day, 0))}, verify {Time(() => log.Verify())}, export {Time(() => log.ToCsv())}, read and chart {Time(() => log.Read().ControlChart())}");
             }
         }
         finally
@@ -52,10 +52,10 @@ internal static class LogRun
         log.Append(InventedLoggedCheck.Of(Invariant($"C{day}"), at, error), at.AddMinutes(10), "benchmark");
     }
 
-    private static double Milliseconds(Action action)
+    private static string Time(Action action)
     {
-        var clock = Stopwatch.StartNew();
+        var (clock, processor) = (Stopwatch.StartNew(), Environment.CpuUsage.TotalTime);
         action();
-        return clock.Elapsed.TotalMilliseconds;
+        return Invariant($"{clock.Elapsed.TotalMilliseconds:F0} ms ({(Environment.CpuUsage.TotalTime - processor).TotalMilliseconds:F0} of processors)");
     }
 }

@@ -76,6 +76,29 @@ public sealed class InstrumentLogTroubleTests : IDisposable
     }
 
     [Fact]
+    public void A_byte_changed_anywhere_is_never_taken_for_the_log_as_it_was_written()
+    {
+        var (bytes, written) = (File.ReadAllBytes(_folder.Path), _folder.Log.ToCsv());
+        var random = RandomStream.Of(8, "damage", 0);
+        for (var i = 0; i < 150; i++)
+        {
+            var damaged = (byte[])bytes.Clone();
+            damaged[(int)(random.Uniform() * bytes.Length)] ^= (byte)(1 << (int)(random.Uniform() * 8));
+            File.WriteAllBytes(_folder.Path, damaged);
+            try
+            {
+                var log = InstrumentLog.Open(_folder.Path);
+                Assert.True(!log.Verify().Sound || log.ToCsv() == written);
+                _ = log.Read().Findings;
+            }
+            catch (InstrumentLogException)
+            {
+                // Told that it is damaged or no log.
+            }
+        }
+    }
+
+    [Fact]
     public void An_empty_file_was_interrupted_and_can_be_created_again()
     {
         File.WriteAllBytes(_folder.Path, []);

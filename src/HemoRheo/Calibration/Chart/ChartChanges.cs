@@ -6,6 +6,11 @@ namespace HemoRheo;
 /// <param name="Step">As a step.</param>
 /// <param name="Drift">As a drift.</param>
 /// <param name="ChecksSinceSignal">Checks after the one that signaled first.</param>
+/// <remarks>
+/// Simulated (1,000 charts each, <c>HemoRheo.Benchmarks chart 100000</c>): the 95 % interval of a step of 1.5 to 5 sigma holds the moment in 98 to 100 %, its ends being checks;
+/// that of a drift of 0.1 to 0.8 sigma a check in 72 to 84 % when the chart has just signaled, in 94 to 96 % from five checks later on.
+/// The earliest moment of either is not too late in 90 to 92 % of drifts at the signal, in 95 to 97 % from five checks later on, in 99 to 100 % of steps.
+/// </remarks>
 public sealed record ChartChanges(ChartChange Step, ChartChange Drift, int ChecksSinceSignal)
 {
     // Royall 1997, Statistical Evidence: a likelihood ratio of 8 is fairly strong evidence.

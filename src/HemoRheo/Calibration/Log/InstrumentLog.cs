@@ -73,7 +73,7 @@ public sealed class InstrumentLog
     public LogVerification Verify(string? noted = null)
     {
         var rows = _file.Rows();
-        return LogChain.Verify(rows, rows.ConvertAll(LogJson.TryRead), noted);
+        return LogChain.Verify(rows, LogJson.TryRead(rows), noted);
     }
 
     /// <summary>

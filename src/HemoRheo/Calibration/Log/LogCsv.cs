@@ -8,21 +8,20 @@ internal static class LogCsv
 {
     private const string Header = "entry,kind,recorded_at,recorded_by,corrects,happened_at,name,filling,fluid,lot,temperature_degC,measured_Pa.s,expected_Pa.s,error_ln,standard_uncertainty_ln,limit,outcome,text,content,digest\n";
 
-    internal static string Write(IEnumerable<LogRow> rows)
+    internal static string Write(IReadOnlyList<LogRow> rows)
     {
         var text = new StringBuilder(Header);
-        foreach (var row in rows)
+        foreach (var (row, what) in rows.Zip(LogJson.TryRead(rows)))
         {
-            string[] fields = [row.Number.ToString(CultureInfo.InvariantCulture), row.Kind, row.RecordedAt, row.By, .. Columns(row), row.Content, row.Digest];
+            string[] fields = [row.Number.ToString(CultureInfo.InvariantCulture), row.Kind, row.RecordedAt, row.By, .. Columns(what), row.Content, row.Digest];
             text.AppendJoin(',', fields.Select(Quoted)).Append('\n');
         }
 
         return text.ToString();
     }
 
-    private static IEnumerable<string> Columns(LogRow row)
+    private static IEnumerable<string> Columns(LoggedEvent? what)
     {
-        var what = LogJson.TryRead(row);
         var (corrects, why) = what is LoggedCorrection correction ? (correction.Of.ToString(CultureInfo.InvariantCulture), correction.Why) : ("", "");
         var said = (what as LoggedCorrection)?.Instead ?? what;
         var happened = said?.Happened is { } moment ? LogMoment.Text(moment) : "";

@@ -36,6 +36,14 @@ internal static class LogJson
         }
     }
 
+    /// <summary>What rows say, one by one on all processors; null where a row cannot be read.</summary>
+    internal static LoggedEvent?[] TryRead(IReadOnlyList<LogRow> rows)
+    {
+        var read = new LoggedEvent?[rows.Count];
+        Parallel.For(0, rows.Count, i => read[i] = TryRead(rows[i]));
+        return read;
+    }
+
     /// <summary>What a row says; null where that cannot be read.</summary>
     internal static LoggedEvent? TryRead(LogRow row)
     {

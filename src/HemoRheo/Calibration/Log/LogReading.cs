@@ -7,7 +7,7 @@ internal static class LogReading
 {
     internal static LogContents Of(string instrument, List<LogRow> rows)
     {
-        var read = rows.ConvertAll(LogJson.TryRead);
+        var read = LogJson.TryRead(rows);
         var entries = rows.Select((row, i) => read[i] is { } what ? LogEntries.Of(row, what, i == 0 ? null : rows[i - 1]) : null).OfType<LogEntry>().ToItems();
         var standing = Standing(entries).ToItems();
         var verification = LogChain.Verify(rows, read);
