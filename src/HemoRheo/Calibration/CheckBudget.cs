@@ -4,18 +4,13 @@ namespace HemoRheo;
 
 /// <summary>
 /// Signed contributions to a check's ln(measured/expected), each the change when its input is raised by one standard uncertainty:
-/// certified value -U/k; the fluid's temperature coefficient +(T - certificate's) u; thermometer +coefficient u; torque zero; fit.
+/// certified value -U/k; the fluid's temperature coefficient +(T - certificate's) u, or the interpolation of its certificate; thermometer +coefficient u; torque zero; fit.
 /// </summary>
 internal static class CheckBudget
 {
     internal static IEnumerable<Contribution> Of(Instrument instrument, Recording recording, CalibrationFluid fluid, Temperature temperature, FittedLaw fit)
     {
-        yield return new(new(SourceKind.Certificate, $"{fluid.Name}, {fluid.Lot}"), -fluid.RelativeExpandedUncertainty / fluid.CoverageFactor);
-        if (!fluid.IsWater)
-        {
-            yield return new(new(SourceKind.FluidBeta, fluid.Name), (temperature.DegreesCelsius - fluid.At.DegreesCelsius) * fluid.PerKelvinUncertainty);
-        }
-
+        foreach (var part in fluid.LnViscosityAt(temperature).Parts) yield return part.Times(-1);
         yield return new(new(SourceKind.Thermometer, instrument.Name), fluid.PerKelvinAt(temperature) * instrument.Thermometer);
         if (fit.Curve.StressPerTorque is { } stressPerTorque && instrument.TorqueZero > 0)
         {

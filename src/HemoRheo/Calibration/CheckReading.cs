@@ -7,7 +7,7 @@ namespace HemoRheo;
 /// <param name="Fault">Why it gives none; null where it gives one.</param>
 internal sealed record CheckReading(InstrumentCheck? Check, Finding? Fault)
 {
-    /// <summary>Fits one viscosity to the readings above the torque floor and holds it against the fluid's at their mean temperature.</summary>
+    /// <summary>Fits one viscosity to the readings above the torque floor and in laminar flow, and holds it against the fluid's at their mean temperature.</summary>
     internal static CheckReading Of(Study study, Instrument instrument, Recording recording)
     {
         var where = new CurveLabel(recording.Sample, recording.Loading, study.Analysis.Ramp, recording).Where;
@@ -25,16 +25,10 @@ internal sealed record CheckReading(InstrumentCheck? Check, Finding? Fault)
 
         var raw = recording.ToCurve(study, study.Analysis.Ramp);
         var curve = raw.WithFindings(TorqueFloor.Judge(raw, study));
-        if (curve.Points.Count == 0) return Without(CalibrationFindings.FitUnusable.At(where, $"Check '{recording.Sample}' keeps none of {recording.Readings.Count} readings."));
-        if (curve.MeanTemperature is not { } temperature)
-        {
-            return Without(CalibrationFindings.TemperatureUnusable.At(where, $"Check '{recording.Sample}' states no temperature."));
-        }
-
-        if (fluid.IsWater && !Water.ValidKelvins.Contains(temperature.Kelvins))
-        {
-            return Without(CalibrationFindings.TemperatureUnusable.At(where, $"Check '{recording.Sample}' was taken at {temperature}, where the viscosity of water is not known."));
-        }
+        if (Unusable(fluid, curve) is { } fault) return Without(fault);
+        if (ExportedGeometry.Contradiction(study, recording) is { } other) return Without(other);
+        curve = curve.WithFindings(LaminarFlow.Judge(study, curve, fluid));
+        if (Unusable(fluid, curve) is { } left) return Without(left);
 
         FittedLaw fit = curve.Fit(FlowLaw.Newtonian, ReadingErrorModel.Of(study, curve));
         if (!fit.Usable)
@@ -42,10 +36,34 @@ internal sealed record CheckReading(InstrumentCheck? Check, Finding? Fault)
             return Without(CalibrationFindings.FitUnusable.At(where, $"Check '{recording.Sample}' gives no viscosity: {fit.Convergence.Message}{string.Concat(fit.Findings.Select(finding => "; " + finding.Message))}"));
         }
 
-        return new(Judged(study, instrument, recording, fluid, temperature, fit), null);
+        return new(Judged(study, instrument, recording, fluid, curve.MeanTemperature!.Value, fit), null);
     }
 
     private static CheckReading Without(Finding fault) => new(null, fault);
+
+    /// <summary>Why a curve cannot be held against the fluid; null where it can.</summary>
+    private static Finding? Unusable(CalibrationFluid fluid, FlowCurve curve)
+    {
+        var (where, name) = (curve.Label.Where, curve.Label.Sample);
+        if (curve.Points.Count == 0)
+        {
+            var why = curve.SetAside.Count == 0 ? "" : $" The first: {curve.SetAside[0].Findings[0].Message}";
+            return CalibrationFindings.FitUnusable.At(where, $"Check '{name}' keeps none of {curve.Label.Recording!.Readings.Count} readings.{why}");
+        }
+
+        if (curve.MeanTemperature is not { } temperature) return CalibrationFindings.TemperatureUnusable.At(where, $"Check '{name}' states no temperature.");
+        var range = fluid.ValidTemperatures();
+        if (!range.Contains(temperature.DegreesCelsius))
+        {
+            return CalibrationFindings.TemperatureUnusable.At(where, fluid.IsWater
+                ? $"Check '{name}' was taken at {temperature}, where the viscosity of water is not known."
+                : Invariant($"Check '{name}' was taken at {temperature}; the viscosity of '{fluid.Name}' is known from {range.Lower:G4} to {range.Upper:G4} degC only."));
+        }
+
+        return fluid.Certificate is { } certificate && CertificateCurve.Of(certificate) is null
+            ? CalibrationFindings.CertificateUnusable.At(where, $"The rows of {certificate.File} follow no Vogel-Fulcher-Tammann curve; check '{name}' has nothing to be held against.")
+            : null;
+    }
 
     private static InstrumentCheck Judged(Study study, Instrument instrument, Recording recording, CalibrationFluid fluid, Temperature temperature, FittedLaw fit)
     {
@@ -53,7 +71,13 @@ internal sealed record CheckReading(InstrumentCheck? Check, Finding? Fault)
         var expected = fluid.ViscosityAt(temperature);
         var error = new Value(fit.Scaled[0] - Math.Log(expected.PascalSeconds), CheckBudget.Of(instrument, recording, fluid, temperature, fit).ToItems());
         var name = recording.Loading == 1 ? recording.Sample : Invariant($"{recording.Sample}/{recording.Loading}");
-        var findings = recording.Findings.Concat(fit.Curve.SetAside.SelectMany(aside => aside.Findings)).Concat(fit.Curve.Findings).Concat(fit.Findings).Concat(ReadingErrorModel.Findings(study, fit.Curve)).Concat(OwnFindings(instrument, recording, fit));
+        var findings = recording.Findings
+            .Concat(fit.Curve.SetAside.SelectMany(aside => aside.Findings))
+            .Concat(fit.Curve.Findings)
+            .Concat(fit.Findings)
+            .Concat(ReadingErrorModel.Findings(study, fit.Curve))
+            .Concat(OwnFindings(instrument, recording, fit))
+            .Concat(FluidFindings.Of(study, recording, fluid, temperature));
         return new InstrumentCheck(
             name, instrument.Name, fluid, recording.StartedAt, temperature, measured, expected, error, instrument.CheckLimit, CheckOutcome.CannotTell, 0, fit, findings.ToItems()).Judged(study.Analysis.Level);
     }

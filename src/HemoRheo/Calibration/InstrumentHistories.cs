@@ -14,6 +14,7 @@ internal static class InstrumentHistories
         var scatter = CheckScatter.Of(instrument, spans);
         var findings = read.Select(reading => reading.Fault).OfType<Finding>()
             .Concat(fillings.Where(filling => filling.Recordings > 1).Select(ReadAgain))
+            .Concat(own.GroupBy(check => check.At).Where(same => same.Select(check => check.Fit.Curve.Label.Sample).Distinct().Count() > 1).Select(AtOneTime))
             .Concat(ScatterFindings(instrument, spans, scatter));
         return new(instrument, checks, scatter is null ? [] : Periods(instrument, spans, scatter).ToItems(), findings.ToItems());
     }
@@ -31,6 +32,12 @@ internal static class InstrumentHistories
     {
         var (check, loading) = (filling.Recording.Sample, filling.Recording.Loading);
         return CalibrationFindings.OneFilling.At(filling.Recording.Where with { Sample = check, Loading = loading }, $"{filling.Recordings} recordings of filling {loading} of check '{check}' count as one.");
+    }
+
+    private static Finding AtOneTime(IEnumerable<InstrumentCheck> checks)
+    {
+        var all = checks.ToArray();
+        return CalibrationFindings.OneTime.At(all[^1].Fit.Curve.Label.Where, FormattableString.Invariant($"Checks {string.Join(" and ", all.Select(check => $"'{check.Name}'"))} of '{all[0].Instrument}' start at {all[0].At:yyyy-MM-dd HH:mm:ss zzz}."));
     }
 
     private static IEnumerable<Finding> ScatterFindings(Instrument instrument, Items<CheckSpan> spans, CheckScatter? scatter)

@@ -11,6 +11,9 @@ public static class Water
     private static readonly double[] Factors = [280.68, 511.45, 61.131, 0.45903];
     private static readonly double[] Powers = [-1.9, -7.7, -19.6, -40];
 
+    private static readonly (double Factor, int Power)[] Warm = [(6.74458446e3, 4), (-2.22521604e5, 5), (1.00231247e8, 7), (-1.63552118e9, 8), (8.32299658e9, 9)];
+    private static readonly (double Factor, int Power)[] Cold = [(5.78545292e-3, 1), (-1.53195665e-2, 2), (3.11337859e-2, 3), (-4.23546241e-2, 4), (3.38713507e-2, 5), (-1.19946761e-2, 6)];
+
     /// <summary>Relative expanded uncertainty of the formula, 0.01.</summary>
     public const double RelativeExpandedUncertainty = 0.01;
 
@@ -40,6 +43,18 @@ public static class Water
         var t = Reduced(temperature);
         var slope = Factors.Zip(Powers, (a, b) => a * b * Math.Pow(t, b - 1)).Sum() / 300;
         return -1e-6 * slope / ViscosityAt(temperature).PascalSeconds;
+    }
+
+    /// <summary>Density of water at 0.1 MPa, kg/m3.</summary>
+    /// <param name="temperature">Temperature, 253.15 to 383.15 K.</param>
+    /// <exception cref="ArgumentOutOfRangeException">The temperature is outside the formula's range.</exception>
+    /// <remarks>Source: IAPWS SR6-08(2011), equation 2.</remarks>
+    public static double DensityAt(Temperature temperature)
+    {
+        var t = 300 * Reduced(temperature);
+        var (warm, cold) = (10 / (593 - t), 10 / (t - 232));
+        var volume = 1.93763157e-2 + Warm.Sum(term => term.Factor * Math.Pow(warm, term.Power)) + Cold.Sum(term => term.Factor * Math.Pow(cold, term.Power));
+        return 1e5 / (461.51805 * 10 * volume);
     }
 
     /// <summary>Water as a calibration fluid, certified at 25 degC by the formula.</summary>

@@ -29,7 +29,9 @@ public sealed partial record RunRecord(
     {
         var study = results.Study;
         var numbers = RunResults.Of(results, summary).ToItems();
-        var inputs = results.Analyzed.Readings.Files.Select(file => new NamedText(file.Path, file.Digest)).ToItems();
+        var inputs = results.Analyzed.Readings.Files.Select(file => new NamedText(file.Path, file.Digest))
+            .Concat(study.Fluids.Select(fluid => fluid.Certificate).OfType<Certificate>().Select(certificate => new NamedText(certificate.File, certificate.Digest)).Distinct())
+            .ToItems();
         return new(study.Name, study.Seed, study.Digest, VersionsNow(), inputs, numbers, ResultDigests.Of(numbers), RunFeeds.Of(results.Analyzed).ToItems());
     }
 

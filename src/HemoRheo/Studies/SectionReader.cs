@@ -8,12 +8,14 @@ internal sealed class SectionReader
     private static readonly TimeSpan LongestSpan = TimeSpan.FromDays(3660);
 
     private readonly StudyFileFaults _faults;
+    private readonly Items<StudyFileKey> _all;
     private readonly Items<StudyFileKey> _keys;
 
-    public SectionReader(TomlTable table, string section, StudyFileFaults faults)
+    public SectionReader(TomlTable table, string section, StudyFileFaults faults, Items<StudyFileKey>? all = null)
     {
-        (Table, Section, _faults, _keys) = (table, section, faults, StudyFileKeys.Of(section));
-        var nested = StudyFileKeys.SectionsIn(section);
+        (Table, Section, _faults, _all) = (table, section, faults, all ?? StudyFileKeys.All);
+        _keys = _all.Where(key => key.Section == section).ToItems();
+        var nested = StudyFileKeys.SectionsIn(section, _all);
         foreach (var entry in table.Entries)
             if (!_keys.Any(key => key.Name == entry.Key) && !nested.Contains(entry.Key)) AddUnknown(entry, nested);
     }
@@ -59,6 +61,15 @@ internal sealed class SectionReader
     public Items<DateTimeOffset> Moments(string name) =>
         ListOf(name).Select(node => Taken<DateTimeOffset>(node, Key(name), "a date and time with offset")).ToItems();
 
+    public DateOnly Date(string name) => Node(name) is { } node ? Taken<DateOnly>(node, Key(name), "a date without a time") : default;
+
+    /// <summary>Says of each of these optional keys that is missing that it is needed here.</summary>
+    public void Demand(params ReadOnlySpan<string> names)
+    {
+        foreach (var name in names)
+            if (!Has(name)) AddMissing(Key(name));
+    }
+
     /// <summary>Says that a value of this section is impossible.</summary>
     public void Refuse(string name, string found, string expected, string whatToDo) =>
         _faults.Add(Table.Find(name)?.Node ?? Table, found, expected, whatToDo);
@@ -70,9 +81,12 @@ internal sealed class SectionReader
         var key = Key(name);
         if (Table.Find(name) is { } entry) return entry.Node;
         if (key.Default is not null) return TomlTree.Read($"default = {key.Default}", new StudyFileFaults("default"))!.Find("default")!.Node;
-        if (key.Required) _faults.Add(Table, $"no \"{name}\"{(Section.Length == 0 ? "" : $" in {Section}")}", $"{name} = {key.Example}", $"add it: {key.Meaning}");
+        if (key.Required) AddMissing(key);
         return null;
     }
+
+    private void AddMissing(StudyFileKey key) =>
+        _faults.Add(Table, $"no \"{key.Name}\"{(Section.Length == 0 ? "" : $" in {Section}")}", $"{key.Name} = {key.Example}", $"add it: {key.Meaning}");
 
     private List<TomlNode> ListOf(string name)
     {
@@ -138,7 +152,7 @@ internal sealed class SectionReader
     private void AddUnknown(TomlEntry entry, Items<string> nested)
     {
         var near = Spelling.Nearest(entry.Key, _keys.Select(key => key.Name).Concat(nested));
-        var elsewhere = StudyFileKeys.All.FirstOrDefault(key => key.Name == entry.Key);
+        var elsewhere = _all.FirstOrDefault(key => key.Name == entry.Key);
         _faults.Add(
             entry.Line,
             entry.Column,

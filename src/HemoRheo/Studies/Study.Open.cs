@@ -1,5 +1,4 @@
 using System.Security.Cryptography;
-using System.Text;
 
 namespace HemoRheo;
 
@@ -20,26 +19,8 @@ public sealed partial record Study
         if (new FileInfo(full).Length > LargestStudyFile) faults.Add(1, 1, "a file of more than 4 MiB", "a study file", "give the path of the study file, not of data");
         faults.ThrowIfAny();
         var bytes = File.ReadAllBytes(full);
-        var text = Decoded(bytes, faults);
+        var text = StudyText.Decoded(bytes, faults);
         faults.ThrowIfAny();
         return new StudyFileReader(Path.GetDirectoryName(full)!, fileName, Convert.ToHexStringLower(SHA256.HashData(bytes))).Read(text);
-    }
-
-    private static string Decoded(byte[] bytes, StudyFileFaults faults)
-    {
-        ReadOnlySpan<byte> body = bytes;
-        if (body.StartsWith(Encoding.UTF8.Preamble)) body = body[Encoding.UTF8.Preamble.Length..];
-        try
-        {
-            return new UTF8Encoding(false, throwOnInvalidBytes: true).GetString(body);
-        }
-        catch (DecoderFallbackException wrong)
-        {
-            var before = body[..Math.Max(0, wrong.Index)];
-            var line = before.Count((byte)'\n') + 1;
-            var column = Encoding.UTF8.GetCharCount(before[(before.LastIndexOf((byte)'\n') + 1)..]) + 1;
-            faults.Add(line, column, "bytes that are not UTF-8", "a text file in UTF-8", "save the study file as UTF-8");
-            return "";
-        }
     }
 }

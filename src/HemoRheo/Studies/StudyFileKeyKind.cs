@@ -33,6 +33,9 @@ public enum StudyFileKeyKind
     /// <summary>A list of dates and times with offset, as TOML writes them.</summary>
     Moments,
 
+    /// <summary>A date, as TOML writes it.</summary>
+    Date,
+
     /// <summary>A table { header, unit } that says what an export calls a field.</summary>
     Field,
 }

@@ -10,10 +10,10 @@ public static partial class StudyFileKeys
     internal static Items<StudyFileKey> Of(string section) => All.Where(key => key.Section == section).ToItems();
 
     /// <summary>Names of the sections that stand directly in a section.</summary>
-    internal static Items<string> SectionsIn(string section)
+    internal static Items<string> SectionsIn(string section, Items<StudyFileKey> all)
     {
         var home = section.Length == 0 ? "" : Bare(section) + ".";
-        return All.Select(key => Bare(key.Section)).Where(path => path.Length > home.Length && path.StartsWith(home, StringComparison.Ordinal))
+        return all.Select(key => Bare(key.Section)).Where(path => path.Length > home.Length && path.StartsWith(home, StringComparison.Ordinal))
             .Select(path => path[home.Length..].Split('.')[0]).Distinct().ToItems();
     }
 

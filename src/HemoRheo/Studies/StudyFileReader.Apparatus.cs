@@ -1,6 +1,6 @@
 namespace HemoRheo;
 
-/// <content>Instruments, geometries, fluids, counters, and what is assumed of blood and readings.</content>
+/// <content>Instruments, geometries, counters, and what is assumed of blood and readings.</content>
 internal sealed partial class StudyFileReader
 {
     private static Instrument Instrument(SectionReader section) => new(
@@ -16,36 +16,14 @@ internal sealed partial class StudyFileReader
 
     private static Geometry Geometry(SectionReader section)
     {
-        var geometry = new Geometry(section.Text("name"), section.Amount("inner_radius"), section.Amount("outer_radius"), section.Amount("length"), section.Number("end_factor"));
+        var geometry = new Geometry(section.Text("name"), section.Amount("inner_radius"), section.Amount("outer_radius"), section.Amount("length"), section.Number("end_factor"))
+        {
+            Turning = section.OptionalText("turning") switch { "inner" => TurningCylinder.Inner, "outer" => TurningCylinder.Outer, _ => null },
+        };
         if (geometry.OuterRadius <= geometry.InnerRadius)
             section.Refuse("outer_radius", "an outer radius that is not larger than the inner one", "outer_radius > inner_radius", "correct one of the two");
         return geometry;
     }
-
-    private static CalibrationFluid Fluid(SectionReader section)
-    {
-        var (name, lot, expanded, coverage) = (section.Text("name"), section.Text("lot"), section.Amount("expanded_uncertainty"), section.Number("coverage_factor"));
-        if (section.Text("kind") == "water")
-        {
-            foreach (var key in CertificateKeys.Where(section.Has)) section.Refuse(key, $"\"{key}\" for water", "none: water is taken from IAPWS SR6-08", $"remove {key}");
-            return WaterFluid.Of(name, lot, expanded, coverage);
-        }
-
-        foreach (var key in CertificateKeys.Where(key => !section.Has(key)))
-            section.Refuse(key, $"no \"{key}\" for the certified fluid", $"{key} as its certificate states it", $"add {key}");
-        return new(
-            name,
-            lot,
-            Temperature.FromDegreesCelsius(section.OptionalAmount("at") ?? double.NaN),
-            Viscosity.FromPascalSeconds(section.OptionalAmount("viscosity") ?? double.NaN),
-            expanded,
-            coverage,
-            section.OptionalAmount("per_kelvin") ?? double.NaN,
-            section.OptionalAmount("per_kelvin_uncertainty") ?? double.NaN,
-            IsWater: false);
-    }
-
-    private static string[] CertificateKeys => ["viscosity", "at", "per_kelvin", "per_kelvin_uncertainty"];
 
     private static Counter Counter(SectionReader section) => new(section.Text("name"), section.Amount("uncertainty"), section.Amount("shared_uncertainty"));
 

@@ -121,12 +121,13 @@ check_limit = "3 %"                       # largest error a check may show
 # check_scatter = "1 %"                   # scatter of one check; declare it while a period has one check only: without it no value is corrected
 # adjusted = [2026-03-02T09:00:00+01:00]  # adjusted or repaired: each starts a new period
 
-[[geometries]]                            # concentric cylinders, the inner one driven
+[[geometries]]                            # concentric cylinders
 name = "CYL-1"
 inner_radius = "12.5 mm"
 outer_radius = "13.56 mm"
 length = "37.5 mm"
 end_factor = 1.10                         # 1.10 for the standard shape of ISO 3219
+# turning = "inner"                       # or "outer"; left out: laminar flow is judged as if the inner one turned
 
 [[fluids]]
 name = "oil-5"
@@ -138,6 +139,26 @@ expanded_uncertainty = "0.4 %"
 coverage_factor = 2                       # as the certificate states it
 per_kelvin = "2.2 %/K"
 per_kelvin_uncertainty = "0.03 %/K"
+# density = "849 kg/m3"                   # laminar flow is judged by it; known for water and glycerol-water
+# bath = "37 °C"                          # what the bath is set to; a check that reads another temperature is marked
+# certificate = "oil-5.toml"              # a certificate file instead of all keys from lot to per_kelvin_uncertainty
+#
+# Such a file has several temperatures, and viscosity is interpolated between the lowest and the highest, never beyond:
+#   name = "viscosity oil 5"
+#   lot = "24-117"
+#   issued = 2026-01-15
+#   valid_until = 2027-01-14
+#   coverage_factor = 2
+#   interpolation = "VFT"                 # Vogel-Fulcher-Tammann, three temperatures or more; or "ASTM D341", two or more, each with density
+#   [[rows]]                              # one a temperature
+#   temperature = "20 °C"
+#   viscosity = "8.60 mPa.s"              # or kinematic_viscosity = "10.0 mm2/s" with density
+#   density = "860 kg/m3"
+#   expanded_uncertainty = "0.4 %"
+#
+# A mixture of glycerol and water (kind = "glycerol-water") is known to 3 %, sucrose in water (kind = "sucrose-40") to 5 %; they need a lot and, the mixture:
+# mass_fraction = "50 %"                  # of glycerol
+# mass_fraction_uncertainty = "0.1 %"     # standard uncertainty of mixing
 
 [[fluids]]
 name = "water"

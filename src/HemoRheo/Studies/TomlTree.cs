@@ -85,6 +85,7 @@ internal static class TomlTree
         IntegerValueSyntax number => number.Value,
         FloatValueSyntax number => number.Value,
         BooleanValueSyntax truth => truth.Value,
+        DateTimeValueSyntax { Kind: SyntaxKind.LocalDate } day => DateOnly.FromDateTime(day.Value.DateTime.DateTime),
         DateTimeValueSyntax { Kind: SyntaxKind.OffsetDateTimeByNumber or SyntaxKind.OffsetDateTimeByZ } moment => moment.Value.DateTime,
         _ => null,
     };

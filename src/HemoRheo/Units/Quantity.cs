@@ -41,4 +41,10 @@ public enum Quantity
 
     /// <summary>Mass concentration, g/L.</summary>
     Concentration,
+
+    /// <summary>Kinematic viscosity, m2/s.</summary>
+    KinematicViscosity,
+
+    /// <summary>Density, kg/m3.</summary>
+    Density,
 }

@@ -63,6 +63,13 @@ internal static class UnitSpellings
         .. Rows(new(Quantity.Concentration, "g/L", "g/L", 1), "g/L", "g/l", "mg/mL", "mg/ml"),
         .. Rows(new(Quantity.Concentration, "g/dL", "g/dL", 10), "g/dL", "g/dl"),
         .. Rows(new(Quantity.Concentration, "mg/dL", "mg/dL", 1e-2), "mg/dL", "mg/dl"),
+
+        .. Rows(new(Quantity.KinematicViscosity, "m²/s", "m2/s", 1), "m^2/s", "m2/s"),
+        .. Rows(new(Quantity.KinematicViscosity, "mm²/s", "mm2/s", 1e-6), "mm^2/s", "mm2/s"),
+        .. Rows(new(Quantity.KinematicViscosity, "cSt", "cSt", 1e-6), "cSt"),
+
+        .. Rows(new(Quantity.Density, "kg/m³", "kg/m3", 1), "kg/m^3", "kg/m3"),
+        .. Rows(new(Quantity.Density, "g/cm³", "g/cm3", 1e3), "g/cm^3", "g/cm3", "g/mL", "g/ml"),
     ];
 
     private static IEnumerable<UnitSpelling> Rows(Unit unit, params string[] spellings) => spellings.Select(spelling => new UnitSpelling(spelling, unit));

@@ -41,6 +41,17 @@ public class WaterTests
     }
 
     [Fact]
+    public void Its_density_agrees_with_the_published_check_states_and_every_computed_point()
+    {
+        Assert.All(ReferenceTable.Read("water", "water-check-points.csv"), row =>
+        {
+            var (expected, density) = (row.Number("density_kg_m3"), Water.DensityAt(Temperature.FromKelvins(row.Number("T_K"))));
+            Assert.Equal(expected, density, 1e-11 * expected);
+            if (row["density_kg_m3_table8_found"].Length > 0) Assert.Equal(row.Number("density_kg_m3_table8_found"), density, 5e-7);
+        });
+    }
+
+    [Fact]
     public void Its_temperature_coefficient_is_the_slope_of_its_logarithm()
     {
         var rows = ReferenceTable.Read("water", "water-coefficient.csv");
