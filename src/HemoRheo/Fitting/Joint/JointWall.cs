@@ -29,7 +29,7 @@ internal sealed class JointWall(double at, double bound, double inside, string l
     {
         if (law.Boundary is not { } boundary) return null;
         var parameter = law.Parameters[boundary.Parameter];
-        return new(parameter.ToScaled(boundary.WallAt(lowestStress)), double.NegativeInfinity, parameter.ToScaled(boundary.InsideAt(lowestStress)), boundary.Law);
+        return new(parameter.ToScaled(boundary.WallAt(new(lowestStress))[0]), double.NegativeInfinity, parameter.ToScaled(boundary.InsideAt(lowestStress)), boundary.Law);
     }
 
     /// <summary>Whether a value lies beyond the wall.</summary>
