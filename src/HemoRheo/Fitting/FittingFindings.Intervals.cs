@@ -1,0 +1,23 @@
+namespace HemoRheo;
+
+/// <summary>What can be found about intervals of a fit.</summary>
+public static partial class FittingFindings
+{
+    /// <summary>A profile came below the sum of squares of the fit.</summary>
+    public static FindingKind BelowTheFit { get; } = new(
+        "profile-below-fit",
+        Severity.Warning,
+        "With one quantity held, the sum of squares falls below that of the fit: the fit was not at the lowest minimum.",
+        "The sum of squares has several minima: the curve has not the shape of the law, or a point is off.",
+        "Look at the curve; take neither the estimate nor the interval at its word.",
+        "arithmetic");
+
+    /// <summary>More than one refit in a hundred of a bootstrap failed.</summary>
+    public static FindingKind FailedRefits { get; } = new(
+        "bootstrap-refits-failed",
+        Severity.Warning,
+        "More than 1 % of the refits of a bootstrap failed and are left out of its percentiles.",
+        "The curve hardly tells the parameters apart, or its lowest stresses are near the floor of the errors.",
+        "Use profile likelihood, or a law with fewer parameters.",
+        "limit 1 % by choice: fewer move a 95 % limit by less than its own sampling error");
+}

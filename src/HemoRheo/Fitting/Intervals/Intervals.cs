@@ -1,0 +1,33 @@
+namespace HemoRheo;
+
+/// <summary>Intervals of whatever is a function of a fit, by any method.</summary>
+internal static class Intervals
+{
+    public static FitInterval Of(FittedLaw fit, FitFunction function, double level, IntervalMethod method, BootstrapDraws? draws)
+    {
+        Check(level);
+        draws ??= new();
+        if (draws.Replicates < BootstrapDraws.FewestReplicates)
+        {
+            throw new ArgumentOutOfRangeException(nameof(draws), $"{draws.Replicates} replicates say nothing of the tails; at least {BootstrapDraws.FewestReplicates} are needed.");
+        }
+
+        return method switch
+        {
+            IntervalMethod.Wald => WaldInterval.Of(fit, function, level),
+            IntervalMethod.ProfileLikelihood => ProfileSearch.Of(fit, function, level).Interval,
+            _ => BootstrapInterval.Of(fit, function, level, method, draws),
+        };
+    }
+
+    public static Profile ProfileOf(FittedLaw fit, FitFunction function, double level)
+    {
+        Check(level);
+        return ProfileSearch.Of(fit, function, level);
+    }
+
+    private static void Check(double level)
+    {
+        if (!(level > 0 && level < 1)) throw new ArgumentOutOfRangeException(nameof(level), level, "A level of coverage lies between 0 and 1, for example 0.95.");
+    }
+}

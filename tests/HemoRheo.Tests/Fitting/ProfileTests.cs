@@ -1,0 +1,88 @@
+namespace HemoRheo.Tests.Fitting;
+
+/// <summary>A profile is what its name says: at every point the other parameters are at their best.</summary>
+public class ProfileTests
+{
+    public static TheoryData<string> Laws => [.. FlowLaw.All.Select(law => law.Name)];
+
+    /// <summary>Every law on a curve of its own: the sum of squares, calculated here from the law itself, has the rise that is told, and no small change of the other parameters lowers it.</summary>
+    [Theory]
+    [MemberData(nameof(Laws))]
+    public void Every_point_is_a_least_sum_of_squares_with_the_rise_that_is_told(string name)
+    {
+        var law = FlowLaw.Named(name);
+        var guess = new double[law.Parameters.Count];
+        var blood = Simulated.Exact(FlowLaw.Carreau, 0.05, 0.0035, 3, 0.4);
+        law.FirstGuess([.. blood.Points.Select(point => point.Rate.ReciprocalSeconds)], [.. blood.Points.Select(point => point.Stress.Pascals)], guess);
+        var fit = Simulated.Noisy(RandomStream.Of(20261201, "profiles", 1), law, 0.01, 0.0003, guess).Fit(law, WeightedFits.Errors);
+        for (var k = 0; k < law.Parameters.Count; k++)
+        {
+            var profile = fit.Profile(law.Parameters[k].Name);
+            Assert.DoesNotContain(profile.Interval.Findings, finding => finding.Code == "profile-below-fit");
+            Assert.Equal(profile.Points.OrderBy(point => point.Value), profile.Points);
+            foreach (var point in profile.Points)
+            {
+                var sum = Sum(fit, point.Parameters);
+                Assert.Equal(Math.Sqrt(Math.Max(0, sum - fit.Fit.ChiSquare)), Math.Abs(point.Rise), 1e-4);
+                foreach (var other in Neighbors(point.Parameters, k)) Assert.True(Sum(fit, other) > sum - 1e-7, $"{name}, {law.Parameters[k].Name} at {point.Value}");
+            }
+        }
+    }
+
+    [Fact]
+    public void Limits_stand_at_the_ends_with_the_limit_of_the_rise()
+    {
+        var profile = WeightedFits.Curves["A-001/1"].Fit((FlowLaw)FlowLaw.Quemada, WeightedFits.Errors).Profile(Measurand.Viscosity(1.PerSecond()));
+        Assert.InRange(profile.Points.Count, 9, 25);
+        Assert.Equal(-profile.Limit, profile.Points[0].Rise, 1e-9);
+        Assert.Equal(profile.Limit, profile.Points[^1].Rise, 1e-9);
+        Assert.Equal(profile.Interval.Lower!.Value, profile.Points[0].Value, 1e-12);
+        Assert.Equal(profile.Interval.Upper!.Value, profile.Points[^1].Value, 1e-12);
+        Assert.Contains(profile.Points, point => point.Rise == 0 && point.Value == profile.Interval.Estimate);
+    }
+
+    [Fact]
+    public void A_fit_that_is_not_at_the_minimum_is_found_out()
+    {
+        var fit = WeightedFits.Curves["A-001/1"].Fit((FlowLaw)FlowLaw.Casson, WeightedFits.Errors);
+        Items<double> beside = [fit.Scaled[0] + 0.05, fit.Scaled[1]];
+        var natural = fit.Law.ToNatural([.. beside]);
+        var wrong = fit with { Scaled = beside, Fit = fit.Fit with { ChiSquare = Sum(fit, [.. natural]) } };
+        Assert.Contains(wrong.Interval("Casson viscosity").Findings, finding => finding.Code == "profile-below-fit");
+    }
+
+    /// <summary>A law with two minima in its exponent: on the way out the lower branch is taken when it is met from the other side.</summary>
+    [Fact]
+    public void A_side_that_jumps_to_another_minimum_is_walked_back()
+    {
+        var law = FlowLaw.Custom("two ways", (rate, p) => rate * (p[0] + 0.001 * LaneDual.Square(LaneDual.Square(p[1]) - 1) + 0.0001 * p[1]), new LawParameter("base", "a", "Pa.s", Start: 0.003), new LawParameter("way", "w", "1", double.NegativeInfinity, Start: 0.9));
+        var fit = Simulated.Noisy(RandomStream.Of(20261201, "jump", 1), FlowLaw.Newtonian, 0.01, 0.0003, 0.003).Fit((FlowLaw)law, WeightedFits.Errors);
+        Assert.NotEqual(IntervalKind.Closed, fit.Interval("base").Kind);
+    }
+
+    private static double Sum(FittedLaw fit, IReadOnlyList<double> natural)
+    {
+        double sum = 0;
+        foreach (var point in fit.Curve.Points)
+        {
+            var fitted = fit.Law.Stress(point.Rate, [.. fit.Parameters.Select(parameter => parameter.Estimate)]).Pascals;
+            var miss = point.Stress.Pascals - fit.Law.Stress(point.Rate, [.. natural]).Pascals;
+            sum += miss * miss / (Math.Pow(fit.Errors.Relative * fitted, 2) + Math.Pow(fit.Errors.Floor.Pascals, 2));
+        }
+
+        return sum;
+    }
+
+    private static IEnumerable<double[]> Neighbors(IReadOnlyList<double> natural, int held)
+    {
+        for (var k = 0; k < natural.Count; k++)
+        {
+            foreach (var factor in (double[])[0.999, 1.001])
+            {
+                double[] moved = [.. natural];
+                moved[k] *= factor;
+                if (k != held) yield return moved;
+            }
+        }
+    }
+}
