@@ -1,5 +1,6 @@
 using HemoRheo.Benchmarks;
 using HemoRheo.Benchmarks.Laws;
+using HemoRheo.Benchmarks.FittedIntervals;
 using HemoRheo.Benchmarks.Pooled;
 using HemoRheo.Benchmarks.Speed;
 
@@ -7,6 +8,7 @@ return args switch
 {
     ["coverage", var studies] => Coverage(Number(studies)),
     ["correlation", var studies] => Lines(CorrelationRun.Run(Number(studies))),
+    ["intervals", var curves] => Lines(IntervalRun.Run(Number(curves))),
     ["speed"] => Speed(),
     ["speed", "--work", var file] => Lines(WorkSpeed.Run(file)),
     ["bootstrap"] => Lines(BootstrapSpeed.Run()),
@@ -44,6 +46,7 @@ static int Usage()
 {
     Console.WriteLine("coverage N   coverage of 95 % intervals over N simulated studies, written, read and analyzed through the public API");
     Console.WriteLine("correlation N   correlated readings over N simulated studies: the correlation found, coverage of the fit's intervals, false alarms of the tests of fit");
+    Console.WriteLine("intervals N  coverage of the intervals of one fit by every method, N curves a named truth (a tenth of them for the bootstraps)");
     Console.WriteLine("speed        fits a second on one thread");
     Console.WriteLine("speed --work FILE    Casson and Quemada on every curve of a file, beside MathNet.Numerics");
     Console.WriteLine("bootstrap            one curve drawn and fitted anew 2,000 times");

@@ -29,8 +29,7 @@ public static class MeasurandIntervals
         ArgumentNullException.ThrowIfNull(measurand);
         if (fit.Scaled.Count > 0 && measurand.From(fit) is null) throw new ArgumentException($"{measurand.Name} does not come from a fit of {fit.Law.Name}.", nameof(measurand));
         if (measurand is LawNumber number) return FitFunction.Of(fit.Law.Parameters[number.Index], number.Index).Named(measurand.Name, measurand.Shown);
-        var range = measurand.Logarithmic ? new Interval(0, double.PositiveInfinity) : new(double.NegativeInfinity, double.PositiveInfinity);
-        return new(measurand.Name, measurand.Shown, range, measurand.ToSi, At, null, !measurand.Logarithmic);
+        return new(measurand.Name, measurand.Shown, new(double.NegativeInfinity, double.PositiveInfinity), measurand.ToSi, At, null, !measurand.Logarithmic);
 
         double At(ReadOnlySpan<double> scaled, Span<double> gradient)
         {

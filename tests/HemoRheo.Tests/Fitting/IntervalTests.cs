@@ -31,6 +31,17 @@ public class IntervalTests
         Assert.NotEqual(IntervalKind.Closed, fit.Interval("ratio").Kind);
     }
 
+    /// <summary>A fit without a unique solution still knows the viscosities that the curve shows.</summary>
+    [Fact]
+    public void Viscosities_of_a_fit_without_a_unique_solution_have_limits_and_its_parameters_have_none()
+    {
+        var fit = Simulated.Exact(FlowLaw.Newtonian, 0.0013).Fit((FlowLaw)FlowLaw.Quemada, WeightedFits.Errors);
+        var (quemada, newtonian) = (fit.Interval(Measurand.Viscosity(100.PerSecond())), Simulated.Exact(FlowLaw.Newtonian, 0.0013).Fit((FlowLaw)FlowLaw.Newtonian, WeightedFits.Errors).Interval("viscosity"));
+        Assert.Equal(IntervalKind.Closed, quemada.Kind);
+        Assert.True(quemada.Allows(0.0013) && quemada.Lower <= newtonian.Lower && quemada.Upper >= newtonian.Upper && quemada.Upper < 1.05 * newtonian.Upper, quemada.ToString());
+        Assert.Equal(IntervalKind.NotIdentifiable, fit.Interval("critical rate").Kind);
+    }
+
     [Fact]
     public void Wald_gives_no_answer_at_a_bound_and_near_it()
     {
@@ -91,6 +102,30 @@ public class IntervalTests
         Assert.True(wide.Interval.Lower < narrow.Interval.Lower && wide.Interval.Upper > narrow.Interval.Upper);
         Assert.Equal(Normal95, Blood.Profile("yield stress").Limit, 1e-12);
         Assert.Equal(2.2281388519649385, (Blood.Curve.Fit((FlowLaw)FlowLaw.Casson, ErrorModel.Default)).Profile("yield stress").Limit, 1e-9);
+    }
+
+    /// <summary>The profile of a viscosity at a high rate is nearly a straight line, so for correlated readings it must follow the standard error that knows of them; known and estimated scale.</summary>
+    [Theory]
+    [InlineData(true)]
+    [InlineData(false)]
+    public void Correlated_readings_widen_every_method_alike(bool known)
+    {
+        var fit = Blood.Curve.Fit((FlowLaw)FlowLaw.Casson, WeightedFits.Errors with { ScaleKnown = known });
+        var correlated = fit.WithCorrelation(0.6);
+        double Width(FittedLaw of, IntervalMethod method) => of.Interval(Measurand.Viscosity(100.PerSecond()), 0.95, method) is var interval ? interval.Upper!.Value - interval.Lower!.Value : 0;
+        var wald = Width(correlated, IntervalMethod.Wald);
+        Assert.True(wald > 1.3 * Width(fit, IntervalMethod.Wald));
+        Assert.Equal(1, Width(correlated, IntervalMethod.ProfileLikelihood) / wald, 0.01);
+        Assert.Equal(1, Width(correlated, IntervalMethod.ParametricBootstrap) / wald, 0.1);
+        Assert.Contains("cannot change places", correlated.Interval("yield stress", 0.95, IntervalMethod.ResidualBootstrap).WhyNone, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void An_index_of_a_Newtonian_liquid_has_no_lower_limit_of_the_data()
+    {
+        var interval = Plasma.Fit((FlowLaw)FlowLaw.Casson, WeightedFits.Errors).Interval(Measurand.ShearThinningIndex(1.PerSecond(), 100.PerSecond()));
+        Assert.True(interval.Allows(1), interval.ToString());
+        Assert.True(interval.Upper < 2, interval.ToString());
     }
 
     private static FlowCurve Noisy(string name, FlowLaw law, params double[] truth) => Simulated.Noisy(RandomStream.Of(20261201, name, 1), law, 0.01, 0.0003, truth);

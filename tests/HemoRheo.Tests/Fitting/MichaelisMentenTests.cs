@@ -7,7 +7,7 @@ public class MichaelisMentenTests
 {
     private static readonly Dictionary<string, double> Exact = Read("puromycin.mpmath.csv");
 
-    private static readonly (double[] Concentration, double[] Velocity) Data = (Column("concentration"), Column("rate"));
+    private static readonly (double[] Concentration, double[] Velocity) Data = (Column("conc"), Column("rate"));
 
     private static readonly FlowLaw<NamedValues> Law = FlowLaw.Custom(
         "Michaelis-Menten",
@@ -96,7 +96,7 @@ public class MichaelisMentenTests
 
     private static Dictionary<string, double> Read(string file) => ReferenceTable.Read("intervals", file).ToDictionary(row => row["quantity"], row => row.Number("value"));
 
-    private static double[] Column(string name) => [.. ReferenceTable.Read("intervals", "puromycin.csv").Select(row => row.Number(name))];
+    private static double[] Column(string name) => [.. ReferenceTable.Read("law-comparison", "puromycin.csv").Select(row => row.Number(name))];
 
     private readonly struct Weighted : IModelFormula
     {

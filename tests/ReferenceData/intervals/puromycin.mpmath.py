@@ -1,11 +1,11 @@
-"""Michaelis-Menten on puromycin.csv in 40 digits, by mpmath. Writes puromycin.mpmath.csv beside itself; quantities as in puromycin.r.csv."""
+"""Michaelis-Menten on ../law-comparison/puromycin.csv in 40 digits, by mpmath. Writes puromycin.mpmath.csv beside itself; quantities as in puromycin.r.csv."""
 import csv, os
 import mpmath as mp
 
 mp.mp.dps = 40
 HERE = os.path.dirname(os.path.abspath(__file__))
-with open(f"{HERE}/puromycin.csv") as f:
-    DATA = [(mp.mpf(row["concentration"]), mp.mpf(row["rate"])) for row in csv.DictReader(f)]
+with open(f"{HERE}/../law-comparison/puromycin.csv") as f:
+    DATA = [(mp.mpf(row["conc"]), mp.mpf(row["rate"])) for row in csv.DictReader(f)]
 DF = len(DATA) - 2
 
 

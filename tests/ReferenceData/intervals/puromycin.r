@@ -1,7 +1,7 @@
-# Michaelis-Menten on puromycin.csv, by R. usage: Rscript puromycin.r   Writes puromycin.r.csv beside itself; R 4.2.2 with minpack.lm.
+# Michaelis-Menten on ../law-comparison/puromycin.csv, by R. usage: Rscript puromycin.r   Writes puromycin.r.csv beside itself; R 4.2.2 with minpack.lm.
 library(minpack.lm)
 options(digits = 17)
-d <- read.csv("puromycin.csv"); n <- nrow(d); p <- 2
+d <- setNames(read.csv("../law-comparison/puromycin.csv"), c("concentration", "rate")); n <- nrow(d); p <- 2
 tight <- nls.lm.control(ftol = 1e-16, ptol = 1e-16, maxiter = 1000)
 rows <- list(); add <- function(quantity, value) rows[[length(rows) + 1]] <<- data.frame(quantity, value = formatC(as.numeric(value), digits = 15, format = "g"))
 

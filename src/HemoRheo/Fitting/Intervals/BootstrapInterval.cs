@@ -15,6 +15,7 @@ internal static class BootstrapInterval
     public static FitInterval? Refusal(FittedLaw fit, FitFunction function, double level, IntervalMethod method) =>
         IntervalAnswer.Refusal(fit, function, level, method)
         ?? (fit.Covariance.Count == 0 ? IntervalAnswer.None(fit, function, level, method, "the fit has no covariance")
+        : fit.Correlation != 0 && method == IntervalMethod.ResidualBootstrap ? IntervalAnswer.None(fit, function, level, method, "residuals of correlated readings cannot change places; ask for profile likelihood or the parametric bootstrap")
         : fit.Fit.DegreesOfFreedom == 0 && method == IntervalMethod.ResidualBootstrap ? IntervalAnswer.None(fit, function, level, method, "no degrees of freedom are left, so there are no residuals to draw from")
         : null);
 
@@ -47,7 +48,7 @@ internal static class BootstrapInterval
     private static double Tail(FittedLaw fit, double level, IntervalMethod method)
     {
         if (method == IntervalMethod.ParametricBootstrap && fit.Errors.ScaleKnown) return (1 - level) / 2;
-        return Normal.CDF(0, 1, -StudentQuantile.At(fit.Fit.DegreesOfFreedom, 0.5 + level / 2));
+        return Normal.CDF(0, 1, -StudentQuantile.At(fit.Fit.EffectiveDegreesOfFreedom, 0.5 + level / 2));
     }
 
     private static double[] Values(FitFunction function, double[] refits, int size)

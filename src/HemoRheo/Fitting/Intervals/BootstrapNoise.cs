@@ -3,8 +3,9 @@ namespace HemoRheo;
 /// <summary>Redraws the stresses of a curve around its fit.</summary>
 /// <param name="fitted">Fitted stresses, Pa.</param>
 /// <param name="deviations">Standard deviations of the readings, Pa.</param>
+/// <param name="correlations">Correlation of each reading with the one before it.</param>
 /// <param name="errors">Standardized errors to draw from with replacement; null for normal ones.</param>
-internal sealed class BootstrapNoise(double[] fitted, double[] deviations, double[]? errors)
+internal sealed class BootstrapNoise(double[] fitted, double[] deviations, double[] correlations, double[]? errors)
 {
     /// <summary>A point that rules its own fitted value has no residual to speak of.</summary>
     private const double LeastFreedom = 1e-8;
@@ -12,17 +13,20 @@ internal sealed class BootstrapNoise(double[] fitted, double[] deviations, doubl
     public static BootstrapNoise Of(FittedLaw fit, IntervalMethod method)
     {
         var held = new HeldWeights(fit);
-        var scale = fit.Errors.ScaleKnown ? 1 : Math.Sqrt(fit.Fit.ChiSquare / fit.Fit.DegreesOfFreedom);
+        var scale = Math.Sqrt(RiseUnit.Scale(fit));
+        double[] correlations = [.. fit.Curve.Points.Select((point, i) => i == 0 ? 0 : Math.Pow(fit.Correlation, Math.Abs(point.Number - fit.Curve.Points[i - 1].Number)))];
         return method == IntervalMethod.ResidualBootstrap
-            ? new(held.Fitted, held.Deviations, Errors(fit, held, scale))
-            : new(held.Fitted, [.. held.Deviations.Select(deviation => deviation * scale)], null);
+            ? new(held.Fitted, held.Deviations, correlations, Errors(fit, held, scale))
+            : new(held.Fitted, [.. held.Deviations.Select(deviation => deviation * scale)], correlations, null);
     }
 
     public void Draw(RandomStream stream, Span<double> stresses)
     {
+        double last = 0;
         for (var i = 0; i < fitted.Length; i++)
         {
-            stresses[i] = fitted[i] + deviations[i] * (errors is null ? stream.Normal() : errors[(int)(stream.Uniform() * errors.Length)]);
+            last = errors is null ? correlations[i] * last + Math.Sqrt(1 - correlations[i] * correlations[i]) * stream.Normal() : errors[(int)(stream.Uniform() * errors.Length)];
+            stresses[i] = fitted[i] + deviations[i] * last;
         }
     }
 

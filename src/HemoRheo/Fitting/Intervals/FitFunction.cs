@@ -43,19 +43,21 @@ internal sealed class FitFunction(string name, Unit shown, Interval range, Func<
     }
 
     /// <summary>Its standard error by the delta method; NaN where the fit has no covariance.</summary>
-    public double StandardError(FittedLaw fit)
+    public double StandardError(FittedLaw fit) => fit.Covariance.Count == 0 ? double.NaN : Math.Sqrt(Variance(fit, fit.Covariance));
+
+    /// <summary>Its variance with a covariance of the parameters.</summary>
+    public double Variance(FittedLaw fit, IReadOnlyList<double> covariance)
     {
         var size = fit.Scaled.Count;
-        if (fit.Covariance.Count == 0) return double.NaN;
         Span<double> gradient = stackalloc double[size];
         at(fit.Scaled.Span, gradient);
         double variance = 0;
         for (var j = 0; j < size; j++)
         {
-            for (var k = 0; k < size; k++) variance += gradient[j] * fit.Covariance[j * size + k] * gradient[k];
+            for (var k = 0; k < size; k++) variance += gradient[j] * covariance[j * size + k] * gradient[k];
         }
 
-        return Math.Sqrt(variance);
+        return variance;
     }
 
     /// <summary>A step on the working scale that is long: 1 where it is a logarithm or logit.</summary>

@@ -13,11 +13,7 @@ internal sealed class HeldWeights
         _model = new LawOnPoints(fit.Law, rates).Evaluate;
         (Fitted, Deviations) = (new double[_read.Length], new double[_read.Length]);
         _model(fit.Scaled.Span, Fitted, new double[fit.Scaled.Count * _read.Length]);
-        for (var i = 0; i < _read.Length; i++)
-        {
-            var (relative, floor) = (fit.Errors.Relative * Fitted[i], fit.Errors.Floor.Pascals);
-            Deviations[i] = Math.Sqrt(relative * relative + floor * floor);
-        }
+        for (var i = 0; i < _read.Length; i++) Deviations[i] = Math.Sqrt(fit.Errors.VarianceAt(Fitted[i]));
     }
 
     /// <summary>Fitted stresses, Pa.</summary>

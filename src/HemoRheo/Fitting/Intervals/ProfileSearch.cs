@@ -17,11 +17,11 @@ internal sealed class ProfileSearch
     private readonly ProfileScale _scale;
     private readonly ConstrainedFit _constrained;
 
-    private ProfileSearch(FittedLaw fit, FitFunction function, double unit, double limit)
+    private ProfileSearch(FittedLaw fit, FitFunction function, double limit)
     {
         var held = new HeldWeights(fit);
         (_fit, _function, _constrained) = (fit, function, new(fit, held, function));
-        _scale = new(held.At(fit.Scaled.Span, new double[held.Points], new double[held.Points * fit.Scaled.Count]), unit, limit);
+        _scale = new(held.At(fit.Scaled.Span, new double[held.Points], new double[held.Points * fit.Scaled.Count]), RiseUnit.Of(fit, function, held), limit);
     }
 
     public static Profile Of(FittedLaw fit, FitFunction function, double level)
@@ -29,9 +29,8 @@ internal sealed class ProfileSearch
         const IntervalMethod Method = IntervalMethod.ProfileLikelihood;
         if (IntervalAnswer.Refusal(fit, function, level, Method) is { } refusal) return new(refusal, 0, []);
         var limit = IntervalAnswer.Quantile(fit, level);
-        var unit = fit.Errors.ScaleKnown ? 1 : fit.Fit.ChiSquare / fit.Fit.DegreesOfFreedom;
-        if (!(unit > LeastUnit)) return new(IntervalAnswer.None(fit, function, level, Method, "the readings lie on the law to rounding, so there is no scatter to judge by"), limit, []);
-        var search = new ProfileSearch(fit, function, unit, limit);
+        if (!(RiseUnit.Scale(fit) > LeastUnit)) return new(IntervalAnswer.None(fit, function, level, Method, "the readings lie on the law to rounding, so there is no scatter to judge by"), limit, []);
+        var search = new ProfileSearch(fit, function, limit);
         return search.Start() is { } start ? search.From(start, level) : new(IntervalAnswer.None(fit, function, level, Method, "it has no value at the fit"), limit, []);
     }
 
