@@ -3,7 +3,8 @@ namespace HemoRheo.Tests.Fitting;
 /// <summary>A profile is what its name says: at every point the other parameters are at their best.</summary>
 public class ProfileTests
 {
-    public static TheoryData<string> Laws => [.. FlowLaw.All.Select(law => law.Name)];
+    /// <summary>All but Carreau-Yasuda, whose five numbers a curve of twelve points hardly tells apart.</summary>
+    public static TheoryData<string> Laws => [.. FlowLaw.All.Where(law => law != FlowLaw.CarreauYasuda).Select(law => law.Name)];
 
     /// <summary>Every law on a curve of its own: the sum of squares, calculated here from the law itself, has the rise that is told, and no small change of the other parameters lowers it.</summary>
     [Theory]
@@ -29,6 +30,18 @@ public class ProfileTests
         }
     }
 
+    /// <summary>Rates from 0.7 1/s show the high-shear viscosity of this curve, and neither the plateau at low shear nor its onset.</summary>
+    [Fact]
+    public void Of_five_numbers_those_that_the_rates_show_close()
+    {
+        var fit = Simulated.Noisy(RandomStream.Of(20261201, "five numbers", 1), FlowLaw.CarreauYasuda, 0.01, 0.0003, 0.6, 0.0035, 280, 6, 0.4).Fit((FlowLaw)FlowLaw.CarreauYasuda, WeightedFits.Errors);
+        Assert.Equal(IntervalKind.Closed, fit.Interval("high-shear viscosity").Kind);
+        Assert.Equal(IntervalKind.Closed, fit.Interval("flow index").Kind);
+        Assert.Equal(IntervalKind.AtLeast, fit.Interval("low-shear viscosity").Kind);
+        Assert.Equal(IntervalKind.AtLeast, fit.Interval("time constant").Kind);
+        Assert.True(fit.Interval("high-shear viscosity").Allows(0.0035) && fit.Interval("flow index").Allows(0.4) && fit.Interval("low-shear viscosity").Allows(0.6) && fit.Interval("time constant").Allows(280));
+    }
+
     [Fact]
     public void Limits_stand_at_the_ends_with_the_limit_of_the_rise()
     {
@@ -51,13 +64,14 @@ public class ProfileTests
         Assert.Contains(wrong.Interval("Casson viscosity").Findings, finding => finding.Code == "profile-below-fit");
     }
 
-    /// <summary>A law with two minima in its exponent: on the way out the lower branch is taken when it is met from the other side.</summary>
+    /// <summary>Viscosity a + 0.001 (w^2 - 1)^2 + 0.0001 w: from the valley at w = 1, which gives a its largest value there, a hill of 0.001 leads to the valley at w = -1, where a is larger by 0.0002; and a large w allows any small a.</summary>
     [Fact]
-    public void A_side_that_jumps_to_another_minimum_is_walked_back()
+    public void Another_valley_is_not_left_out_of_the_interval()
     {
-        var law = FlowLaw.Custom("two ways", (rate, p) => rate * (p[0] + 0.001 * LaneDual.Square(LaneDual.Square(p[1]) - 1) + 0.0001 * p[1]), new LawParameter("base", "a", "Pa.s", Start: 0.003), new LawParameter("way", "w", "1", double.NegativeInfinity, Start: 0.9));
-        var fit = Simulated.Noisy(RandomStream.Of(20261201, "jump", 1), FlowLaw.Newtonian, 0.01, 0.0003, 0.003).Fit((FlowLaw)law, WeightedFits.Errors);
-        Assert.NotEqual(IntervalKind.Closed, fit.Interval("base").Kind);
+        var law = FlowLaw.Custom("two valleys", (rate, p) => rate * (p[0] + 0.001 * LaneDual.Square(LaneDual.Square(p[1]) - 1) + 0.0001 * p[1]), new LawParameter("a", "a", "Pa.s", Start: 0.003), new LawParameter("w", "w", "1", double.NegativeInfinity, Start: 0.9));
+        var interval = Simulated.Noisy(RandomStream.Of(20261201, "valleys", 1), FlowLaw.Newtonian, 0.01, 0.0003, 0.003).Fit((FlowLaw)law, WeightedFits.Errors).Interval("a");
+        Assert.Equal(IntervalKind.AtMost, interval.Kind);
+        Assert.InRange(interval.Upper!.Value, 0.00308, 0.00318);
     }
 
     private static double Sum(FittedLaw fit, IReadOnlyList<double> natural)

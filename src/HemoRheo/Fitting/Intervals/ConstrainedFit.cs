@@ -13,6 +13,9 @@ internal sealed class ConstrainedFit(FittedLaw fit, HeldWeights held, FitFunctio
     private const double LongestStep = 3;
     private const double Flat = 1e-15;
 
+    /// <summary>A parameter that moves no reading by this share of its standard deviation is not a parameter there.</summary>
+    private const double Silent = 1e-8;
+
     /// <summary>Lowest stress of the curve, Pa.</summary>
     public double LowestStress { get; } = fit.Curve.Points.Min(point => point.Stress.Pascals);
 
@@ -28,6 +31,24 @@ internal sealed class ConstrainedFit(FittedLaw fit, HeldWeights held, FitFunctio
         return Descend(value, inside) is { } other && !(other.Sum >= best?.Sum) ? other : best;
     }
 
+    /// <summary>The lowest minimum at the same value that is found when each other parameter in turn starts far off; null where there is none.</summary>
+    public ConstrainedMinimum? Elsewhere(ConstrainedMinimum point)
+    {
+        ConstrainedMinimum? best = null;
+        for (var k = 0; k < point.Scaled.Length; k++)
+        {
+            if (k == function.Parameter || double.IsInfinity(point.Scaled[k])) continue;
+            foreach (var side in (ReadOnlySpan<double>)[-1, 1])
+            {
+                var near = (double[])point.Scaled.Clone();
+                near[k] += side * Longest(k, near[k]) / 2;
+                if (Descend(point.Value, near) is { } other && !(other.Sum >= best?.Sum)) best = other;
+            }
+        }
+
+        return best;
+    }
+
     private ConstrainedMinimum? Descend(double value, ReadOnlySpan<double> near)
     {
         var state = ConstrainedState.Near(held, function, value, near);
@@ -35,11 +56,11 @@ internal sealed class ConstrainedFit(FittedLaw fit, HeldWeights held, FitFunctio
         var damping = FirstDamping;
         for (var iteration = 0; iteration < IterationLimit && damping < LargestDamping; iteration++)
         {
-            var (step, predicted) = Step(state, damping);
-            if (!(predicted > Flat * state.Sum)) break;
+            var (step, predicted, whole) = Step(state, damping);
+            if (whole && !(predicted > Flat * state.Sum)) break;
             var next = state.Moved(value, step);
             var gain = (state.Sum - next?.Sum) / predicted;
-            if (gain > 1e-4)
+            if (predicted > Flat * state.Sum && gain > 1e-4)
             {
                 state = next!;
                 damping *= gain > 0.25 ? 0.1 : 1;
@@ -53,8 +74,8 @@ internal sealed class ConstrainedFit(FittedLaw fit, HeldWeights held, FitFunctio
         return new(value, state.Scaled, state.Sum, state.SlopeOfSum);
     }
 
-    /// <summary>A damped step, and how far the linear model falls with it.</summary>
-    private (double[] Step, double Predicted) Step(ConstrainedState state, double damping)
+    /// <summary>A damped step, how far the linear model falls with it, and whether it is whole: not shortened.</summary>
+    private (double[] Step, double Predicted, bool Whole) Step(ConstrainedState state, double damping)
     {
         var size = state.Scaled.Length;
         var columns = new double[size][];
@@ -64,11 +85,11 @@ internal sealed class ConstrainedFit(FittedLaw fit, HeldWeights held, FitFunctio
             if (k == state.GivesWay || double.IsInfinity(state.Scaled[k])) continue;
             columns[k] = new double[held.Points];
             state.ReducedColumn(k, columns[k]);
-            if (Length(columns[k]) > 0) free.Add(k);
+            if (Length(columns[k]) > Silent) free.Add(k);
         }
 
         var step = new double[size];
-        if (free.Count == 0) return (step, 0);
+        if (free.Count == 0) return (step, 0, true);
         var rows = held.Points + free.Count;
         var qr = new HouseholderQr(rows, free.Count);
         for (var j = 0; j < free.Count; j++)
@@ -86,7 +107,7 @@ internal sealed class ConstrainedFit(FittedLaw fit, HeldWeights held, FitFunctio
         double shorten = 1;
         for (var j = 0; j < free.Count; j++) shorten = Math.Min(shorten, Longest(free[j], state.Scaled[free[j]]) / Math.Abs(solution[j]));
         for (var j = 0; j < free.Count; j++) step[free[j]] = shorten * solution[j];
-        return (step, Fall(state, columns, step));
+        return (step, Fall(state, columns, step), shorten == 1);
     }
 
     /// <summary>A long step of a parameter: 3 where its fitting scale is a logarithm or logit.</summary>

@@ -13,6 +13,9 @@ internal sealed class ProfileSide(ConstrainedFit fit, ProfileScale scale, Constr
     private const int ShorteningLimit = 8;
     private const int PointLimit = 200;
 
+    /// <summary>Where the root passes its limit in a jump, the outer end of the jump is taken.</summary>
+    private const double Sharp = 1e-6;
+
     /// <summary>A root this far below the limit is too near the arithmetic's own to foretell a step from.</summary>
     private const double Flat = 0.02;
     private const int CrossingLimit = 60;
@@ -36,7 +39,7 @@ internal sealed class ProfileSide(ConstrainedFit fit, ProfileScale scale, Constr
             {
             }
         }
-        while (Improve() && !Reached);
+        while ((Improve() | Doubt()) && !Reached);
         if (Reached) Cross();
     }
 
@@ -82,6 +85,14 @@ internal sealed class ProfileSide(ConstrainedFit fit, ProfileScale scale, Constr
         return improved;
     }
 
+    /// <summary>Tries the end again from far starts, so that no other minimum is left out of the interval; whether one was lower.</summary>
+    private bool Doubt()
+    {
+        if (!Reached || fit.Elsewhere(_points[^1]) is not { } other || !scale.IsLower(other, _points[^1])) return false;
+        _points[^1] = other;
+        return true;
+    }
+
     /// <summary>The outermost crossing of the limit, by Newton steps of the root of the rise, kept between two points.</summary>
     private void Cross()
     {
@@ -91,7 +102,12 @@ internal sealed class ProfileSide(ConstrainedFit fit, ProfileScale scale, Constr
         for (var i = 0; i < CrossingLimit; i++)
         {
             var near = Math.Abs(guess - low.Value) < Math.Abs(guess - high.Value) ? low : high;
-            if (fit.At(guess, near.Scaled) is not { } next) break;
+            if (fit.At(guess, near.Scaled) is not { } next)
+            {
+                guess = (guess + low.Value) / 2;
+                continue;
+            }
+
             here = next;
             if (scale.Root(here) < scale.Limit) low = here;
             else high = here;
@@ -102,6 +118,7 @@ internal sealed class ProfileSide(ConstrainedFit fit, ProfileScale scale, Constr
             guess = inside ? newton : i % 3 == 2 ? (low.Value + high.Value) / 2 : Between(low, high);
         }
 
+        if (Math.Abs(scale.Root(here) - scale.Limit) > Sharp * scale.Limit) here = high;
         Limit = here.Value;
         _points.RemoveRange(inner + 1, _points.Count - inner - 1);
         _points.Add(here);
