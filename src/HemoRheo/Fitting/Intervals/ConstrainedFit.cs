@@ -25,7 +25,7 @@ internal sealed class ConstrainedFit(FittedLaw fit, HeldWeights held, FitFunctio
         var best = Descend(value, near);
         if (fit.Law.Boundary is not { } boundary || boundary.Parameter == function.Parameter) return best;
         var parameter = fit.Law.Parameters[boundary.Parameter];
-        if (!(near[boundary.Parameter] <= parameter.ToScaled(boundary.WallAt(LowestStress)))) return best;
+        if (!(near[boundary.Parameter] <= parameter.ToScaled(boundary.WallAt(new(LowestStress))[0]))) return best;
         var inside = near.ToArray();
         inside[boundary.Parameter] = parameter.ToScaled(boundary.InsideAt(LowestStress));
         return Descend(value, inside) is { } other && !(other.Sum >= best?.Sum) ? other : best;

@@ -48,7 +48,7 @@ internal sealed class ProfileSearch
     {
         var estimate = _function.Estimate(_fit);
         if (double.IsFinite(estimate)) return new(estimate, _fit.Scaled.ToArray(), _fit.Fit.ChiSquare, 0);
-        return BelievableRange.Beside(_fit, _function, boundary => boundary.WallAt(_constrained.LowestStress)) is { } near ? _constrained.At(near.Value, near.Scaled) : null;
+        return BelievableRange.Beside(_fit, _function, boundary => boundary.WallAt(new(_constrained.LowestStress))[0]) is { } near ? _constrained.At(near.Value, near.Scaled) : null;
     }
 
     private ProfileSide Side(ConstrainedMinimum start, int direction)
