@@ -71,7 +71,7 @@ public static class Glossary
         new("probability", "Probability of a result as extreme or more if nothing but chance is at work."),
         new("usable", "Whether the fit ended well enough numerically for values to be taken from it; it does not say that the law fits."),
         new("curves", "How many curves."),
-        new("curve", "Curve that the number belongs to, by sample and loading; all where curves fitted together share it."),
+        new("curve", "Curve that the number belongs to, by sample and loading, or by its number from 0 where these are alike; all where curves fitted together share it."),
         new("fits", "Whether the law fits: yes, or no, for a single fit with what contradicts it, its own curve or the pooled evidence of the whole study."),
         new("pattern probability", "Probability of mean residuals as large at the same places along the curves if the law is right, whatever the size of the errors."),
         new("parameters", "Parameters that the data had to give: those of the law, and the size of the errors where it is not known."),

@@ -54,7 +54,7 @@ public sealed record JointFit(
         return
         [
             number.Parameter.Name,
-            parameter.Curve is { } curve ? JointText.Name(Curves[curve]) : "all",
+            parameter.Curve is { } curve ? JointText.Name(this, curve) : "all",
             error is { } known ? Cell.Rounded(estimate, known) : estimate,
             error is { } shown ? Cell.Rounded(shown, Rounding.Uncertainty(shown)) : Cell.Empty,
             unit.Symbol,

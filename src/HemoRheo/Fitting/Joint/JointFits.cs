@@ -78,7 +78,7 @@ public static class JointFits
     /// <param name="hematocrits">Their hematocrits, between 0 and 1 L/L, taken as exact.</param>
     /// <param name="errors">The error model of all.</param>
     /// <returns>The fit; its <see cref="JointFit.Compatibility"/> holds it against Quemada's law with three numbers for every curve.</returns>
-    /// <remarks>The structure parameters are kept between 0 and 2 / highest hematocrit. Series of hematocrits that lie close together cannot tell plasma viscosity from structure, and say so. Source: Quemada 1978, Rheologica Acta 17:632-642.</remarks>
+    /// <remarks>The structure parameters are kept between 0 and 2 / highest hematocrit. Series of hematocrits that lie close together cannot tell plasma viscosity from structure, and say so. No loading has a factor here: where loadings scatter by more than the readings' errors, the fit and its <see cref="JointFit.Compatibility"/> feel it. Source: Quemada 1978, Rheologica Acta 17:632-642.</remarks>
     /// <exception cref="ArgumentException">There are fewer than two curves, not as many hematocrits, or one outside 0 to 1 L/L.</exception>
     public static JointFit FitDilution(this IReadOnlyList<FlowCurve> curves, IReadOnlyList<Hematocrit> hematocrits, ErrorModel errors)
     {

@@ -35,7 +35,7 @@ internal static class JointReport
     private static JointFit Told(JointPlan plan, JointProblem problem, JointSolution solution, FittedLaw[] alone, List<Finding> findings)
     {
         var (known, degrees) = (plan.Errors[0].ScaleKnown, problem.Points - solution.Free);
-        var why = solution.End.Converged && degrees == 0 && !known ? "no degrees of freedom left to estimate the size of the errors" : $"no covariance: {solution.End.Message}";
+        var why = solution.End.Converged && degrees == 0 && !known ? "no degrees of freedom left to estimate the size of the errors" : "no covariance: the fit found no minimum";
         var unknowns = new JointUnknowns(problem, solution);
         double[] covariance = solution.End.Converged && solution.Inverse().All(double.IsFinite) && (known || degrees > 0)
             ? unknowns.Covariance(known ? 1 : solution.ChiSquare / degrees)

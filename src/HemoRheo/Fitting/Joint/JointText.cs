@@ -22,8 +22,10 @@ internal static class JointText
         return text.ToString().TrimEnd('\n');
     }
 
-    /// <summary>A curve in words.</summary>
-    public static string Name(FlowCurve curve) => $"{curve.Label.Sample}, loading {curve.Label.Loading}";
+    /// <summary>A curve in words: sample and loading, or its number where these do not tell the curves apart.</summary>
+    public static string Name(JointFit fit, int curve) => fit.Curves.Select(Label).Distinct().Count() == fit.Curves.Count
+        ? Label(fit.Curves[curve])
+        : $"curve {curve}";
 
     /// <summary>The unit that a parameter is shown in.</summary>
     public static Unit ShownUnit(LawParameter parameter) => parameter.Unit switch
@@ -33,4 +35,6 @@ internal static class JointText
         "1/s" => ShownUnits.PerSecond,
         _ => new(Quantity.Number, parameter.Unit, parameter.Unit, 1),
     };
+
+    private static string Label(FlowCurve curve) => $"{curve.Label.Sample}, loading {curve.Label.Loading}";
 }

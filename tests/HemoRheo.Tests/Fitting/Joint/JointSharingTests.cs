@@ -99,6 +99,16 @@ public class JointSharingTests
     }
 
     [Fact]
+    public void A_parameter_that_starts_at_its_bound_comes_back_inside_where_the_curves_want_it()
+    {
+        var curve = Simulated.Exact(FlowLaw.Quemada, 0.0031, 2.5, 0.2);
+        var plan = new JointPlan { Curves = [curve, curve], Laws = Laws(2), Errors = [Errors, Errors], Shared = ["high-shear viscosity", "critical rate", "ratio"] };
+        var solution = JointSolver.Solve(plan.ToProblem(), [Math.Log(0.003), Math.Log(2), double.NegativeInfinity]);
+        Assert.True(solution.End.Converged);
+        Assert.Equal([Math.Log(0.0031), Math.Log(2.5), Math.Log(0.25)], solution.Scaled, (x, y) => Math.Abs(x - y) < 1e-9);
+    }
+
+    [Fact]
     public void A_ratio_of_one_curve_at_its_bound_is_held_for_that_curve_alone()
     {
         var fit = new[] { Simulated.Exact(FlowLaw.Quemada, 0.0031, 2.5, 0.3), Simulated.Exact(FlowLaw.Casson, 0.0034 * 2.5, 0.0034) }.FitTogether(FlowLaw.Quemada, ["critical rate"], Errors);

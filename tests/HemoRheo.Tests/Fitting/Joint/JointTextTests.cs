@@ -26,6 +26,14 @@ public class JointTextTests
         Assert.NotEmpty(table.Dictionary().Rows);
     }
 
+    [Fact]
+    public void Curves_that_are_labelled_alike_are_told_apart_by_their_numbers()
+    {
+        var curve = Simulated.Exact(FlowLaw.Casson, 0.005, 0.0034);
+        var table = new[] { curve, curve }.FitTogether(FlowLaw.Casson, ["yield stress"], WeightedFits.Errors).ToTable();
+        Assert.Equal(["all", "curve 0", "curve 1"], table.Rows.Select(row => row[1].Shown));
+    }
+
     /// <summary>Two curves of a joint fit share the critical rate: its part in their difference is smaller than their parts apart would make it.</summary>
     [Fact]
     public void What_curves_share_is_one_source_in_all_of_their_values()
