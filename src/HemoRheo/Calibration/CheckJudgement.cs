@@ -8,22 +8,28 @@ internal static class CheckJudgement
     /// <summary>The check with its outcome: it passes or fails where that is at least as probable as the level, else it cannot tell.</summary>
     internal static InstrumentCheck Judged(this InstrumentCheck check, double level)
     {
-        var verdict = Verdict.Of(check.Error, new(Math.Log(1 - check.Limit), Math.Log(1 + check.Limit)), level);
-        var outcome = verdict.Outcome switch
-        {
-            Outcome.Within => CheckOutcome.Passes,
-            Outcome.Below or Outcome.Above => CheckOutcome.Fails,
-            _ => CheckOutcome.CannotTell,
-        };
-        return check with { Outcome = outcome, ProbabilityWithin = verdict.Within };
+        var verdict = Verdict.Of(check.Error, Limits(check.Limit), level);
+        return check with { Outcome = OutcomeOf(verdict), ProbabilityWithin = verdict.Within };
     }
 
-    /// <summary>The check judged again with the scatter of checks beyond their fits in its budget, and the finding of its outcome.</summary>
+    /// <summary>Limits of ln(measured/expected) for a largest relative error.</summary>
+    internal static Interval Limits(double relative) => new(Math.Log(1 - relative), Math.Log(1 + relative));
+
+    /// <summary>What a verdict says of the instrument.</summary>
+    internal static CheckOutcome OutcomeOf(Verdict verdict) => verdict.Outcome switch
+    {
+        Outcome.Within => CheckOutcome.Passes,
+        Outcome.Below or Outcome.Above => CheckOutcome.Fails,
+        _ => CheckOutcome.CannotTell,
+    };
+
+    /// <summary>The check judged again with the scatter of checks beyond their fits in its budget, its decades of torque, and the findings of its outcome.</summary>
     internal static InstrumentCheck Settled(this InstrumentCheck check, Instrument instrument, CheckScatter? scatter, double level)
     {
         var error = scatter is null ? check.Error : check.Error.With(scatter.OfCheck(InstrumentDay.Key(instrument.Name, check.Day)));
         var settled = (check with { Error = error }).Judged(level);
-        return settled with { Findings = settled.Findings.With(settled.OutcomeFindings()) };
+        settled = settled with { Bands = CheckBands.Of(settled, instrument, level) };
+        return settled with { Findings = settled.Findings.With(settled.OutcomeFindings().Concat(CheckBands.Findings(settled))) };
     }
 
     private static IEnumerable<Finding> OutcomeFindings(this InstrumentCheck check)

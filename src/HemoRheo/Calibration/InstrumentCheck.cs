@@ -29,6 +29,13 @@ public sealed record InstrumentCheck(
     FittedLaw Fit,
     Items<Finding> Findings)
 {
+    /// <summary>The check by decades of torque, ascending; empty where torques are not known. The outcome above is that of the whole check.</summary>
+    public Items<CheckBand> Bands { get; init; } = Items<CheckBand>.None;
+
+    /// <summary>The decade that holds a torque; null where the check has no readings there and says nothing of it.</summary>
+    /// <param name="newtonMeters">The torque, N.m.</param>
+    public CheckBand? BandAt(double newtonMeters) => Bands.FirstOrDefault(band => band.Holds(newtonMeters));
+
     /// <summary>The local date of the check.</summary>
     public DateOnly Day => DateOnly.FromDateTime(At.DateTime);
 
