@@ -51,6 +51,26 @@ public sealed class AcceptanceTests
         }
     }
 
+    [Theory]
+    [InlineData(0.2, double.PositiveInfinity)]
+    [InlineData(0.45, double.PositiveInfinity)]
+    [InlineData(0.3, 4)]
+    public void Limits_of_acceptance_at_a_level_are_those_of_the_verdict_between_two_limits(double u, double df)
+    {
+        var limits = new Interval(-1, 1);
+        Value At(double x) => new(x, [new(new(SourceKind.Fit, ""), u, "e", df)]);
+        for (var x = -1.2; x <= 1.2; x += 0.0123)
+        {
+            var acceptance = Acceptance.AtLevel(At(x), limits, 0.95);
+            Assert.Equal(Verdict.Of(At(x), limits).Outcome == Outcome.Within, acceptance.Accepted);
+            Assert.Equal(0.05, acceptance.LargestWrongAcceptance, 1e-9);
+        }
+
+        Assert.Null(Acceptance.AtLevel(At(0) with { Parts = [new(new(SourceKind.Fit, ""), 0.6)] }, limits, 0.95).Limits);
+        // One limit: 1.64485362695147 u inside it (R qnorm).
+        Assert.Equal(10 - 1.64485362695147 * 0.3, Acceptance.AtLevel(Exactly(5, 0.3), OneLimit, 0.95).Limits!.Value.Upper, 1e-12);
+    }
+
     [Fact]
     public void Bands_that_meet_accept_nothing()
     {

@@ -57,7 +57,7 @@ internal static class CheckBands
             new(Math.Exp(fit.Scaled[0])),
             error,
             NormalizedError.Of(error),
-            Acceptance.Of(error, limits, GuardBand.ForLevel(level, error.DegreesOfFreedom)),
+            Acceptance.AtLevel(error, limits, level),
             outcome,
             verdict.Within,
             outcome == CheckOutcome.CannotTell ? CheckNeeds.Of(error, points.Count, limits, level) : null);
