@@ -9,6 +9,7 @@ return args switch
     ["coverage", var studies] => Coverage(Number(studies)),
     ["correlation", var studies] => Lines(CorrelationRun.Run(Number(studies))),
     ["intervals", var curves] => Lines(IntervalRun.Run(Number(curves))),
+    ["pooled-laws", var studies] => Lines(PooledLawsRun.Run(Number(studies))),
     ["speed"] => Speed(),
     ["speed", "--work", var file] => Lines(WorkSpeed.Run(file)),
     ["bootstrap"] => Lines(BootstrapSpeed.Run()),
@@ -47,6 +48,7 @@ static int Usage()
     Console.WriteLine("coverage N   coverage of 95 % intervals over N simulated studies, written, read and analyzed through the public API");
     Console.WriteLine("correlation N   correlated readings over N simulated studies: the correlation found, coverage of the fit's intervals, false alarms of the tests of fit");
     Console.WriteLine("intervals N  coverage of the intervals of one fit by every method, N curves a named truth (a tenth of them for the bootstraps)");
+    Console.WriteLine("pooled-laws N   laws compared over N simulated studies: what is said, and intervals with the part of the law and without");
     Console.WriteLine("speed        fits a second on one thread");
     Console.WriteLine("speed --work FILE    Casson and Quemada on every curve of a file, beside MathNet.Numerics");
     Console.WriteLine("bootstrap            one curve drawn and fitted anew 2,000 times");

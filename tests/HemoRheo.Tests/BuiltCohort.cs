@@ -24,7 +24,7 @@ internal static class BuiltCohort
     internal static Person Person(string id, string group) => new(id, group, new("people.csv"));
 
     internal static AnalyzedStudy Analyzed(Study study, IEnumerable<SampleResult> samples, IEnumerable<Person> people) =>
-        new(study, TestStudy.Readings(study) with { People = people.ToItems() }, [], new([], [], [], CorrelationPool.Of([], null), []), samples.ToItems());
+        new(study, TestStudy.Readings(study) with { People = people.ToItems() }, [], new([], [], [], CorrelationPool.Of([], null), new([], ""), [], []), samples.ToItems());
 
     /// <summary>Controls c1, c2, ... with one sample each, S-c1, S-c2, ..., whose values are these.</summary>
     internal static AnalyzedStudy Controls(params IEnumerable<double> logs)

@@ -24,6 +24,8 @@ internal sealed class StudyRun(TextWriter output, bool live)
         cancel.ThrowIfCancellationRequested();
         var result = study.Analyze(readings, steps, cancel);
         steps.Done("analyzed", $"{result.Samples.Count} samples, {result.Ranges.Count} reference ranges");
+        steps.Done("laws", result.Analyzed.Pool.Comparison.Words);
+        steps.Done("readings", result.Analyzed.Pool.Correlation.Words);
         var summary = readings.People.Count == 0 ? null : study.Summarize(result).By("group");
         var record = RunRecord.Of(result, summary);
         var comparison = ComparedWithPrevious(record, results);

@@ -56,6 +56,7 @@ internal static class ResultFormats
     {
         Show<StudyPool>(PoolView.Of, pool => $"pool of {pool.Laws.Count} laws, {pool.Slopes.Count} slopes");
         Show<Items<LawEvidence>>(laws => TableMarkup.Of(PoolView.Laws(laws)), laws => $"evidence for {laws.Count} laws");
+        Show<PooledComparison>(comparison => TableMarkup.Of(PoolView.Compared(comparison)), comparison => comparison.Words);
         Show<ReferenceRange>(range => RangesView.Of([range]), range => $"reference range of {range.Measurand.Name}, {Words.Of(range.Basis)}: {range.Limits.Select(range.Measurand.ToShown)} {range.Measurand.Shown}");
         Show<Items<ReferenceRange>>(RangesView.Of, ranges => $"{ranges.Count} reference ranges");
         Show<StudyResult>(ResultView.Of);

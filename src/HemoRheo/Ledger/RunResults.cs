@@ -94,6 +94,13 @@ internal static class RunResults
             yield return new($"evidence/{law.Law}/fits", law.Fits ? "yes" : "no");
         }
 
+        foreach (var law in pool.Comparison.Laws)
+        {
+            yield return new($"comparison/{law.Law}/standing", law.Standing.Words());
+            if (law.Difference is { } difference) yield return Number($"comparison/{law.Law}/difference", difference);
+        }
+
+        foreach (var spread in pool.Spreads) yield return Number($"spread of laws/{spread.Law}/{spread.Measurand.Name}", spread.Amount);
         foreach (var slope in pool.Slopes)
         {
             yield return Number($"slope/{slope.Law}/{slope.Measurand.Name}/value", slope.Slope);

@@ -20,8 +20,15 @@ internal static class CorrelationPool
     // Standardized residuals below 1e-9 are rounding: curves without noise.
     private const double NoScatter = 1e-18;
 
+    /// <summary>
+    /// The fits whose residuals are asked: those of the law that decides, unless they have a common pattern and another law of the study fits.
+    /// Misfit that varies from curve to curve looks like correlation, also when the common part is taken off.
+    /// </summary>
+    /// <param name="laws">Usable fits of each law to curves without faults; the law that decides first.</param>
+    public static IReadOnlyList<FittedLaw> Asked(IReadOnlyList<(FlowLaw Law, FittedLaw[] Fits)> laws) => laws.FirstOrDefault(law => LawJudgment.Judge(law.Law, law.Fits).Fits, laws[0]).Fits;
+
     /// <summary>The correlation a study's fits are to know of.</summary>
-    /// <param name="fits">Usable fits of the law that decides to curves without faults.</param>
+    /// <param name="fits">Usable fits of one law to curves without faults.</param>
     /// <param name="declared">Declared correlation; null to have it estimated.</param>
     public static PointCorrelation Of(IReadOnlyList<FittedLaw> fits, double? declared)
     {
@@ -33,7 +40,7 @@ internal static class CorrelationPool
                 : new(0, 0, null, null, null, 0, $"The {independent}: an estimate of their correlation needs {FewestCurves} curves.");
         }
 
-        var said = FormattableString.Invariant($"the residuals of {found.Curves} curves say {found.Correlation:F2} ± {found.Error:F2}");
+        var said = FormattableString.Invariant($"the {fits[0].Law} residuals of {found.Curves} curves say {found.Correlation:F2} ± {found.Error:F2}");
         if (declared is { } known) return new(known, 0, found.Correlation, found.Error, found.Probability, found.Curves, FormattableString.Invariant($"Neighboring readings of a ramp are correlated by {known:G3}, as the study file declares; {said}."));
         return found.Probability < Certain
             ? new(found.Correlation, found.Error, found.Correlation, found.Error, found.Probability, found.Curves, $"Neighboring readings of a ramp are correlated, and standard errors and tests of fit know it: {said}.")

@@ -71,6 +71,22 @@ public static class PoolingFindings
         "Decide by a law that the evidence allows; compare the fitted values with those interpolated from the readings.",
         "Pooled chi-square and mean residual pattern over the study");
 
+    /// <summary>The study's curves cannot tell the deciding law from another one.</summary>
+    public static FindingKind LawsNotParted { get; } = new(
+        "laws-not-parted", Severity.Warning,
+        "The study's curves together cannot tell the law that decides from another one; the spread of their values stands in every budget.",
+        "Few or noisy curves, or a range of shear rates in which the laws agree.",
+        "Measure more curves, or to lower shear rates; do not speak of what only one of the laws says.",
+        "AIC pooled over the study; Burnham and Anderson 2002, page 70; GUM 4.3.7 for the spread");
+
+    /// <summary>Another law describes the curves better than the deciding one.</summary>
+    public static FindingKind LawBehind { get; } = new(
+        "law-behind", Severity.Warning,
+        "Another law of the study describes the curves better than the one that decides, beyond chance but by little a curve.",
+        "A misfit that only many curves together can show.",
+        "Decide by the law that is preferred; look how far its values lie from those decided on.",
+        "AIC pooled over the study");
+
     /// <summary>No curve could be used to judge a law.</summary>
     public static FindingKind LawNotJudged { get; } = new(
         "law-not-judged", Severity.Fault,

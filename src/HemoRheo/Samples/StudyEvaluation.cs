@@ -16,16 +16,15 @@ public static class StudyEvaluation
         var histories = study.CheckInstruments(readings);
         var byInstrument = histories.ToDictionary(history => history.Instrument.Name);
         var records = readings.Samples.ToDictionary(record => record.Sample);
-        var independent = StudyLoadings.Of(study, readings, records, byInstrument, progress, cancel);
-        var correlation = CorrelationPool.Of(SoundFits(independent, FlowLaw.Named(study.Analysis.DecideBy)), study.Errors.PointCorrelation);
-        var loadings = StudyLoadings.Knowing(study, correlation, independent);
-        var samples = loadings.GroupBy(loading => loading.Recording.Sample).OrderBy(sample => sample.Key, StringComparer.Ordinal).Select(sample => (Name: sample.Key, Loadings: sample.ToItems())).ToArray();
+        var evidence = StudyEvidence.Of(study, StudyLoadings.Of(study, readings, records, byInstrument, progress, cancel));
+        var samples = evidence.Loadings.GroupBy(loading => loading.Recording.Sample).OrderBy(sample => sample.Key, StringComparer.Ordinal).Select(sample => (Name: sample.Key, Loadings: sample.ToItems())).ToArray();
 
         var laws = study.Analysis.Laws.Select(FlowLaw.Named).ToArray();
-        var evidence = laws.ToDictionary(law => law.Name, law => LawJudgment.Judge(law, SoundFits(loadings, law)));
         var sets = laws.SelectMany(law => MeasurandSet.Of(study, law).Select(measurands => new MeasurandSet(law, measurands, Scatter(study, law, measurands, samples.Select(sample => sample.Loadings))))).ToArray();
 
-        var native = samples.ToDictionary(sample => sample.Name, sample => sets.SelectMany(set => NativeValues.Of(study, sample.Name, sample.Loadings, set, evidence[set.Law.Name])).ToArray());
+        var alone = samples.ToDictionary(sample => sample.Name, sample => sets.SelectMany(set => NativeValues.Of(study, sample.Name, sample.Loadings, set, evidence.Laws[set.Law.Name])).ToArray());
+        var spreads = LawSpreads.Of(study, evidence.Comparison, alone.Values).ToItems();
+        var native = alone.ToDictionary(sample => sample.Key, sample => LawSpreads.Added(spreads, sample.Value));
         cancel.ThrowIfCancellationRequested();
         var inOrder = samples.Where(sample => sample.Loadings.All(loading => loading.Standing.Status == InstrumentStatus.InOrder)).Select(sample => sample.Name).ToArray();
         var slopes = StudySlopes.Of(study, readings, inOrder, native).ToItems();
@@ -38,7 +37,9 @@ public static class StudyEvaluation
             progress?.Report(new("budgets", results.Count, samples.Length));
         }
 
-        var pool = new StudyPool(sets.Select(set => set.Scatter).ToItems(), laws.Select(law => evidence[law.Name]).ToItems(), slopes, correlation, CorrelationPool.Findings(correlation).Concat(PoolFindings(study, sets, evidence.Values, slopes)).ToItems());
+        var pool = new StudyPool(
+            sets.Select(set => set.Scatter).ToItems(), laws.Select(law => evidence.Laws[law.Name]).ToItems(), slopes, evidence.Correlation, evidence.Comparison, spreads,
+            PoolFindings(study, sets, evidence, slopes).ToItems());
         return new(study, readings, histories, pool, results.ToItems());
     }
 
@@ -70,19 +71,16 @@ public static class StudyEvaluation
         return left == 0 ? scatter : scatter with { Findings = scatter.Findings.With([PoolingFindings.LoadingsNotIdentified.At(Where.Nowhere, $"{law.Name}, {measurands[0].Name}: {left} replicate loadings do not tell it and take no part in the scatter between loadings.", left)]) };
     }
 
-    private static IEnumerable<Finding> PoolFindings(Study study, IEnumerable<MeasurandSet> sets, IEnumerable<LawEvidence> evidence, IEnumerable<HematocritSlope> slopes)
+    private static IEnumerable<Finding> PoolFindings(Study study, IEnumerable<MeasurandSet> sets, StudyEvidence evidence, IEnumerable<HematocritSlope> slopes)
     {
+        foreach (var finding in CorrelationPool.Findings(evidence.Correlation)) yield return finding;
         foreach (var slope in slopes.Where(slope => slope.Law == study.Analysis.DecideBy && slope.WhyNot is not null)) yield return SampleFindings.NoSlope.At(Where.Nowhere, $"{slope.Measurand}, {slope.Law}: {slope.WhyNot}.");
         foreach (var finding in sets.SelectMany(set => set.Scatter.Findings)) yield return finding;
-        foreach (var law in evidence.Where(law => law.Law == study.Analysis.DecideBy))
-        {
-            if (law.Unfit is { } unfit) yield return unfit.At(Where.Nowhere, law.Words, law.PatternProbability);
-            else if (law.Probability < 1e-3) yield return PoolingFindings.ScatterLargerThanDeclared.At(Where.Nowhere, law.Words, law.ChiSquare / law.DegreesOfFreedom, 1);
-        }
+        var law = evidence.Laws[study.Analysis.DecideBy];
+        if (law.Unfit is { } unfit) yield return unfit.At(Where.Nowhere, law.Words, law.PatternProbability);
+        else if (law.Probability < 1e-3) yield return PoolingFindings.ScatterLargerThanDeclared.At(Where.Nowhere, law.Words, law.ChiSquare / law.DegreesOfFreedom, 1);
+        foreach (var finding in PooledComparing.Findings(evidence.Comparison, study.Analysis.DecideBy)) yield return finding;
     }
-
-    private static FittedLaw[] SoundFits(IEnumerable<LoadingResult> loadings, FlowLaw law) =>
-        [.. loadings.Select(loading => (Loading: loading, Fit: FitOf(loading, law))).Where(item => NativeValues.Sound(item.Loading, item.Fit)).Select(item => item.Fit)];
 
     private static FittedLaw FitOf(LoadingResult loading, FlowLaw law) => loading.Fits.First(fit => fit.Law == law);
 }

@@ -42,6 +42,9 @@ public enum SourceKind
     /// <summary>The study's slope against hematocrit.</summary>
     Slope,
 
+    /// <summary>The choice among laws that the study's curves cannot part.</summary>
+    Law,
+
     /// <summary>A known bias of the instrument that the study chose not to correct.</summary>
     Bias,
 

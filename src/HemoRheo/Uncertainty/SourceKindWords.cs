@@ -19,6 +19,7 @@ public static class SourceKindWords
         SourceKind.Plasma => "plasma",
         SourceKind.TorqueZero => "torque zero",
         SourceKind.Slope => "slope",
+        SourceKind.Law => "law",
         SourceKind.Bias => "bias",
         SourceKind.People => "people",
         _ => throw new ArgumentOutOfRangeException(nameof(kind)),

@@ -27,6 +27,9 @@ internal static class FakeValues
         [new("Casson", Rates.ToItems<Measurand>(), [new([0.025, 0.018, 0.012], 4.2)], 5, [])],
         [new("Casson", 15, 131.5, 135, 0.57, 0.41, true, "The law describes the curves of this study.")],
         [.. Rates.Select(rate => new HematocritSlope("Casson", rate, 4.6, 0.5, 30, 3.9, 8, null))],
+        new(0.31, 0.08, 0.31, 0.08, 0.0004, 15, "Neighboring readings of a ramp are correlated: the residuals of 15 curves say 0.31 ± 0.08."),
+        new([new("Casson", LawStanding.NotParted, 15, -812.4, 0, null, 0.9), new("Quemada", LawStanding.NotParted, 15, -808.1, 4.3, 3.9, 0.1)], "These 15 curves cannot tell Casson and Quemada apart."),
+        [.. Rates.Select(rate => new LawSpread("Casson", rate, 0.004, 8))],
         []);
 
     private static ReferenceRange Range(ViscosityAtRate rate, HematocritBasis basis, double level) => new(

@@ -17,9 +17,16 @@ internal static class PoolView
             ? [slope.Law, slope.Measurand.Name, Cell.Rounded(slope.Slope, slope.StandardUncertainty), Cell.Rounded(slope.StandardUncertainty, Rounding.Uncertainty(slope.StandardUncertainty)), "1 per L/L", slope.DegreesOfFreedom, slope.People, Cell.Empty]
             : [slope.Law, slope.Measurand.Name, Cell.Empty, Cell.Empty, "1 per L/L", Cell.Empty, slope.People, slope.WhyNot]);
 
+    public static Table Compared(PooledComparison comparison) => Table.Of("law", "standing", "curves", "AIC", "difference", "difference error", "weight").WithRows(
+        comparison.Laws,
+        law => [law.Law, law.Standing.Words(), law.Curves, Places(law.Criterion), Places(law.Difference), Places(law.DifferenceError), law.Weight is { } weight ? Probability(weight) : Cell.Empty]);
+
     public static Markup Of(StudyPool pool) => Markup.Of($"""
-        {TableMarkup.Of(Laws(pool.Laws), "Evidence of all curves for each law")}{TableMarkup.Of(Scatter(pool.Scatter), "Scatter between loadings of one sample, beyond their fits")}{TableMarkup.Of(Slopes(pool.Slopes), "Slope of the logarithm against hematocrit")}{FindingsView.Folded(pool.Findings)}
+        <p>{pool.Comparison.Words}</p><p>{pool.Correlation.Words}</p>
+        {TableMarkup.Of(Laws(pool.Laws), "Evidence of all curves for each law")}{TableMarkup.Of(Compared(pool.Comparison), "Laws compared on all curves together")}{TableMarkup.Of(Scatter(pool.Scatter), "Scatter between loadings of one sample, beyond their fits")}{TableMarkup.Of(Slopes(pool.Slopes), "Slope of the logarithm against hematocrit")}{FindingsView.Folded(pool.Findings)}
         """);
+
+    private static Cell Places(double? number) => number is { } known ? Cell.Rounded(known, known.ToString("F1", System.Globalization.CultureInfo.InvariantCulture)) : Cell.Empty;
 
     private static Cell Probability(double probability) => double.IsFinite(probability) ? Cell.Rounded(probability, Rounding.Digits(probability, 2)) : Cell.Empty;
 }

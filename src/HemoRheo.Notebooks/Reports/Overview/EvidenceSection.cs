@@ -9,7 +9,10 @@ internal static class EvidenceSection
         var pool = edition.Results.Analyzed.Pool;
         return Page.Section("laws", "What only the whole study can tell", Markup.Of($"""
             <h3>Laws</h3>
-            <ul class="look">{pool.Laws.OrderBy(law => law.Law == edition.Law ? 0 : 1).Select(law => Markup.Of($"<li>{law.Words}{(law.Law == edition.Law ? Markup.Of($" <b>This law decides.</b>") : Markup.None)}</li>\n"))}</ul>
+            <ul class="look">{pool.Laws.OrderBy(law => law.Law == edition.Law ? 0 : 1).Select(law => Markup.Of($"<li>{law.Words}{(law.Law == edition.Law ? Markup.Of($" <b>This law decides.</b>") : Markup.None)}</li>\n"))}
+            <li>{pool.Comparison.Words}{Spread(edition, pool)}</li></ul>
+            <h3>Readings of a ramp</h3>
+            <ul class="look"><li>{pool.Correlation.Words}</li></ul>
             <h3>Between loadings</h3>
             <ul class="look">{pool.Scatter.Where(scatter => scatter.Law == edition.Law).Select(Scatter)}</ul>
             <h3>Slope of the logarithm of viscosity against hematocrit</h3>
@@ -17,6 +20,12 @@ internal static class EvidenceSection
             <thead><tr><th scope="col">quantity</th><th scope="col">law</th><th scope="col" class="n">slope, per L/L</th><th scope="col" class="n">standard uncertainty</th><th scope="col" class="n">plain slope</th><th scope="col" class="n">people</th><th scope="col">usable</th></tr></thead>
             <tbody>{pool.Slopes.Where(slope => slope.Law == edition.Law).Select(Slope)}</tbody></table></div>
             """));
+    }
+
+    private static string Spread(Edition edition, StudyPool pool)
+    {
+        string[] parts = [.. pool.Spreads.Where(spread => spread.Law == edition.Law).Select(spread => $"{spread.Measurand.Name} {Figures.Signed(100 * spread.Amount)} %")];
+        return parts.Length == 0 ? "" : $" Part of the law: {string.Join(", ", parts)}.";
     }
 
     private static Markup Scatter(LoadingScatter scatter)

@@ -62,6 +62,7 @@ internal static class SampleBudget
         SourceKind.Plasma => "plasma viscosity of the sample",
         SourceKind.TorqueZero => "torque zero of the day",
         SourceKind.Slope => "slope against hematocrit",
+        SourceKind.Law => "laws that the study cannot part",
         SourceKind.Bias => "known bias, not corrected",
         _ => kind.Words(),
     };

@@ -20,11 +20,13 @@ internal static class CurveTables
 
     /// <summary>One row a law.</summary>
     public static StudyTable Laws(Edition edition) => new("laws.csv", "One row a law: what all curves of the study together say of it.",
-        Table.Of("law", "decides", "curves", "chi-square", "degrees of freedom", "probability", "pattern probability", "fits", "reason")
+        Table.Of("law", "decides", "curves", "chi-square", "degrees of freedom", "probability", "pattern probability", "fits", "standing", "AIC", "difference", "difference error", "weight", "reason")
             .WithRows(edition.Results.Analyzed.Pool.Laws, law =>
             [
-                law.Law, law.Law == edition.Law, law.Curves, StudyTable.Number(law.ChiSquare), law.DegreesOfFreedom, StudyTable.Number(law.Probability), StudyTable.Number(law.PatternProbability), law.Fits, law.Words,
+                law.Law, law.Law == edition.Law, law.Curves, StudyTable.Number(law.ChiSquare), law.DegreesOfFreedom, StudyTable.Number(law.Probability), StudyTable.Number(law.PatternProbability), law.Fits, .. Compared(edition.Results.Analyzed.Pool.Comparison.Laws.FirstOrDefault(compared => compared.Law == law.Law)), law.Words,
             ]));
+
+    private static Cell[] Compared(PooledLaw? law) => [law?.Standing.Words(), StudyTable.Number(law?.Criterion), StudyTable.Number(law?.Difference), StudyTable.Number(law?.DifferenceError), StudyTable.Number(law?.Weight)];
 
     private static IEnumerable<(string Sample, LoadingResult Result)> Loadings(Edition edition) => edition.Results.Samples.SelectMany(sample => sample.Result.Loadings.Select(loading => (sample.Sample, loading)));
 
