@@ -37,6 +37,23 @@ internal static class Words
         _ => "the data cannot be fitted",
     };
 
+    public static string Of(IntervalMethod method) => method switch
+    {
+        IntervalMethod.Wald => "Wald",
+        IntervalMethod.ProfileLikelihood => "profile likelihood",
+        IntervalMethod.ParametricBootstrap => "parametric bootstrap",
+        _ => "residual bootstrap",
+    };
+
+    public static string Of(IntervalKind kind) => kind switch
+    {
+        IntervalKind.Closed => "closed",
+        IntervalKind.AtMost => "at most",
+        IntervalKind.AtLeast => "at least",
+        IntervalKind.NotIdentifiable => "not identifiable",
+        _ => "no answer",
+    };
+
     /// <summary>A quantity with its unit, where it has one.</summary>
     public static string WithUnit(Measurand measurand) => measurand.Shown.Symbol == "1" ? measurand.Name : $"{measurand.Name}, {measurand.Shown.Symbol}";
 

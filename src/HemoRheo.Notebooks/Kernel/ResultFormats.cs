@@ -16,6 +16,7 @@ internal static class ResultFormats
         Show<Finding>(finding => TableMarkup.Of(FindingsView.Table([finding])));
         Show<Items<Finding>>(FindingsView.Of, findings => FindingsView.Count(findings));
         ShowReadings();
+        ShowFits();
         ShowValues();
         ShowStudies();
         Show<InteractiveChart>(ChartMarkup.Of);
@@ -39,6 +40,19 @@ internal static class ResultFormats
         Show<InstrumentHistory>(history => HistoryView.Of([history]), history => $"instrument {history.Instrument.Name}: {history.Checks.Count} checks");
         Show<Items<InstrumentHistory>>(HistoryView.Of, histories => $"{histories.Count} instruments, {histories.Sum(history => history.Checks.Count)} checks");
         Show<Items<InstrumentCheck>>(checks => TableMarkup.Of(HistoryView.Table(checks)), checks => $"{checks.Count} checks");
+    }
+
+    private static void ShowFits()
+    {
+        Show<Items<FittedLaw>>(fits => TableMarkup.Of(fits.ToTable()), fits => $"{fits.Count} fits");
+        Show<FitInterval>(IntervalView.Of);
+        Show<Items<FitInterval>>(IntervalView.Of, intervals => $"{intervals.Count} intervals");
+        Show<Profile>(IntervalView.Of);
+        Show<LawComparison>(ComparisonView.Of, comparison => comparison.Verdict);
+        Show<FlowBehavior>(BehaviorView.Of);
+        Show<JointFit>(JointFitView.Of);
+        Show<LoadingsFit>(loadings => JointFitView.Of(loadings.Joint));
+        Show<QuemadaStructure>(structure => Markup.Of($"<p>{structure.ToString()}</p>{FindingsView.Of(structure.Findings)}"));
     }
 
     private static void ShowValues()

@@ -9,6 +9,16 @@ namespace HemoRheo;
 /// <param name="Start">Where a fit of a user's own law starts; null for a built-in law, which guesses from the curve.</param>
 public sealed record LawParameter(string Name, string Symbol, string Unit, double Lower = 0, double Upper = double.PositiveInfinity, double? Start = null)
 {
+    /// <summary>The unit in which tables and charts show it.</summary>
+    public Unit Shown => Unit switch
+    {
+        "Pa" => ShownUnits.Millipascal,
+        "Pa.s" => ShownUnits.MillipascalSecond,
+        "1/s" => ShownUnits.PerSecond,
+        "1" => ShownUnits.One,
+        _ => new(Quantity.Number, Unit, Unit, 1),
+    };
+
     /// <summary>From the fitting scale to the natural one.</summary>
     internal double ToNatural(double scaled) => ToNatural(new Lane(scaled))[0];
 

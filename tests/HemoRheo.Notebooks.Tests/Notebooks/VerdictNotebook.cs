@@ -1,7 +1,4 @@
 namespace HemoRheo.Notebooks.Tests;
 
 /// <summary>The notebook of the whole chain.</summary>
-public sealed class VerdictNotebook() : HeadlessNotebook(jupyter => jupyter.Execute(Source))
-{
-    internal static string Source { get; } = Path.Combine(Repository.Root, "notebooks", "01-from-export-to-verdict.ipynb");
-}
+public sealed class VerdictNotebook() : KeptNotebook("01-from-export-to-verdict.ipynb", charts: 7);

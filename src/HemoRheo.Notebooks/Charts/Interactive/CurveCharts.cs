@@ -26,5 +26,22 @@ public static class CurveCharts
     /// <exception cref="InvalidOperationException">No point has a rate and stress above zero.</exception>
     public static InteractiveChart ViscosityChart(this FittedLaw fit) => Of($"viscosity of {fit.Curve.Label.Sample} with {fit.Law.Name}", CurvePicture.Viscosity(fit.Curve, fit));
 
+    /// <summary>Residuals in standard deviations against shear rate. A pattern says that the law has another shape than the curve.</summary>
+    /// <param name="fit">The fitted law.</param>
+    /// <exception cref="InvalidOperationException">The fit has no residuals.</exception>
+    public static InteractiveChart ResidualChart(this FittedLaw fit) => fit.Residuals.Count == 0
+        ? throw new InvalidOperationException($"The fit of {fit.Law.Name} to {fit.Curve.Label.Sample} has no residuals: {fit.Convergence.Message}")
+        : Drawn.Of($"residuals of {fit.Law.Name} on {fit.Curve.Label.Sample}", Notebooks.ResidualChart.Model([(fit.Law.Name, fit)]), Notebooks.ResidualChart.Height);
+
+    /// <summary>How far the fit worsens when one quantity is held at other values, with the limit of the interval. Where the line stays under the limit the interval is open.</summary>
+    /// <param name="profile">The profile, for example <c>fit.Profile("yield stress")</c>.</param>
+    /// <exception cref="InvalidOperationException">The profile has no point.</exception>
+    public static InteractiveChart Chart(this Profile profile) => Drawn.Of($"profile of {profile.Interval.Name}", ProfileChart.Model(profile), ProfileChart.Height);
+
+    /// <summary>Readings and laws as percent differences from the law with the lowest AICc.</summary>
+    /// <param name="comparison">The comparison.</param>
+    /// <exception cref="InvalidOperationException">No law could be fitted.</exception>
+    public static InteractiveChart Chart(this LawComparison comparison) => Drawn.Of("laws compared", ComparisonChart.Model(comparison), ComparisonChart.Height);
+
     private static InteractiveChart Of(string title, PlotModel picture) => Drawn.Of(title, picture, CurvePicture.Height);
 }

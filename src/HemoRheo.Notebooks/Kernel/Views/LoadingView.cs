@@ -4,7 +4,7 @@ namespace HemoRheo.Notebooks;
 internal static class LoadingView
 {
     public static Table Fits(IEnumerable<FittedLaw> fits) => Table.Of("law", "parameter", "estimate", "standard error", "unit", "chi-square", "degrees of freedom", "usable").WithRows(
-        fits.SelectMany(fit => FitView.Table(fit).Rows.Select(row => (fit, row))),
+        fits.SelectMany(fit => fit.ToTable().Rows.Select(row => (fit, row))),
         one => [one.fit.Law.Name, one.row[0], one.row[2], one.row[3], one.row[4], one.fit.Fit.ChiSquare, one.fit.Fit.DegreesOfFreedom, one.fit.Usable]);
 
     public static Markup Of(LoadingResult loading) => Markup.Of($"""

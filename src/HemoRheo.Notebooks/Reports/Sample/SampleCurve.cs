@@ -56,11 +56,12 @@ internal static class SampleCurve
 
     private static Markup Parameter(FittedParameter parameter)
     {
-        var (factor, unit) = parameter.Parameter.Unit switch { "Pa" => (1e3, "mPa"), "Pa.s" => (1e3, "mPa·s"), var other => (1.0, other) };
+        var unit = parameter.Parameter.Shown;
+        var estimate = unit.FromSi(parameter.Estimate);
         var number = parameter.StandardError is { } error && double.IsFinite(error)
-            ? Rounding.WithUncertainty(factor * parameter.Estimate, factor * error)
-            : double.IsFinite(parameter.Estimate) ? $"{Rounding.Digits(factor * parameter.Estimate, 4)} (no error: {parameter.WhyNoError})" : Figures.Nothing;
-        return Markup.Of($"{parameter.Parameter.Name} {number}{(unit == "1" ? "" : $" {unit}")}{(parameter.AtBound ? ", at its bound" : "")}");
+            ? Rounding.WithUncertainty(estimate, unit.FromSi(error))
+            : double.IsFinite(estimate) ? $"{Rounding.Digits(estimate, 4)} (no error: {parameter.WhyNoError})" : Figures.Nothing;
+        return Markup.Of($"{parameter.Parameter.Name} {number}{(unit == ShownUnits.One ? "" : $" {unit.Symbol}")}{(parameter.AtBound ? ", at its bound" : "")}");
     }
 
     private static Markup Aside(Items<LoadingResult> loadings)
