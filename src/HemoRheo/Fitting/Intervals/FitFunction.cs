@@ -21,7 +21,7 @@ internal sealed class FitFunction(string name, Unit shown, Interval range, Func<
     /// <summary>A parameter of a law, on its fitting scale.</summary>
     public static FitFunction Of(LawParameter parameter, int index) => new(
         parameter.Name,
-        Unit(parameter.Unit),
+        parameter.Shown,
         new(parameter.Lower, parameter.Upper),
         parameter.ToNatural,
         (scaled, gradient) => One(scaled, gradient, index),
@@ -69,13 +69,4 @@ internal sealed class FitFunction(string name, Unit shown, Interval range, Func<
         gradient[index] = 1;
         return scaled[index];
     }
-
-    private static Unit Unit(string unit) => unit switch
-    {
-        "Pa" => ShownUnits.Millipascal,
-        "Pa.s" => ShownUnits.MillipascalSecond,
-        "1/s" => ShownUnits.PerSecond,
-        "1" => ShownUnits.One,
-        _ => new(Quantity.Number, unit, unit, 1),
-    };
 }

@@ -49,8 +49,8 @@ public sealed record JointFit(
     /// <summary>One row a parameter: estimate and standard error from the fit alone, and whose it is.</summary>
     public Table ToTable() => Table.Of("parameter", "curve", "estimate", "standard error", "unit", "why no error").WithRows(Parameters, parameter =>
     {
-        var (number, unit) = (parameter.Number, JointText.ShownUnit(parameter.Number.Parameter));
-        var (estimate, error) = (number.Estimate / unit.Factor, number.StandardError / unit.Factor);
+        var (number, unit) = (parameter.Number, parameter.Number.Parameter.Shown);
+        var (estimate, error) = (unit.FromSi(number.Estimate), number.StandardError / unit.Factor);
         return
         [
             number.Parameter.Name,

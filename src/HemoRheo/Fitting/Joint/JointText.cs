@@ -27,14 +27,5 @@ internal static class JointText
         ? Label(fit.Curves[curve])
         : $"curve {curve}";
 
-    /// <summary>The unit that a parameter is shown in.</summary>
-    public static Unit ShownUnit(LawParameter parameter) => parameter.Unit switch
-    {
-        "Pa" => ShownUnits.Millipascal,
-        "Pa.s" => ShownUnits.MillipascalSecond,
-        "1/s" => ShownUnits.PerSecond,
-        _ => new(Quantity.Number, parameter.Unit, parameter.Unit, 1),
-    };
-
     private static string Label(FlowCurve curve) => $"{curve.Label.Sample}, loading {curve.Label.Loading}";
 }
