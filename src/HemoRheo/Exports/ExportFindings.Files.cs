@@ -12,8 +12,8 @@ public static partial class ExportFindings
     /// <summary>A path or link leads out of the study's folder; nothing was read from it.</summary>
     public static FindingKind PathLeadsOut { get; } = new("path-leads-out", Severity.Fault, "A path or link leads out of the study's folder; nothing was read from it.", "A link to data that lie elsewhere.", "Copy the data into the study's folder.");
 
-    /// <summary>A file is named as an export of blood and as a check; nothing was read from it.</summary>
-    public static FindingKind FileInBothLists { get; } = new("file-in-both-lists", Severity.Fault, "A file is named as an export of blood and as a check; nothing was read from it.", "A checks folder inside the exports folder.", "Keep exports and checks in folders of their own.");
+    /// <summary>A file is named in more than one of exports, checks and blanks; nothing was read from it.</summary>
+    public static FindingKind FileInBothLists { get; } = new("file-in-both-lists", Severity.Fault, "A file is named in more than one of exports, checks and blanks; nothing was read from it.", "A folder of checks or blank runs inside the exports folder.", "Keep blood, checks and blank runs in folders of their own.");
 
     /// <summary>The study file names a folder for exports of blood, and no file lies there.</summary>
     public static FindingKind NoExports { get; } = new("no-exports", Severity.Fault, "The study file names a folder for exports of blood, and no file lies there.", "Exports not yet copied, or another folder named.", "Copy the exports into the folder, or correct exports in the study file.");

@@ -24,10 +24,15 @@ internal sealed class ReadingFields(Layout layout, FileFindings findings)
         }
 
         if (!kept || Needed.Any(meaning => texts[meaning] is not null && Value(meaning) is null)) return;
-        Question(ExportFindings.RateNotPositive, FieldMeaning.Speed, texts, line, draft, point);
-        Question(ExportFindings.RateNotPositive, FieldMeaning.ShearRate, texts, line, draft, point);
-        Question(ExportFindings.StressNotPositive, FieldMeaning.Torque, texts, line, draft, point);
-        Question(ExportFindings.StressNotPositive, FieldMeaning.ShearStress, texts, line, draft, point);
+        // The torque of an empty gap lies about zero, and it may be read at rest.
+        if (draft.Kind != RecordingKind.Blank)
+        {
+            Question(ExportFindings.RateNotPositive, FieldMeaning.Speed, texts, line, draft, point);
+            Question(ExportFindings.RateNotPositive, FieldMeaning.ShearRate, texts, line, draft, point);
+            Question(ExportFindings.StressNotPositive, FieldMeaning.Torque, texts, line, draft, point);
+            Question(ExportFindings.StressNotPositive, FieldMeaning.ShearStress, texts, line, draft, point);
+        }
+
         draft.Readings.Add(new(
             point,
             RampOf(texts, line, draft, point),

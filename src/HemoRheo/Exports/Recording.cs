@@ -1,12 +1,12 @@
 namespace HemoRheo;
 
 /// <summary>One filling of the gap as exported: its readings and what file and samples table say of it.</summary>
-/// <param name="Kind">Blood or check.</param>
-/// <param name="Sample">Pseudonym of the sample, or name of the check.</param>
+/// <param name="Kind">Blood, check or blank run.</param>
+/// <param name="Sample">Pseudonym of the sample, or name of the check or blank run.</param>
 /// <param name="Loading">Number of the loading, from 1.</param>
 /// <param name="Instrument">Name of the instrument.</param>
 /// <param name="Geometry">Name of the geometry; null where rate and stress are exported and none is named.</param>
-/// <param name="Fluid">Name of the calibration fluid; null for blood.</param>
+/// <param name="Fluid">Name of the calibration fluid; null for blood and blank runs.</param>
 /// <param name="StartedAt">Date and time with offset; its date there is the day of the recording.</param>
 /// <param name="Readings">Readings in file order.</param>
 /// <param name="Where">Where it begins.</param>

@@ -13,7 +13,7 @@ internal sealed class RecordingJoin(Study study, StudyTables tables)
         foreach (var same in drafts.GroupBy(pair => (pair.Draft.Kind, pair.Draft.Sample, pair.Draft.Loading)).Where(same => same.Count() > 1))
             foreach (var (draft, findings) in same)
                 SetAside(draft, findings, ExportFindings.LoadingTwice, $"Found this sample and loading {same.Count()} times ({string.Join("; ", same.Select(other => $"{other.Draft.Where.File}:{other.Draft.Where.Line}"))}), expected it once; all of them were set aside.");
-        return [.. drafts.Select(pair => pair.Draft.Kind == RecordingKind.Blood ? Blood(pair.Draft, pair.Findings) : Check(pair.Draft, pair.Findings)).OfType<Recording>()];
+        return [.. drafts.Select(pair => pair.Draft.Kind == RecordingKind.Blood ? Blood(pair.Draft, pair.Findings) : WithoutBlood(pair.Draft, pair.Findings)).OfType<Recording>()];
     }
 
     private Recording? Blood(RecordingDraft draft, FileFindings findings)
@@ -32,10 +32,11 @@ internal sealed class RecordingJoin(Study study, StudyTables tables)
         return Made(draft, findings, row?.Instrument, row?.Geometry, row?.StartedAt, null, row?.Record.Where);
     }
 
-    private Recording? Check(RecordingDraft draft, FileFindings findings)
+    /// <summary>A check or blank run. A blank run needs no row of the check table where its export says all.</summary>
+    private Recording? WithoutBlood(RecordingDraft draft, FileFindings findings)
     {
         var row = _checks.GetValueOrDefault(draft.Sample);
-        if (row is null && study.Files.CheckTable is { } table)
+        if (row is null && draft.Kind == RecordingKind.Check && study.Files.CheckTable is { } table)
             findings.Add(draft.Mark(ExportFindings.RecordingWithoutCheckRow, null, null, $"Found no row of the check table {table} for this check."));
         return Made(draft, findings, row?.Instrument, row?.Geometry, row?.StartedAt, row?.Fluid, row?.Where);
     }

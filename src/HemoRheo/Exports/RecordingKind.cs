@@ -8,4 +8,7 @@ public enum RecordingKind
 
     /// <summary>A calibration fluid.</summary>
     Check,
+
+    /// <summary>Nothing but air: a blank run, which shows the torque zero and its noise.</summary>
+    Blank,
 }

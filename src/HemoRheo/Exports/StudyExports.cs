@@ -14,12 +14,14 @@ public static class StudyExports
         var tables = StudyTables.Read(study);
         var blood = ExportFolder.Find(study, study.Files.Exports, loose);
         var checks = ExportFolder.Find(study, study.Files.Checks, loose);
-        var both = blood.Intersect(checks).ToHashSet();
+        var blanks = ExportFolder.Find(study, study.Files.Blanks, loose);
+        var twice = blood.Intersect(checks).Concat(blood.Concat(checks).Intersect(blanks)).ToHashSet();
         List<FileReading> files =
         [
-            .. blood.Except(both).Select(path => FileReader.Read(study, path, RecordingKind.Blood)),
-            .. checks.Except(both).Select(path => FileReader.Read(study, path, RecordingKind.Check)),
-            .. both.Select(path => InBoth(study, path)),
+            .. blood.Except(twice).Select(path => FileReader.Read(study, path, RecordingKind.Blood)),
+            .. checks.Except(twice).Select(path => FileReader.Read(study, path, RecordingKind.Check)),
+            .. blanks.Except(twice).Select(path => FileReader.Read(study, path, RecordingKind.Blank)),
+            .. twice.Select(path => InTwoLists(study, path)),
         ];
         tables = SampleMetadata.Complete(tables, files);
         var recordings = new RecordingJoin(study, tables).Complete(files);
@@ -31,16 +33,22 @@ public static class StudyExports
             study,
             shown,
             recordings.Where(recording => recording.Kind == RecordingKind.Blood).OrderBy(recording => recording.Sample, StringComparer.Ordinal).ThenBy(recording => recording.Loading).ToItems(),
-            recordings.Where(recording => recording.Kind == RecordingKind.Check).OrderBy(recording => recording.StartedAt).ThenBy(recording => recording.Sample, StringComparer.Ordinal).ToItems(),
+            ByTime(recordings, RecordingKind.Check),
             tables.Samples.Select(row => row.Record).OrderBy(record => record.Sample, StringComparer.Ordinal).ToItems(),
             tables.People.OrderBy(person => person.Id, StringComparer.Ordinal).ToItems(),
-            shown.SelectMany(file => file.Findings).Concat(loose).ToItems());
+            shown.SelectMany(file => file.Findings).Concat(loose).ToItems())
+        {
+            Blanks = ByTime(recordings, RecordingKind.Blank),
+        };
     }
 
-    private static FileReading InBoth(Study study, string path)
+    private static Items<Recording> ByTime(List<Recording> recordings, RecordingKind kind) =>
+        recordings.Where(recording => recording.Kind == kind).OrderBy(recording => recording.StartedAt).ThenBy(recording => recording.Sample, StringComparer.Ordinal).ToItems();
+
+    private static FileReading InTwoLists(Study study, string path)
     {
         var findings = new FileFindings(FolderPath.Shown(study.Folder, path));
-        findings.Refuse(ExportFindings.FileInBothLists, null, null, "Found this file among the exports of blood and among the checks, expected it in one of the two.");
+        findings.Refuse(ExportFindings.FileInBothLists, null, null, "Found this file in more than one of exports, checks and blanks, expected it in one of them.");
         return FileReader.Opened(path, findings.File, "utf-8", null, findings, _ => []);
     }
 
@@ -48,12 +56,12 @@ public static class StudyExports
     {
         var drafts = files.SelectMany(file => file.Drafts).ToList();
         var blood = drafts.Where(draft => draft.Kind == RecordingKind.Blood).Select(draft => draft.Sample).ToHashSet();
-        var checks = drafts.Where(draft => draft.Kind == RecordingKind.Check).Select(draft => draft.Sample).ToHashSet();
+        var others = drafts.Where(draft => draft.Kind != RecordingKind.Blood).Select(draft => draft.Sample).ToHashSet();
         var people = tables.People.Select(person => person.Id).ToHashSet();
         var measured = tables.Samples.Select(row => row.Record.Person).ToHashSet();
         foreach (var row in tables.Samples.Where(row => !blood.Contains(row.Record.Sample)))
             yield return ExportFindings.SampleWithoutRecording.At(row.Record.Where, "Found no recording of this sample in the exports.");
-        foreach (var row in tables.Checks.Where(row => !checks.Contains(row.Check)))
+        foreach (var row in tables.Checks.Where(row => !others.Contains(row.Check)))
             yield return ExportFindings.CheckWithoutRecording.At(row.Where, "Found no recording of this check in the exports.");
         if (study.Files.People is null) yield break;
         foreach (var row in tables.Samples.Where(row => !people.Contains(row.Record.Person)))

@@ -1,6 +1,6 @@
 namespace HemoRheo;
 
-/// <summary>All that was read for a study: recordings of blood and of checks, the samples table, and what was understood of each file.</summary>
+/// <summary>All that was read for a study: recordings of blood, of checks and of blank runs, the samples table, and what was understood of each file.</summary>
 /// <param name="Study">The study.</param>
 /// <param name="Files">Every file, in path order.</param>
 /// <param name="Blood">Recordings of blood, by sample, then loading.</param>
@@ -17,6 +17,9 @@ public sealed record StudyReadings(
     Items<Person> People,
     Items<Finding> Findings)
 {
+    /// <summary>Recordings of blank runs, by time.</summary>
+    public Items<Recording> Blanks { get; init; } = Items<Recording>.None;
+
     /// <inheritdoc/>
-    public override string ToString() => $"{Files.Count} files, {Blood.Count} loadings of {Samples.Count} samples, {Checks.Count} checks, {Findings.Count} findings";
+    public override string ToString() => $"{Files.Count} files, {Blood.Count} loadings of {Samples.Count} samples, {Checks.Count} checks,{(Blanks.Count == 0 ? "" : $" {Blanks.Count} blank runs,")} {Findings.Count} findings";
 }

@@ -7,7 +7,8 @@ public static partial class StudyFileKeys
     [
         Text("[[instruments]]", "name", "Name that exports and tables use.", "R1"),
         Optional(Amount("[[instruments]]", "torque_floor", Quantity.Torque, KeyBounds.Positive, "Torque below which readings are set aside; without it every reading is marked.", "0.1 µN.m")),
-        Amount("[[instruments]]", "torque_zero", Quantity.Torque, KeyBounds.NotNegative, "Standard uncertainty of the day's torque zero.", "0.005 µN.m"),
+        Amount("[[instruments]]", "torque_zero", Quantity.Torque, KeyBounds.NotNegative, "Standard uncertainty of the day's torque zero, where no blank run of the day tells it.", "0.005 µN.m"),
+        Default("false", Truth("[[instruments]]", "correct_torque_zero", "true: the zero of a blank run is taken from every torque. false: it is not, and its size is part of the uncertainty.", "true")),
         Optional(Amount("[[instruments]]", "torque_resolution", Quantity.Torque, KeyBounds.Positive, "Step in which the instrument gives torques; joins the floor of the readings' errors by each curve's geometry.", "0.01 µN.m")),
         Amount("[[instruments]]", "thermometer", Quantity.TemperatureDifference, KeyBounds.NotNegative, "Standard uncertainty of the thermometer.", "0.1 K"),
         Amount("[[instruments]]", "check_every", Quantity.Time, KeyBounds.Positive, "How long a passed check vouches for the instrument.", "8 d"),

@@ -13,9 +13,10 @@ public static partial class StudyFileKeys
     [
         Texts("[files]", "exports", "Files or folders with the exports of blood, below the study's folder.", "exports"),
         Default("[]", Texts("[files]", "checks", "Files or folders with the exports of instrument checks.", "checks")),
+        Default("[]", Texts("[files]", "blanks", "Files or folders with the exports of blank runs: the instrument turning with nothing in the gap, which show torque zero and noise.", "blanks")),
         Text("[files]", "samples", "The samples table (CSV: comma, decimal point, UTF-8).", "samples.csv"),
         Optional(Text("[files]", "people", "The people table (CSV) with person and group; needed to compare groups.", "people.csv")),
-        Optional(Text("[files]", "check_table", "A table (CSV) with what check exports do not say: fluid, instrument, started_at, geometry.", "checks.csv")),
+        Optional(Text("[files]", "check_table", "A table (CSV) with what exports of checks and blank runs do not say: fluid, instrument, started_at, geometry.", "checks.csv")),
         Default("[]", Texts("[files]", "allowed_columns", "Columns of these tables that look like direct identifiers and may stand there all the same; they are never read.", "collection_name")),
     ];
 

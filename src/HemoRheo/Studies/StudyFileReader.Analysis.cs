@@ -7,13 +7,14 @@ internal sealed partial class StudyFileReader
     {
         var files = new StudyFiles(section.Texts("exports"), section.Texts("checks"), section.Text("samples"), section.OptionalText("people"), section.OptionalText("check_table"))
         {
+            Blanks = section.Texts("blanks"),
             AllowedColumns = section.Texts("allowed_columns"),
         };
         if (section.Table.Find("exports")?.Node is TomlList { Items.Count: 0 })
             section.Refuse("exports", "no export", "at least one file or folder", "name the folder with the exports");
         foreach (var entry in section.Table.Entries.Where(entry => entry.Key is not "allowed_columns"))
             foreach (var node in entry.Node is TomlList list ? list.Items : [entry.Node])
-                if (node is TomlScalar { Value: string path }) CheckPath(node, path, mayBeFolder: entry.Key is "exports" or "checks");
+                if (node is TomlScalar { Value: string path }) CheckPath(node, path, mayBeFolder: entry.Key is "exports" or "checks" or "blanks");
         return files;
     }
 

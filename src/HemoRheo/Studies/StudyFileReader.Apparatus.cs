@@ -12,7 +12,10 @@ internal sealed partial class StudyFileReader
         section.Amount("check_limit"),
         section.OptionalAmount("check_scatter"),
         section.Moments("adjusted"),
-        section.OptionalAmount("torque_resolution"));
+        section.OptionalAmount("torque_resolution"))
+    {
+        CorrectTorqueZero = section.Truth("correct_torque_zero"),
+    };
 
     private static Geometry Geometry(SectionReader section)
     {

@@ -8,6 +8,9 @@ namespace HemoRheo;
 /// <param name="CheckTable">A table (CSV) that says of each check export what the export does not (fluid, instrument, time); null where exports say it all.</param>
 public sealed record StudyFiles(Items<string> Exports, Items<string> Checks, string Samples, string? People, string? CheckTable)
 {
+    /// <summary>Files or folders with the exports of blank runs; empty where there are none.</summary>
+    public Items<string> Blanks { get; init; } = Items<string>.None;
+
     /// <summary>Columns of the tables that look like direct identifiers and may stand there all the same. They are never read.</summary>
     public Items<string> AllowedColumns { get; init; } = Items<string>.None;
 }

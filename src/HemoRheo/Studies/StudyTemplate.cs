@@ -14,9 +14,10 @@ seed = 1                                  # of every random stream; any whole nu
 [files]                                   # paths below the folder of this file
 exports = ["exports"]                     # files or folders with exports of blood
 checks = ["checks"]                       # exports of instrument checks
+# blanks = ["blanks"]                     # exports of blank runs: turning with nothing in the gap; they show torque zero and noise
 samples = "samples.csv"                   # comma, decimal point, UTF-8; units in the header: hematocrit [L/L], plasma_viscosity [mPa.s]
 people = "people.csv"                     # person,group; leave out where no groups are compared
-# check_table = "checks.csv"              # what check exports do not say: check,fluid,instrument,started_at,geometry
+# check_table = "checks.csv"              # what exports of checks and blank runs do not say: check,fluid,instrument,started_at,geometry
 # allowed_columns = ["collection_name"]   # columns that look like direct identifiers; allowed to stand there, never read
 
 # The three tables have a header row, comma, decimal point, and are UTF-8. Columns stand in any order; the unit stands in the header.
@@ -48,9 +49,9 @@ people = "people.csv"                     # person,group; leave out where no gro
 #   person                      required; as in the samples table
 #   group                       required: code of one of [[groups]]
 #
-# checks.csv, only where check exports do not say all of it, one row a check
-#   check                       required; what check exports have as sample
-#   fluid                       required where the exports do not say it: name of one of [[fluids]]
+# checks.csv, only where exports of checks or blank runs do not say all of it, one row a check or blank run
+#   check                       required; what their exports have as sample
+#   fluid                       required for checks where the exports do not say it: name of one of [[fluids]]; empty for blank runs
 #   instrument, geometry, started_at    as in the samples table
 
 # One section a kind of export. Headers are the exact texts of the export.
@@ -112,8 +113,9 @@ shear_stress = { header = "Stress [mPa]", unit = "mPa" }
 
 [[instruments]]
 name = "R1"
-torque_floor = "0.1 µN.m"                 # readings below it are set aside
-torque_zero = "0.005 µN.m"                # standard uncertainty of the day's torque zero
+torque_floor = "0.1 µN.m"                 # readings below it are set aside; a blank run may raise it
+torque_zero = "0.005 µN.m"                # standard uncertainty of the day's torque zero, where no blank run of the day tells it
+# correct_torque_zero = true              # take the zero of the blank run from every torque; left out, its size is part of the uncertainty
 # torque_resolution = "0.01 µN.m"         # step in which torques are given; joins the floor of [errors] by each curve's geometry
 thermometer = "0.1 K"                     # standard uncertainty
 check_every = "8 d"                       # how long a passed check vouches for the instrument

@@ -138,7 +138,7 @@ public sealed class StudyFileFaultTests
         var fault = Assert.Single(Assert.Throws<StudyFileException>(() => Study.Open(folder.StudyFile)).Faults);
 
         Assert.Contains("a link that leads out of the study's folder", fault.Found, StringComparison.Ordinal);
-        Assert.Equal((11, 11), (fault.Line, fault.Column));
+        Assert.Equal((12, 11), (fault.Line, fault.Column));
     }
 
     [Fact]
