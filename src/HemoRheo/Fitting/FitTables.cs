@@ -17,7 +17,7 @@ public static class FitTables
 
     /// <summary>One row a fit, of whatever laws and curves.</summary>
     /// <param name="fits">The fits.</param>
-    public static Table ToTable(this IEnumerable<FittedLaw> fits) => Table.Of("sample", "loading", "law", "points", "estimates", "chi-square", "degrees of freedom", "probability", "stop reason", "usable").WithRows(fits, fit =>
+    public static Table ToTable(this IEnumerable<FittedLaw> fits) => Table.Of("sample", "loading", "law", "points", "estimates", "chi-square", "degrees of freedom", "probability", "usable").WithRows(fits, fit =>
     [
         fit.Curve.Label.Sample,
         fit.Curve.Label.Loading,
@@ -27,7 +27,6 @@ public static class FitTables
         Finite(fit.Fit.ChiSquare),
         fit.Fit.DegreesOfFreedom,
         fit.Fit.Probability is { } probability ? Cell.Rounded(probability, Rounding.Digits(probability, 2)) : Cell.Empty,
-        fit.Convergence.Message,
         fit.Usable,
     ]);
 

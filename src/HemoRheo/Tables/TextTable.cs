@@ -8,6 +8,7 @@ internal static class TextTable
 {
     private const string Gap = "  ";
     private const int Narrowest = 12;
+    private const int LongestKeptWord = 20;
 
     public static string Write(Table table, int width)
     {
@@ -30,7 +31,7 @@ internal static class TextTable
     {
         var longest = headers.Select((_, i) => cells.Max(row => (int?)Length(row[i])) ?? 0).ToArray();
         var widths = headers.Select((header, i) => Math.Max(Length(header), longest[i])).ToArray();
-        var narrowest = headers.Select((header, i) => right[i] ? Math.Max(LongestWord(header), longest[i]) : Math.Min(widths[i], Narrowest)).ToArray();
+        var narrowest = headers.Select((header, i) => right[i] ? Math.Max(LongestWord(header), longest[i]) : Math.Min(widths[i], Math.Max(Narrowest, KeptWord(cells, i)))).ToArray();
         var excess = widths.Sum() + Gap.Length * (widths.Length - 1) - width;
         for (; excess > 0; excess--)
         {
@@ -92,6 +93,10 @@ internal static class TextTable
         var space = new string(' ', Math.Max(0, width - Length(text)));
         return right ? space + text : text + space;
     }
+
+    /// <summary>The longest word of a column that is not broken; longer ones, such as paths, are.</summary>
+    private static int KeptWord(string[][] cells, int column) =>
+        cells.SelectMany(row => row[column].Split(' ')).Select(Length).Where(length => length <= LongestKeptWord).DefaultIfEmpty(0).Max();
 
     private static int LongestWord(string text) => text.Split(' ').Max(Length);
 

@@ -9,6 +9,9 @@ public sealed class StillPictureTests
     private static readonly JudgedSample Sample = FakeStudy.Result["S-0001"];
     private static readonly SampleValue[] Native = [.. Sample.Values.Take(3).Select(value => value.Value)];
 
+    private static readonly FlowCurve Curve = FlowCurve.Of([1, 3, 10, 30, 100], [0.016, 0.032, 0.07, 0.16, 0.44]);
+    private static readonly ErrorModel Errors = ErrorModel.Known(0.02, ShearStress.FromMillipascals(0.5));
+
     public static TheoryData<string> Pictures => new(Drawings.Keys);
 
     private static Dictionary<string, (Func<string> Draw, string[] Texts)> Drawings { get; } = new()
@@ -16,6 +19,8 @@ public sealed class StillPictureTests
         ["flow curve"] = (() => FlowCurveChart.Svg(Sample.Result.Loadings, "Casson", Native, 0.0048), ["shear rate, 1/s", "apparent viscosity, mPa·s", "loading 1, kept", "loading 1, set aside", "torque floor", "100"]),
         ["flow curve of one loading"] = (() => FlowCurveChart.Svg(Sample.Result.Loadings[0], "Casson"), ["shear rate, 1/s", "apparent viscosity, mPa·s"]),
         ["residuals"] = (() => ResidualChart.Svg(Sample.Result.Loadings, "Casson"), ["shear rate, 1/s", "standardized residual, 1", "two standard deviations"]),
+        ["profile"] = (() => Still.Svg(ProfileChart.Model(Curve.Fit(FlowLaw.Casson, Errors).Profile("yield stress")), ProfileChart.Height), ["yield stress, mPa", "rise of the misfit, standard deviations", "limit for 95 %", "end of the interval", "estimate"]),
+        ["comparison"] = (() => Still.Svg(ComparisonChart.Model(Curve.Compare(Errors, FlowLaw.Casson, FlowLaw.PowerLaw)), ComparisonChart.Height), ["shear rate, 1/s", "readings"]),
         ["budget"] = (() => BudgetChart.Svg(Native), ["size of the contribution, % of the value (one standard uncertainty)", "calibration (shared)", "together"]),
         ["checks"] = (() => CheckChart.Svg(FakeStudy.Result.Analyzed.Histories[0], StatusSpans.Of(FakeStudy.Result.Analyzed.Histories[0])), ["measured less certified, %", "date (as recorded)", "limit of a check", "fails", "cannot tell", "in doubt"]),
         ["strip"] = (() => RangeStripChart.Svg([new("<b>row</b> & more", Sample.Values[0].Range, [.. FakeStudy.Result.Samples.Select(sample => sample.Values[0])], [])], "viscosity at 1 1/s, mPa·s", whiskers: true), ["viscosity at 1 1/s, mPa·s", "<b>row</b> & more", "within", "instrument not in order"]),

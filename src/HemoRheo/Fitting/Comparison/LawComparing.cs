@@ -51,7 +51,7 @@ public static class LawComparing
 
     private static ComparedLaw Against(ComparedLaw law) => law with
     {
-        Against = law.Fit.Fit is { Contradicts: true, Probability: { } p } ? FormattableString.Invariant($"lack of fit, p {p:G2}")
+        Against = law.Fit.Fit is { Contradicts: true, Probability: { } p } ? p < 1e-4 ? "lack of fit, p below 0.0001" : FormattableString.Invariant($"lack of fit, p {p:G2}")
             : law.Difference > LawComparison.Contradicting ? FormattableString.Invariant($"AICc {law.Difference:F1} above the lowest")
             : null,
     };
