@@ -24,7 +24,9 @@ internal static class ComparisonChart
         double Percent(double rate, double pascals) => 100 * (pascals / basis.Law.Stress(new(rate), estimates).Pascals - 1);
         var points = basis.Curve.Points.Select(point => new DataPoint(point.Rate.ReciprocalSeconds, Percent(point.Rate.ReciprocalSeconds, point.Stress.Pascals))).ToArray();
         var lines = drawn.Select(law => LawLine.Of(law.Fit).Select(point => new DataPoint(point.Rate, Percent(point.Rate, point.Viscosity / 1000 * point.Rate))).ToArray()).ToArray();
-        var reach = Math.Max(1, 1.2 * points.Concat(lines.SelectMany(line => line)).Max(point => Math.Abs(point.Y)));
+        // A law that is contradicted may leave the picture; what the data cannot part stays in it.
+        var near = lines.Where((_, i) => drawn[i].Against is null).SelectMany(line => line);
+        var reach = Math.Max(1, 1.5 * points.Concat(near).Max(point => Math.Abs(point.Y)));
 
         var model = Still.Model();
         model.Axes.Add(Still.Log(AxisPosition.Bottom, "shear rate, 1/s", kept.Lower / 1.3, kept.Upper * 1.3));

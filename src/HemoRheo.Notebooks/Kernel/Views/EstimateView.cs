@@ -13,6 +13,8 @@ internal static class EstimateView
             Cell.Rounded(interval.Lower, quarter),
             Cell.Rounded(interval.Upper, quarter),
             estimate.Measurand.Shown.Symbol);
-        return TableMarkup.Of(table, "95 % interval from the fit alone: the scatter between loadings and the instrument are not in it");
+        return TableMarkup.Of(table, estimate.Value.Part(SourceKind.Loading) is null
+            ? "95 % interval from the fit alone: the scatter between loadings and the instrument are not in it"
+            : "95 % interval from the fit and the scatter between these loadings: the instrument is not in it");
     }
 }
