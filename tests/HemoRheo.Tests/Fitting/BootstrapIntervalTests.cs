@@ -23,6 +23,17 @@ public class BootstrapIntervalTests
         }
     }
 
+    /// <summary>With nine degrees of freedom Student's t is 15 % wider than the normal quantile, and so must the percentiles be; 8,000 refits have a sampling error of 1.5 % of the width.</summary>
+    [Theory]
+    [InlineData(IntervalMethod.ParametricBootstrap)]
+    [InlineData(IntervalMethod.ResidualBootstrap)]
+    public void An_estimated_scale_moves_the_percentiles_out_as_far_as_Student_asks(IntervalMethod method)
+    {
+        var fit = Curve.Fit((FlowLaw)FlowLaw.Quemada, WeightedFits.Errors with { ScaleKnown = false });
+        var (bootstrap, profile) = (fit.Interval(Measurand.Viscosity(100.PerSecond()), 0.95, method, new(Replicates: 8000)), fit.Interval(Measurand.Viscosity(100.PerSecond())));
+        Assert.Equal(1, (bootstrap.Upper!.Value - bootstrap.Lower!.Value) / (profile.Upper!.Value - profile.Lower!.Value), 0.06);
+    }
+
     [Fact]
     public void Numbers_depend_on_seed_sample_law_and_method_alone()
     {

@@ -85,6 +85,17 @@ public class IntervalTests
     }
 
     [Fact]
+    public void A_law_of_ones_own_that_throws_on_the_way_out_gives_no_answer()
+    {
+        var law = FlowLaw.Custom("brittle", (rate, p) => Checked(p[0] * rate), new LawParameter("eta", "η", "Pa.s", Start: 0.0033));
+        var fit = Simulated.Exact(FlowLaw.Newtonian, 0.0033).Fit((FlowLaw)law, ErrorModel.Known(0.5, ShearStress.FromPascals(0.1)));
+        Assert.Contains("throws: too far", fit.Interval("eta").WhyNone, StringComparison.Ordinal);
+        Assert.Empty(fit.Profile("eta").Points);
+
+        static LaneDual Checked(LaneDual stress) => stress.Value[0] > 1.1 ? throw new InvalidOperationException("too far") : stress;
+    }
+
+    [Fact]
     public void Misuse_is_told_what_to_do()
     {
         Assert.Contains("it has yield stress, Casson viscosity", Assert.Throws<ArgumentException>(() => Blood.Interval("tau")).Message, StringComparison.Ordinal);

@@ -16,6 +16,8 @@ internal sealed class ConstrainedFit(FittedLaw fit, HeldWeights held, FitFunctio
     /// <summary>A parameter that moves no reading by this share of its standard deviation is not a parameter there.</summary>
     private const double Silent = 1e-8;
 
+    private readonly double[] _firstGuess = FirstGuess(fit);
+
     /// <summary>Lowest stress of the curve, Pa.</summary>
     public double LowestStress { get; } = fit.Curve.Points.Min(point => point.Stress.Pascals);
 
@@ -31,22 +33,31 @@ internal sealed class ConstrainedFit(FittedLaw fit, HeldWeights held, FitFunctio
         return Descend(value, inside) is { } other && !(other.Sum >= best?.Sum) ? other : best;
     }
 
-    /// <summary>The lowest minimum at the same value that is found when each other parameter in turn starts far off; null where there is none.</summary>
+    /// <summary>The lowest minimum at the same value from far starts: the law's own first guess of the curve, and each other parameter in turn far off; null where there is none.</summary>
     public ConstrainedMinimum? Elsewhere(ConstrainedMinimum point)
     {
         ConstrainedMinimum? best = null;
-        for (var k = 0; k < point.Scaled.Length; k++)
+        foreach (var near in FarStarts(point.Scaled))
         {
-            if (k == function.Parameter || double.IsInfinity(point.Scaled[k])) continue;
-            foreach (var side in (ReadOnlySpan<double>)[-1, 1])
-            {
-                var near = (double[])point.Scaled.Clone();
-                near[k] += side * Longest(k, near[k]) / 2;
-                if (Descend(point.Value, near) is { } other && !(other.Sum >= best?.Sum)) best = other;
-            }
+            if (Descend(point.Value, near) is { } other && !(other.Sum >= best?.Sum)) best = other;
         }
 
         return best;
+    }
+
+    private IEnumerable<double[]> FarStarts(double[] scaled)
+    {
+        yield return _firstGuess;
+        for (var k = 0; k < scaled.Length; k++)
+        {
+            if (k == function.Parameter || double.IsInfinity(scaled[k])) continue;
+            foreach (var side in (int[])[-1, 1])
+            {
+                var near = (double[])scaled.Clone();
+                near[k] += side * Longest(k, near[k]) / 2;
+                yield return near;
+            }
+        }
     }
 
     private ConstrainedMinimum? Descend(double value, ReadOnlySpan<double> near)
@@ -124,6 +135,13 @@ internal sealed class ConstrainedFit(FittedLaw fit, HeldWeights held, FitFunctio
         }
 
         return fall;
+    }
+
+    private static double[] FirstGuess(FittedLaw fit)
+    {
+        var guess = new double[fit.Scaled.Count];
+        fit.Law.FirstGuess([.. fit.Curve.Points.Select(point => point.Rate.ReciprocalSeconds)], [.. fit.Curve.Points.Select(point => point.Stress.Pascals)], guess);
+        return fit.Law.ToScaled(guess);
     }
 
     private static double Length(double[] column)

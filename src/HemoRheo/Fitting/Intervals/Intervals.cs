@@ -12,19 +12,35 @@ internal static class Intervals
             throw new ArgumentOutOfRangeException(nameof(draws), $"{draws.Replicates} replicates say nothing of the tails; at least {BootstrapDraws.FewestReplicates} are needed.");
         }
 
-        return method switch
+        try
         {
-            IntervalMethod.Wald => WaldInterval.Of(fit, function, level),
-            IntervalMethod.ProfileLikelihood => ProfileSearch.Of(fit, function, level).Interval,
-            _ => BootstrapInterval.Of(fit, function, level, method, draws),
-        };
+            return method switch
+            {
+                IntervalMethod.Wald => WaldInterval.Of(fit, function, level),
+                IntervalMethod.ProfileLikelihood => ProfileSearch.Of(fit, function, level).Interval,
+                _ => BootstrapInterval.Of(fit, function, level, method, draws),
+            };
+        }
+        catch (Exception thrown) when (fit.Law is UserLaw)
+        {
+            return IntervalAnswer.None(fit, function, level, method, Throws(thrown));
+        }
     }
 
     public static Profile ProfileOf(FittedLaw fit, FitFunction function, double level)
     {
         Check(level);
-        return ProfileSearch.Of(fit, function, level);
+        try
+        {
+            return ProfileSearch.Of(fit, function, level);
+        }
+        catch (Exception thrown) when (fit.Law is UserLaw)
+        {
+            return new(IntervalAnswer.None(fit, function, level, IntervalMethod.ProfileLikelihood, Throws(thrown)), IntervalAnswer.Quantile(fit, level), []);
+        }
     }
+
+    private static string Throws(Exception thrown) => $"the formula of the law throws: {thrown.Message}";
 
     private static void Check(double level)
     {
