@@ -48,19 +48,8 @@ internal static class CheckBands
         if (!fit.Usable) return null;
         var torque = new Interval(Math.Pow(10, decade), Math.Pow(10, decade + 1));
         var error = new Value(fit.Scaled[0] - Math.Log(check.Expected.PascalSeconds), check.Error.Parts.Select(part => OfBand(part, check.Fit, fit, instrument, decade)).ToItems());
-        var limits = CheckJudgement.Limits(check.Limit);
-        var verdict = Verdict.Of(error, limits, level);
-        var outcome = CheckJudgement.OutcomeOf(verdict);
-        return new(
-            torque,
-            points.Count,
-            new(Math.Exp(fit.Scaled[0])),
-            error,
-            NormalizedError.Of(error),
-            Acceptance.AtLevel(error, limits, level),
-            outcome,
-            verdict.Within,
-            outcome == CheckOutcome.CannotTell ? CheckNeeds.Of(error, points.Count, limits, level) : null);
+        var verdict = Verdict.Of(error, CheckJudgement.Limits(check.Limit), level);
+        return new(torque, points.Count, new(Math.Exp(fit.Scaled[0])), error, check.Limit, level, CheckJudgement.OutcomeOf(verdict), verdict.Within);
     }
 
     private static Contribution OfBand(Contribution part, FittedLaw whole, FittedLaw band, Instrument instrument, int decade) => part.Source.Kind switch
