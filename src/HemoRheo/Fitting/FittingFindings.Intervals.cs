@@ -20,4 +20,13 @@ public static partial class FittingFindings
         "The curve hardly tells the parameters apart, or its lowest stresses are near the floor of the errors.",
         "Use profile likelihood, or a law with fewer parameters.",
         "limit 1 % by choice: fewer move a 95 % limit by less than its own sampling error");
+
+    /// <summary>A yield stress far below the stresses that were read.</summary>
+    public static FindingKind YieldStressByForm { get; } = new(
+        "yield-stress-by-form",
+        Severity.Warning,
+        "The limits of a yield stress lie far below every stress that was read, so the form of the law gives them: another law that describes the readings as well may have another yield stress, or none.",
+        "The program of shear rates ends above the rates at which a yield stress shows.",
+        "Measure at lower rates; ask curve.FlowBehavior() whether the curve shows a yield stress; do not compare such yield stresses between laws.",
+        "Barnes and Walters 1985, Rheologica Acta 24:323-326; limit 2 by choice: at least half of the lowest stress would be yield stress");
 }

@@ -27,6 +27,18 @@ public class YieldStressFromHighRatesTests
         }
     }
 
+    [Fact]
+    public void Limits_far_below_every_stress_that_was_read_are_said_to_come_from_the_form_of_the_law()
+    {
+        var published = Published["43"].Fit((FlowLaw)FlowLaw.Casson).Interval("yield stress");
+        Assert.Contains(published.Findings, finding => finding.Kind == FittingFindings.YieldStressByForm);
+        Assert.Contains("Right only if the form of Casson is", published.ToString(), StringComparison.Ordinal);
+
+        double[] rates = [0.05, 0.1, 0.3, 1, 3, 10, 30];
+        var low = FlowCurve.Of(rates, [.. rates.Select(rate => FlowLaw.Casson.Stress(new(rate), 0.01, 0.0033).Pascals)]);
+        Assert.Empty(low.Fit((FlowLaw)FlowLaw.Casson, ErrorModel.Known(0.01, ShearStress.FromMillipascals(0.1))).Interval("yield stress").Findings);
+    }
+
     /// <summary>Quemada's ratio, zero for a yield stress and one for none, at the lowest hematocrit.</summary>
     [Fact]
     public void At_the_lowest_hematocrit_the_published_curve_cannot_tell_a_yield_stress_from_a_plateau()

@@ -6,7 +6,7 @@ namespace HemoRheo;
 internal static class YieldStressEvidence
 {
     /// <summary>Largest ratio of the lowest stress to the yield stress at which the low rates reach near enough, by choice: at least half of that stress is then yield stress.</summary>
-    private const double NearEnough = 2;
+    internal const double NearEnough = 2;
 
     /// <summary>Where the plateau of viscosity begins that must be excluded, as a share of the lowest rate, by choice.</summary>
     private const double LatePlateau = 0.1;

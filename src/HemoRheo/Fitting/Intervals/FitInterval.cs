@@ -42,12 +42,14 @@ public sealed record FitInterval(
     /// <inheritdoc/>
     public override string ToString() => Kind switch
     {
-        IntervalKind.Closed => $"{Name} {Closed(Shown.FromSi(Lower!.Value), Shown.FromSi(Upper!.Value))}{UnitWord} ({How})",
+        IntervalKind.Closed => $"{Name} {Closed(Shown.FromSi(Lower!.Value), Shown.FromSi(Upper!.Value))}{UnitWord} ({How}){ByForm}",
         IntervalKind.AtMost => $"{Name} at most {One(Upper!.Value)}{UnitWord} ({How}); these shear rates {(double.IsFinite(Range.Lower) ? $"do not exclude {End(Range.Lower)}" : "set no lower limit")}",
         IntervalKind.AtLeast => $"{Name} at least {One(Lower!.Value)}{UnitWord} ({How}); these shear rates {(double.IsFinite(Range.Upper) ? $"do not exclude {End(Range.Upper)}" : "set no upper limit")}",
         IntervalKind.NotIdentifiable => $"{Name}: not identifiable with these shear rates ({How})",
         _ => $"{Name}: no answer ({How}): {WhyNone}",
     };
+
+    private string ByForm => Findings.FirstOrDefault(finding => finding.Kind == FittingFindings.YieldStressByForm) is { } finding ? $". {finding.Message.TrimEnd('.')}" : "";
 
     private string How => string.Create(CultureInfo.InvariantCulture, $"{100 * Level:G6} %, {MethodWord}");
 

@@ -8,7 +8,7 @@ internal static class IntervalAnswer
 
     /// <summary>An answer with limits, SI; null where a side is open.</summary>
     public static FitInterval Of(FittedLaw fit, FitFunction function, double? lower, double? upper, double level, IntervalMethod method, Items<Finding> findings) =>
-        new(function.Name, function.Shown, EstimateOf(fit, function), lower, upper, function.Range, level, method, null, findings);
+        new(function.Name, function.Shown, EstimateOf(fit, function), lower, upper, function.Range, level, method, null, findings.With(FarExtrapolation.Of(fit, function, upper)));
 
     /// <summary>No answer, with the reason.</summary>
     public static FitInterval None(FittedLaw fit, FitFunction function, double level, IntervalMethod method, string why) =>
