@@ -8,7 +8,7 @@ internal static class TextTable
 {
     private const string Gap = "  ";
     private const int Narrowest = 12;
-    private const int LongestKeptWord = 20;
+    private const int LongestKeptWord = 16;
 
     public static string Write(Table table, int width)
     {
