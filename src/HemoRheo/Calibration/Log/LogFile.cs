@@ -104,8 +104,9 @@ internal sealed class LogFile(string path, TimeSpan patience, int? mostPages)
             throw new InstrumentLogException(FormattableString.Invariant($"The instrument log '{path}' has format {format}; this program knows format {Format}. It was left as it is: use the version of the program that wrote it, or a newer one."));
         }
 
-        // SQLite takes a last page that was cut off for zeros.
-        if (new FileInfo(path).Length < Number(connection, "PRAGMA page_count") * Number(connection, "PRAGMA page_size")) throw new InstrumentLogException(LogTrouble.Damaged(path));
+        // SQLite takes a last page that was cut off for zeros. The length is asked last: a log only grows, perhaps between the two questions.
+        var whole = Number(connection, "PRAGMA page_count") * Number(connection, "PRAGMA page_size");
+        if (new FileInfo(path).Length < whole) throw new InstrumentLogException(LogTrouble.Damaged(path));
     }
 
     private SqliteConnection Connected(SqliteOpenMode mode)
