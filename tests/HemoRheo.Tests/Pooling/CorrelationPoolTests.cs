@@ -69,6 +69,23 @@ public sealed class CorrelationPoolTests
         Assert.Null(CorrelationPool.Of(Fits.OfAll([.. Enumerable.Repeat(exact, 10)], FlowLaw.Newtonian, ErrorModel.Default), null).Estimate);
     }
 
+    /// <summary>Taken as exact, the estimated correlation would call a right law wrong on one curve in fifty at a level of one in a thousand.</summary>
+    [Fact]
+    public void Lack_of_fit_knows_that_the_correlation_is_an_estimate()
+    {
+        var (knowing, exact) = (0, 0);
+        for (var study = 0; study < 100; study++)
+        {
+            var fits = Drawn(study, 0.6);
+            var correlation = CorrelationPool.Of(fits, null);
+            knowing += fits.Count(fit => fit.WithCorrelation(correlation.Value, correlation.StandardError).Fit.Contradicts);
+            exact += fits.Count(fit => fit.WithCorrelation(correlation.Value).Fit.Contradicts);
+        }
+
+        Assert.InRange(knowing, 0, 10);
+        Assert.InRange(exact, 20, 100);
+    }
+
     [Fact]
     public void Misfit_that_all_curves_share_is_not_taken_for_correlation()
     {

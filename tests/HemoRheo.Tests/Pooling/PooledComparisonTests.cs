@@ -8,6 +8,7 @@ public sealed class PooledComparisonTests
     [Theory]
     [InlineData(0.01, 0)]
     [InlineData(0.03, 0)]
+    [InlineData(0.01, 0.6)]
     [InlineData(0.03, 0.6)]
     public void Twenty_curves_of_Quemada_blood_expose_Casson_every_time(double noise, double correlation) =>
         Assert.All(Enumerable.Range(0, 25), study =>
