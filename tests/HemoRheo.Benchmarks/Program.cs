@@ -13,6 +13,7 @@ return args switch
     ["speed"] => Speed(),
     ["speed", "--work", var file] => Lines(WorkSpeed.Run(file)),
     ["bootstrap"] => Lines(BootstrapSpeed.Run()),
+    ["hard", var curves] => Lines(HardRun.Run(Number(curves))),
     ["workload", var curves, var file] => Lines([WorkFile.Write(file, Number(curves))]),
     ["nist", "--folder", var folder] => Lines(CertifiedRun.Run(folder)),
     ["chart", var charts] => Lines(ChartRun.Run(Number(charts))),
@@ -52,6 +53,7 @@ static int Usage()
     Console.WriteLine("speed        fits a second on one thread");
     Console.WriteLine("speed --work FILE    Casson and Quemada on every curve of a file, beside MathNet.Numerics");
     Console.WriteLine("bootstrap            one curve drawn and fitted anew 2,000 times");
+    Console.WriteLine("hard N               N hard curves, the nine laws in turn: how each ended");
     Console.WriteLine("workload N FILE      writes such a file of N invented curves");
     Console.WriteLine("nist --folder DIR   the 27 certified nonlinear problems from both starts; DIR holds their .dat files");
     Console.WriteLine("chart N   false alarms of the control chart's rules over N simulated charts, and how well changes are dated over N/100");

@@ -3,7 +3,7 @@ namespace HemoRheo;
 /// <summary>A law with one parameter at its bound, solved alone in a group of lanes.</summary>
 internal static class BoundaryCase
 {
-    /// <summary>Solves at the bound, and inside again if the sum of squares falls that way. The answer stands in the first lane of the group.</summary>
+    /// <summary>Solves at the bound, and once more from inside; the lower sum of squares is kept. The answer stands in the first lane of the group.</summary>
     /// <param name="lanes">The group.</param>
     /// <param name="law">A law with a boundary.</param>
     /// <param name="curve">The curve.</param>
@@ -19,30 +19,12 @@ internal static class BoundaryCase
         lanes.SolveAlone(law, curve, held, boundary.Parameter);
         if (!lanes.IsGood(0)) return false;
         lanes.Estimates(0, held);
-        if (!FallsInward(law, curve, held)) return true;
+        var chiSquare = lanes.ChiSquareOf(0);
         Span<double> inside = stackalloc double[near.Length];
         held.CopyTo(inside);
         inside[boundary.Parameter] = bounded.ToScaled(boundary.InsideAt(curve.LowestStress));
         lanes.SolveAlone(law, curve, inside);
-        if (!lanes.IsGood(0)) lanes.SolveAlone(law, curve, held, boundary.Parameter);
+        if (!lanes.IsGood(0) || lanes.ChiSquareOf(0) >= chiSquare) lanes.SolveAlone(law, curve, held, boundary.Parameter);
         return true;
-    }
-
-    /// <summary>Whether the sum of squares falls when the held parameter leaves its bound.</summary>
-    private static bool FallsInward(FlowLaw law, CurveData curve, ReadOnlySpan<double> held)
-    {
-        var parameter = law.Boundary!.Parameter;
-        Span<double> wall = stackalloc double[held.Length];
-        Span<double> slopes = stackalloc double[held.Length];
-        held.CopyTo(wall);
-        wall[parameter] = LaneGroup.WallOf(law, curve);
-        double score = 0;
-        for (var i = 0; i < curve.Rates.Length; i++)
-        {
-            var stress = law.StressAt(curve.Rates[i], wall, slopes);
-            score += slopes[parameter] * (curve.Stresses[i] - stress) / curve.VarianceOf(i, stress);
-        }
-
-        return score > 0;
     }
 }

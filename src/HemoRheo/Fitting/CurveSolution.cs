@@ -31,6 +31,12 @@ internal sealed class CurveSolution(double[] scaled, double[] inverse, double[] 
     /// <summary>Number of the parameter held at its bound; null where none is.</summary>
     public int? Held { get; } = held;
 
+    /// <summary>What other starts reached, where it is not this minimum.</summary>
+    public OtherMinimum? Other { get; init; }
+
     /// <summary>The same numbers with another end.</summary>
-    public CurveSolution Ended(Convergence end) => new(Scaled, Inverse, Response, Residuals, ChiSquare, end, Held);
+    public CurveSolution Ended(Convergence end) => new(Scaled, Inverse, Response, Residuals, ChiSquare, end, Held) { Other = Other };
+
+    /// <summary>The same numbers beside what other starts reached.</summary>
+    public CurveSolution Beside(OtherMinimum? other) => new(Scaled, Inverse, Response, Residuals, ChiSquare, End, Held) { Other = other };
 }

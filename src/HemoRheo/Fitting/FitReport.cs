@@ -50,7 +50,7 @@ internal static class FitReport
 
         int? held = Enumerable.Range(0, fit.Parameters.Count).Where(k => fit.Parameters[k].AtBound).Select(k => (int?)k).FirstOrDefault();
         var correlated = fit with { Covariance = covariance.ToItems(), Parameters = Parameters(fit.Law, fit.Scaled, covariance, held, "").ToItems(), Fit = lack };
-        return correlated with { Findings = Findings(correlated).ToItems() };
+        return correlated with { Findings = [.. Findings(correlated), .. fit.Findings.Where(finding => finding.Kind == FittingFindings.StartDecides || finding.Kind == FittingFindings.SeveralMinima)] };
     }
 
     private static LackOfFit Lack(FittedLaw fit, (double Weight, SquaresDistribution Squares)[] spread)

@@ -58,7 +58,7 @@ internal static class Fits
         {
             double[][] starts = [.. data.Select(curve => StartOf(law, curve))];
             var outcomes = LaneGroup.Outcomes(law, data, starts);
-            return [.. curves.Select((curve, lane) => Report(law, curve, data[lane], outcomes[lane].Good ? outcomes[lane].Solution : Rescue.Of(law, data[lane], starts[lane], outcomes[lane])))];
+            return [.. curves.Select((curve, lane) => Report(law, curve, data[lane], Rescue.Settled(law, data[lane], starts[lane], outcomes[lane])))];
         }
         catch (Exception) when (law is UserLaw && curves.Length > 1)
         {
@@ -70,8 +70,12 @@ internal static class Fits
         }
     }
 
-    private static FittedLaw Report(FlowLaw law, FlowCurve curve, CurveData data, CurveSolution solution) =>
-        solution.End.Reason is StopReason.BadData ? Failed(law, curve, data, "gives a stress or a slope that is not finite at a rate of the curve, where the fit starts") : FitReport.Of(law, curve, data.Errors, solution);
+    private static FittedLaw Report(FlowLaw law, FlowCurve curve, CurveData data, CurveSolution solution)
+    {
+        if (solution.End.Reason is StopReason.BadData) return Failed(law, curve, data, "gives a stress or a slope that is not finite at a rate of the curve, where the fit starts");
+        var fit = FitReport.Of(law, curve, data.Errors, solution);
+        return FittingFindings.OfOther(law, curve.Label.Where, solution) is { } other ? fit with { Findings = [.. fit.Findings, other] } : fit;
+    }
 
     private static FittedLaw Failed(FlowLaw law, FlowCurve curve, CurveData data, string words) =>
         FitReport.Unfitted(law, curve, data.Errors, FittingFindings.LawFailed.At(curve.Label.Where, $"{law.Name} {words}."));

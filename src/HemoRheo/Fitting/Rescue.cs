@@ -3,7 +3,20 @@ namespace HemoRheo;
 /// <summary>What happens to a curve that its lane did not settle, judged on that curve alone: its boundary case, the general path, other starts.</summary>
 internal static class Rescue
 {
-    private const double OtherStart = 1.5;
+    /// <summary>The general path is for hard models; a flow law on its fitting scale that has not arrived by then runs off.</summary>
+    private const int IterationLimit = 200;
+
+    /// <summary>Sum of squares a degree of freedom above which a curve is not of the law's shape; only there has a fit that its lane settled been seen to end in the higher of two minima.</summary>
+    private const double OfAnotherShape = 100;
+
+    /// <summary>The numbers of a curve, from its lane where they stand.</summary>
+    public static CurveSolution Settled(FlowLaw law, CurveData curve, double[] start, LaneOutcome outcome)
+    {
+        if (!outcome.Good) return Of(law, curve, start, outcome);
+        var solution = outcome.Solution;
+        var degrees = Math.Max(1, curve.Rates.Length - start.Length);
+        return solution.ChiSquare <= OfAnotherShape * degrees ? solution : OtherStarts.Nearest(law, curve, [solution, .. OtherStarts.Reached(law, curve, start)])!;
+    }
 
     public static CurveSolution Of(FlowLaw law, CurveData curve, double[] start, LaneOutcome outcome)
     {
@@ -13,19 +26,17 @@ internal static class Rescue
         }
 
         var first = General(law, curve, start);
-        if (IsBeyondWall(law, curve, first) && AtBoundary(law, curve, first.Scaled) is var bound && Settled(bound)) return bound;
-        if (Settled(first)) return first;
-        CurveSolution? best = null;
-        foreach (var other in OtherStarts(start))
-        {
-            var solution = General(law, curve, other);
-            if (Settled(solution) && !(solution.ChiSquare >= best?.ChiSquare)) best = solution;
-        }
+        if (IsBeyondWall(law, curve, first) && AtBoundary(law, curve, first.Scaled) is { End.Converged: true } bound) first = bound;
+        List<CurveSolution> minima = [.. OtherStarts.Reached(law, curve, start)];
+        if (first.End.Converged) minima.Add(first);
+        if (OtherStarts.Nearest(law, curve, minima) is not { } nearest) return first;
 
-        return best is null ? first : IsBeyondWall(law, curve, best) ? AtBoundary(law, curve, best.Scaled) : best;
+        // A minimum farther from the readings than a fit that found none is no answer.
+        return OtherStarts.Distance(law, curve, first) < OtherStarts.Distance(law, curve, nearest) * (1 - OtherStarts.SameDistance) ? first : nearest;
     }
 
-    private static CurveSolution AtBoundary(FlowLaw law, CurveData curve, double[] near)
+    /// <summary>The law with one parameter at its bound, or inside again where the sum of squares is lower.</summary>
+    public static CurveSolution AtBoundary(FlowLaw law, CurveData curve, double[] near)
     {
         var lanes = LaneGroup.OfThisThread;
         var settled = BoundaryCase.Solve(lanes, law, curve, near);
@@ -35,25 +46,10 @@ internal static class Rescue
 
     private static CurveSolution General(FlowLaw law, CurveData curve, double[] start)
     {
-        var s = LeastSquares.Solve(new LawOnPoints(law, curve.Rates).Evaluate, curve.Stresses, start, curve.Errors.Relative, curve.Errors.Floor.Pascals, curve.Deviations);
+        var s = LeastSquares.Solve(new LawOnPoints(law, curve.Rates).Evaluate, curve.Stresses, start, curve.Errors.Relative, curve.Errors.Floor.Pascals, curve.Deviations, IterationLimit);
         return new(s.Parameters, s.Inverse, s.Response, s.Residuals, s.ChiSquare, s.End, null);
     }
 
-    private static bool Settled(CurveSolution solution) => solution.End.Converged;
-
     private static bool IsBeyondWall(FlowLaw law, CurveData curve, CurveSolution solution) =>
         law.Boundary is { } boundary && solution.Scaled[boundary.Parameter] < LaneGroup.WallOf(law, curve);
-
-    private static IEnumerable<double[]> OtherStarts(double[] start)
-    {
-        for (var k = 0; k < start.Length; k++)
-        {
-            foreach (var shift in (double[])[-OtherStart, OtherStart])
-            {
-                var other = start.ToArray();
-                other[k] += shift;
-                yield return other;
-            }
-        }
-    }
 }

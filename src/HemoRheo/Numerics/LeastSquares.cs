@@ -11,6 +11,12 @@ public static class LeastSquares
     private const double StepLimit = 1e-12;
     private const double SmallestPivot = 1e-13;
 
+    /// <summary>So many weakly damped steps in a row that promise next to no decrease of the sum of squares lead nowhere: a parameter runs off along a plain. The undamped steps then say whether there is a minimum.</summary>
+    private const int IdleLimit = 8;
+
+    private const double WeakDamping = 1e-2;
+    private const double LeastDecrease = 1e-6;
+
     /// <summary>Strong at first: a start far off is left by short steps, which a long one may overshoot into a plain without descent.</summary>
     private const double FirstDamping = 100;
 
@@ -36,7 +42,7 @@ public static class LeastSquares
     }
 
     /// <summary>Fits a model. Variance of a datum: (relative * model)^2 + floor^2 at the fitted model, or the square of a given deviation; the defaults are ordinary least squares.</summary>
-    internal static LeastSquaresSolution Solve(PointModel model, ReadOnlySpan<double> data, ReadOnlySpan<double> start, double relative = 0, double floor = 1, double[]? deviations = null)
+    internal static LeastSquaresSolution Solve(PointModel model, ReadOnlySpan<double> data, ReadOnlySpan<double> start, double relative = 0, double floor = 1, double[]? deviations = null, int limit = IterationLimit)
     {
         var state = new LeastSquaresState(model, data.ToArray(), start.ToArray(), relative, floor, deviations);
         if (!state.IsFinite)
@@ -44,7 +50,7 @@ public static class LeastSquares
             return state.Solved(new(StopReason.BadData, 0, "the model is not finite at the start"));
         }
 
-        var (iterations, reached) = Descend(state);
+        var (iterations, reached) = Descend(state, limit);
         var (finishing, step, pivot) = Finish(state);
         iterations += finishing;
         var end = pivot < SmallestPivot ? Ended(StopReason.Singular, iterations, $"the equations have no unique solution: smallest pivot {pivot:G2}, at least {SmallestPivot:G2}")
@@ -58,15 +64,20 @@ public static class LeastSquares
     private static Convergence Ended(StopReason reason, int iterations, FormattableString message) => new(reason, iterations, message.ToString(CultureInfo.InvariantCulture));
 
     /// <summary>Damped steps, bent along the curve of the model; each accepted if the sum of squares falls as the linear model foretells, or if it follows a valley.</summary>
-    private static (int Iterations, bool Reached) Descend(LeastSquaresState state)
+    private static (int Iterations, bool Reached) Descend(LeastSquaresState state, int limit)
     {
         var (damping, growth) = (FirstDamping, 2.0);
-        for (var iteration = 1; iteration <= IterationLimit; iteration++)
+        var idle = 0;
+        var halfway = double.PositiveInfinity;
+        for (var iteration = 1; iteration <= limit; iteration++)
         {
+            if (iteration == limit / 2) halfway = state.ChiSquare;
             var step = state.Step(damping);
             var relative = state.RelativeLength(step);
             var predicted = state.Predicted(step);
             if (relative <= StepLimit || predicted <= 1e-15 * state.ChiSquare) return (iteration, true);
+            idle = damping <= WeakDamping && predicted <= LeastDecrease * state.ChiSquare ? idle + 1 : 0;
+            if (idle == IdleLimit) return (iteration, true);
             var decrease = state.Bent(step) is { } bent ? state.Try(bent) : double.NaN;
             var gain = decrease / predicted;
             if (gain > 1e-4 || state.MayClimb(step, decrease))
@@ -82,7 +93,7 @@ public static class LeastSquares
             }
         }
 
-        return (IterationLimit, false);
+        return (limit, halfway - state.ChiSquare <= LeastDecrease * state.ChiSquare);
     }
 
     /// <summary>Undamped steps while they get smaller. Near the minimum the sum of squares is too flat to judge by.</summary>

@@ -76,4 +76,13 @@ public static class ScreeningFindings
         "The reading repeats the shear rate of an earlier one of the same ramp; two of a rate would count double.",
         "A step that was read twice, or lines copied in the file.",
         "The earlier reading is kept; nothing to do if the step was read twice.");
+
+    /// <summary>Viscosities are outside what blood or plasma can show.</summary>
+    public static FindingKind ImplausibleViscosity { get; } = new(
+        "implausible-viscosity",
+        Severity.Warning,
+        "Most kept points of the curve have viscosities outside what blood or plasma can show.",
+        "A unit in the layout that is not the export's: a factor of 1000 between Pa and mPa, or rates in another unit.",
+        "Compare a few numbers of the export with the layout in the study file, and correct the unit. Nothing is rescaled.",
+        "from below the viscosity of water at 37 degC, 0.69 mPa.s (IAPWS 2008), with room; from above common practice, no source");
 }

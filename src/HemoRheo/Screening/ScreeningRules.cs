@@ -14,8 +14,8 @@ public static class ScreeningRules
         new OutOfTimeOrder(),
     ];
 
-    /// <summary>Rules that compare the readings left by the others, so that a reading repeated for good reason takes the place of the one set aside.</summary>
-    public static Items<IScreeningRule> OnWhatIsLeft { get; } = [new DuplicateReading()];
+    /// <summary>Rules that judge the readings left by the others, so that a reading repeated for good reason takes the place of the one set aside.</summary>
+    public static Items<IScreeningRule> OnWhatIsLeft { get; } = [new DuplicateReading(), new ImplausibleViscosity()];
 
     /// <summary>Every rule.</summary>
     public static Items<IScreeningRule> All { get; } = OnReadings.With(OnWhatIsLeft);

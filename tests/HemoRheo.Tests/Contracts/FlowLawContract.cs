@@ -39,6 +39,27 @@ public class FlowLawContract
         }
     }
 
+    /// <summary>Slopes written by hand are those of the formula; a law without them passes trivially. 400 points around the invented numbers, far ones among them.</summary>
+    [Theory]
+    [MemberData(nameof(Laws))]
+    public void Its_slopes_by_hand_are_those_of_its_formula(string name)
+    {
+        var law = FlowLaw.Named(name);
+        var (stream, size) = (RandomStream.Of(20261201, "by hand", 1), law.Parameters.Count);
+        var (at, exact, byHand) = (new Lane[size], new Lane[size], new Lane[size]);
+        var (stress, stressByHand) = (new Lane[1], new Lane[1]);
+        for (var i = 0; i < 400; i++)
+        {
+            double[] scaled = [.. law.ToScaled(Invented(law)).Select(x => x + (i % 4 + 1) * stream.Normal())];
+            for (var k = 0; k < size; k++) at[k] = new(scaled[k]);
+            Lane[] rate = [new(Math.Exp(6 * stream.Normal()))];
+            law.ByFormula(rate, at, stress, exact);
+            law.StressesAndSlopes(rate, at, stressByHand, byHand);
+            Assert.Equal(stress[0][0], stressByHand[0][0]);
+            for (var k = 0; k < size; k++) Assert.Equal(exact[k][0], byHand[k][0], 1e-13 * Math.Abs(stress[0][0]));
+        }
+    }
+
     [Theory]
     [MemberData(nameof(Laws))]
     public void Its_stress_has_the_same_bits_by_either_road(string name)

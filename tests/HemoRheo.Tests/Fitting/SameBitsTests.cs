@@ -36,6 +36,48 @@ public class SameBitsTests
         }
     }
 
+    [Theory]
+    [InlineData(1)]
+    [InlineData(2)]
+    [InlineData(7)]
+    public void Any_number_of_threads_gives_the_same_bits(int threads)
+    {
+        FlowCurve[] curves = [.. Mixed(60), FlowCurve.Of(Simulated.Rates, [.. Simulated.Rates.Select(_ => 1e300)]), .. Mixed(31), FlowCurve.Of([1, 2], [double.NaN, 1])];
+        foreach (var law in FlowLaw.All)
+        {
+            var fits = Fits.InParallel(curves, law, [.. curves.Select(_ => WeightedFits.Errors)], threads, TestContext.Current.CancellationToken);
+            Assert.Equal([.. curves.Select(curve => curve.Fit(law, WeightedFits.Errors))], fits);
+        }
+    }
+
+    [Fact]
+    public void A_study_of_fits_can_be_cancelled()
+    {
+        var curves = Mixed(40);
+        Assert.Throws<OperationCanceledException>(() => Fits.InParallel(curves, FlowLaw.Casson, [.. curves.Select(_ => WeightedFits.Errors)], 2, new CancellationToken(canceled: true)));
+    }
+
+    /// <summary>Fits without records are the same fits, allocate nothing once warm, and hold a parameter at its bound.</summary>
+    [Theory]
+    [InlineData("Casson")]
+    [InlineData("Quemada")]
+    public void Fits_without_records_have_the_same_estimates_and_allocate_nothing(string name)
+    {
+        var law = FlowLaw.Named(name);
+        var curves = Mixed(140).Where((curve, i) => i % 3 < 2 && curve.Points.Count > 9).ToArray();
+        CurveData[] data = [.. curves.Select(curve => CurveData.Of(curve, law, WeightedFits.Errors))];
+        double[] starts = [.. data.SelectMany(curve => Fits.StartOf(law, curve))];
+        var (estimates, sums, converged) = (new double[starts.Length], new double[data.Length], new bool[data.Length]);
+        BareFits.Of(law, data, starts, estimates, sums, converged);
+        var before = GC.GetAllocatedBytesForCurrentThread();
+        BareFits.Of(law, data, starts, estimates, sums, converged);
+        Assert.Equal(0, GC.GetAllocatedBytesForCurrentThread() - before);
+        FittedLaw[] fits = [.. curves.Select(curve => curve.Fit(law, WeightedFits.Errors))];
+        Assert.Equal(fits.SelectMany(fit => fit.Scaled), estimates);
+        Assert.Equal(fits.Select(fit => fit.Fit.ChiSquare), sums);
+        Assert.All(converged, Assert.True);
+    }
+
     /// <summary>The lanes themselves, without the checks of data that keep such curves out.</summary>
     [Fact]
     public void A_lane_solves_the_same_beside_poisoned_lanes()

@@ -187,6 +187,27 @@ public class ScreeningRuleTests
         Assert.Equal(trips ? 1 : 2, screened.Points.Count);
     }
 
+    /// <summary>Blood of 5 mPa.s and 10 mPa of yield stress, in wrong units: a factor of 1000 either way.</summary>
+    [Theory]
+    [InlineData(1, null)]
+    [InlineData(0.12, null)]
+    [InlineData(1000, "above 50 mPa.s")]
+    [InlineData(0.001, "below 0.5 mPa.s")]
+    public void Viscosities_that_blood_cannot_show_are_a_warning_and_nothing_is_rescaled(double factor, string? words)
+    {
+        var curve = FlowCurve.Of(TestStudy.Rates, [.. TestStudy.Rates.Select(rate => factor * (0.01 + 0.005 * rate))]);
+        var screened = curve.Screened(TestStudy.Plain, null);
+        var found = screened.Findings.Where(finding => finding.Code == "implausible-viscosity").ToArray();
+        Assert.Equal(words is null ? 0 : 1, found.Length);
+        Assert.All(found, finding => Assert.Contains(words!, finding.Message, StringComparison.Ordinal));
+        Assert.All(found, finding => Assert.Equal(Severity.Warning, finding.Severity));
+        Assert.Equal(curve.Points, screened.Points);
+    }
+
+    [Fact]
+    public void One_point_that_is_off_is_no_mistake_of_units() =>
+        Assert.DoesNotContain(FlowCurve.Of([100, 50, 10], [0.5, 250, 0.06]).Screened(TestStudy.Plain, null).Findings, finding => finding.Code == "implausible-viscosity");
+
     [Fact]
     public void A_point_with_two_faults_is_set_aside_once_with_both()
     {

@@ -1,0 +1,84 @@
+namespace HemoRheo;
+
+/// <summary>A curve solved from starts beside its own, four at a time.</summary>
+internal static class OtherStarts
+{
+    private const double Away = 1.5;
+
+    /// <summary>Relative difference of two distances that is none.</summary>
+    public const double SameDistance = 1e-6;
+
+    private const double SameEstimate = 1e-4;
+
+    /// <summary>Every minimum that another start reaches, inside the bounds or at one.</summary>
+    /// <param name="law">The law.</param>
+    /// <param name="curve">The curve.</param>
+    /// <param name="start">Its own start: the others lie away from it, one parameter at a time.</param>
+    public static IEnumerable<CurveSolution> Reached(FlowLaw law, CurveData curve, double[] start)
+    {
+        foreach (var group in Beside(start).Chunk(Lane.Count))
+        {
+            foreach (var outcome in LaneGroup.Outcomes(law, [.. group.Select(_ => curve)], group))
+            {
+                if (outcome.Good) yield return outcome.Solution;
+                else if (outcome.AtWall && Rescue.AtBoundary(law, curve, outcome.Solution.Scaled) is { End.Converged: true } bound) yield return bound;
+            }
+        }
+    }
+
+    /// <summary>The minimum nearest to the readings, beside the next one that differs from it; null where there is no minimum.</summary>
+    public static CurveSolution? Nearest(FlowLaw law, CurveData curve, IReadOnlyList<CurveSolution> minima)
+    {
+        double[] distances = [.. minima.Select(minimum => Distance(law, curve, minimum))];
+        int[] order = [.. Enumerable.Range(0, distances.Length).OrderBy(i => distances[i])];
+        if (order.Length == 0) return null;
+        var (given, distance) = (minima[order[0]], distances[order[0]]);
+        foreach (var i in order.Skip(1))
+        {
+            var equal = distances[i] - distance <= SameDistance * (1 + distance);
+            if (equal && SameEstimates(given, minima[i])) continue;
+            return given.Beside(new(distances[i], distance, equal));
+        }
+
+        return given;
+    }
+
+    /// <summary>Sum of squares, its variances between reading and law; see <see cref="OtherMinimum"/>.</summary>
+    public static double Distance(FlowLaw law, CurveData curve, CurveSolution solution)
+    {
+        var slopes = new double[solution.Scaled.Length];
+        double sum = 0;
+        for (var i = 0; i < curve.Rates.Length; i++)
+        {
+            var stress = law.StressAt(curve.Rates[i], solution.Scaled, slopes);
+            var residual = curve.Stresses[i] - stress;
+            sum += residual * residual / curve.VarianceOf(i, Math.Sqrt(curve.Stresses[i]) * Math.Sqrt(stress));
+        }
+
+        return sum;
+    }
+
+    private static bool SameEstimates(CurveSolution one, CurveSolution other)
+    {
+        for (var k = 0; k < one.Scaled.Length; k++)
+        {
+            var error = Math.Sqrt(one.Inverse[k * one.Scaled.Length + k]);
+            if (!(Math.Abs(one.Scaled[k] - other.Scaled[k]) <= SameEstimate + 0.01 * error) && one.Scaled[k] != other.Scaled[k]) return false;
+        }
+
+        return true;
+    }
+
+    private static IEnumerable<double[]> Beside(double[] start)
+    {
+        for (var k = 0; k < start.Length; k++)
+        {
+            foreach (var shift in (double[])[-Away, Away])
+            {
+                var other = start.ToArray();
+                other[k] += shift;
+                yield return other;
+            }
+        }
+    }
+}
