@@ -11,7 +11,8 @@ namespace HemoRheo.App;
 /// <param name="output">Where progress and results are told.</param>
 /// <param name="error">Where it is told why the program could not run.</param>
 /// <param name="live">Whether lines of progress may be rewritten.</param>
-internal sealed class CommandLine(string workingFolder, string programFolder, TextWriter output, TextWriter error, bool live)
+/// <param name="clock">Where the present moment is read.</param>
+internal sealed partial class CommandLine(string workingFolder, string programFolder, TextWriter output, TextWriter error, bool live, TimeProvider clock)
 {
     /// <summary>Runs one command line.</summary>
     /// <param name="args">The command line.</param>
@@ -33,7 +34,7 @@ internal sealed class CommandLine(string workingFolder, string programFolder, Te
         {
             return CouldNotRun("Stopped. Nothing was written; results of an earlier run are as they were.");
         }
-        catch (Exception fault) when (fault is CouldNotRunException or StudyFileException or FileNotFoundException)
+        catch (Exception fault) when (fault is CouldNotRunException or StudyFileException or InstrumentLogException or FileNotFoundException)
         {
             return CouldNotRun(fault.Message);
         }
@@ -65,7 +66,7 @@ internal sealed class CommandLine(string workingFolder, string programFolder, Te
         folder.Validators.Add(RefuseUnknownOption);
         var results = new Option<string?>("--output", "-o");
         var strict = new Option<bool>("--strict");
-        var root = new RootCommand { folder, results, strict, New(), Synthesize() };
+        var root = new RootCommand { folder, results, strict, New(), Synthesize(), Check() };
         root.Options.OfType<HelpOption>().Single().Action = new PlainHelp(output);
         root.SetAction((parsed, cancel) => Task.Run(
             () =>

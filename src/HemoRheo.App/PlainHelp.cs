@@ -1,5 +1,6 @@
 using System.CommandLine;
 using System.CommandLine.Invocation;
+using System.CommandLine.Parsing;
 
 namespace HemoRheo.App;
 
@@ -12,6 +13,9 @@ internal sealed class PlainHelp(TextWriter output) : SynchronousCommandLineActio
     /// <summary>The command that writes a synthetic cohort.</summary>
     public const string Synthesize = "synthesize";
 
+    /// <summary>The commands about checks of instruments.</summary>
+    public const string Check = "check";
+
     private const string OfRun = """
         From rheometer exports of whole blood to a study result, every value with its uncertainty. For research use only.
 
@@ -19,6 +23,8 @@ internal sealed class PlainHelp(TextWriter output) : SynchronousCommandLineActio
           hemorheo <folder>              analyze the study in a folder (or name its study file)
           hemorheo new <folder>          write a commented study file to start from
           hemorheo synthesize <folder>   write a synthetic cohort, with the truth beside
+          hemorheo check status <folder> is the instrument right, since when not, which samples does that touch
+          hemorheo check --help          more about checks: record them in a log, weekly page, export, verify
 
         Options when analyzing
           -o, --output <folder>   folder for pages and tables, replaced whole at every run; default: results, beside the study file
@@ -52,13 +58,33 @@ internal sealed class PlainHelp(TextWriter output) : SynchronousCommandLineActio
 
         """;
 
+    private const string OfCheck = """
+        hemorheo check record <folder> --by <name>      append checks and adjustments of the study to the instrument's log
+        hemorheo check status <folder>                  three answers in words, and who must do what
+        hemorheo check export <folder> --to <file.csv>  write the whole log as comma-separated values
+        hemorheo check verify <folder>                  hold every entry of the log against its digest
+
+        A log is one file for one instrument, to which entries are added and in which nothing is changed: a correction is a new entry.
+        Without a log, the status goes by the study's own checks. Close other programs that write the log; keep it on this machine's own disk.
+
+          --log <file>           the log; default: checks-of-<instrument>.log beside the study file
+          --instrument <name>    which instrument, where the study has several
+          --by <name>            record: who records
+          --page <file.html>     status: write the weekly page too, one side of A4
+          --at <moment>          status: of another moment than now, e.g. 2025-04-02T12:00+02:00
+          --noted <digest>       verify: a last digest noted earlier outside the log; shows whether entries were cut off since
+          --strict               status, verify: exit with 1 when something needs a person
+
+        """;
+
     /// <inheritdoc/>
     public override bool ClearsParseErrors => true;
 
     /// <inheritdoc/>
     public override int Invoke(ParseResult parseResult)
     {
-        output.Write(parseResult.CommandResult.Command.Name switch { New => OfNew, Synthesize => OfSynthesize, _ => OfRun });
+        var command = parseResult.CommandResult;
+        output.Write((command.Parent as CommandResult is { Parent: not null } above ? above : command).Command.Name switch { New => OfNew, Synthesize => OfSynthesize, Check => OfCheck, _ => OfRun });
         return ExitCode.Done;
     }
 }

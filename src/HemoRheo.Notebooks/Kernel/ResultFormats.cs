@@ -39,6 +39,9 @@ internal static class ResultFormats
         Show<LoadingResult>(LoadingView.Of, loading => loading.Curve.ToString());
         Show<InstrumentHistory>(history => HistoryView.Of([history]), history => $"instrument {history.Instrument.Name}: {history.Checks.Count} checks");
         Show<Items<InstrumentHistory>>(HistoryView.Of, histories => $"{histories.Count} instruments, {histories.Sum(history => history.Checks.Count)} checks");
+        Show<ControlChart>(ControlChartView.Of);
+        Show<LogContents>(ControlChartView.Of);
+        Show<InstrumentReview>(ControlChartView.Of);
         Show<Items<InstrumentCheck>>(checks => TableMarkup.Of(HistoryView.Table(checks)), checks => $"{checks.Count} checks");
     }
 

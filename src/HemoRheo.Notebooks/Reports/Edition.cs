@@ -12,7 +12,7 @@ internal sealed class Edition
         Record = record;
         Comparison = comparison;
         SamplePages = new(results.Samples.Select(sample => sample.Sample));
-        InstrumentPages = new(results.Analyzed.Histories.Select(history => history.Instrument.Name));
+        InstrumentPages = new(results.Analyzed.Histories.SelectMany(history => new[] { history.Instrument.Name, Week(history.Instrument.Name) }));
         var labels = Study.Groups.ToDictionary(group => group.Code, group => group.Label);
         _groups = results.Analyzed.Readings.People.DistinctBy(person => person.Id).ToDictionary(person => person.Id, person => labels.GetValueOrDefault(person.GroupCode, person.GroupCode));
         Rates = Study.Analysis.StandardRates.Select(rate => new ViscosityAtRate(rate)).ToItems();
@@ -29,6 +29,9 @@ internal sealed class Edition
     public PageNames SamplePages { get; }
 
     public PageNames InstrumentPages { get; }
+
+    /// <summary>The key of an instrument's weekly page among the instruments' pages: no name of an instrument holds a line feed.</summary>
+    public static string Week(string instrument) => $"{instrument}\nweek";
 
     public Study Study => Results.Study;
 

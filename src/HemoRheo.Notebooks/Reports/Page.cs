@@ -10,7 +10,8 @@ internal static class Page
     /// <param name="trail">Where it stands, above the title: links up and sideways.</param>
     /// <param name="study">Name of the study.</param>
     /// <param name="body">What it says.</param>
-    public static string Write(string title, Markup trail, string study, Markup body) => Markup.Of($"""
+    /// <param name="style">A style sheet of its own beside the common one.</param>
+    public static string Write(string title, Markup trail, string study, Markup body, string style = "") => Markup.Of($"""
         <!DOCTYPE html>
         <html lang="en">
         <head>
@@ -19,7 +20,7 @@ internal static class Page
         <meta http-equiv="Content-Security-Policy" content="{Policy}"/>
         <meta name="referrer" content="no-referrer"/>
         <title>{title} · {study}</title>
-        <style>{new Markup(PageStyle.Css)}</style>
+        <style>{new Markup(PageStyle.Css)}{new Markup(style)}</style>
         </head>
         <body>
         <header>

@@ -14,7 +14,7 @@ internal sealed record ConsoleRun(int Exit, string Output, string Error)
     {
         var output = stop ?? new StopOn("");
         var error = new StringWriter();
-        var exit = await new CommandLine(workingFolder, workingFolder, output, error, live: false).RunAsync(args, output.Token);
+        var exit = await new CommandLine(workingFolder, workingFolder, output, error, live: false, TimeProvider.System).RunAsync(args, output.Token);
         return new(exit, output.ToString(), error.ToString());
     }
 }

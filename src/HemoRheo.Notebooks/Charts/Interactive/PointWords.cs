@@ -23,6 +23,13 @@ internal static class PointWords
 
     public static string Of(InstrumentCheck check) => string.Create(CultureInfo.InvariantCulture, $"{check.Name}, {check.At:yyyy-MM-dd HH:mm}\n{check.Fluid.Name}: measured {Rounding.Digits(check.Measured.MillipascalSeconds, 4)}, expected {Rounding.Digits(check.Expected.MillipascalSeconds, 4)} mPa·s\n{Words.Of(check.Outcome)}, probability within the limit {check.ProbabilityWithin:0.000}");
 
+    public static string Of(ChartPoint point)
+    {
+        var (check, interval) = (point.Check, point.Check.Error.Interval().Select(error => 100 * (Math.Exp(error) - 1)));
+        var words = string.Create(CultureInfo.InvariantCulture, $"{check.Name}, {check.At:yyyy-MM-dd HH:mm}\n{check.Fluid}: {100 * (Math.Exp(check.Error.X) - 1):+0.00;-0.00} % (95 % interval {interval.Lower:+0.00;-0.00} to {interval.Upper:+0.00;-0.00} %)\n{Words.Of(check.Outcome)}");
+        return point.Breaks.Count == 0 ? words : $"{words}\nsignals: {string.Join(", ", point.Breaks.Select(rule => rule.Words()))}";
+    }
+
     public static string Of(string sample, JudgedValue value)
     {
         var lines = new List<string> { value.Value.ToString() };

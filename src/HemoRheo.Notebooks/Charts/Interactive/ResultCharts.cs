@@ -63,6 +63,13 @@ public static class ResultCharts
         ? throw new InvalidOperationException($"Instrument {history.Instrument.Name} has no check, so there is nothing to draw.")
         : Drawn.Of($"checks of instrument {history.Instrument.Name}", CheckChart.Model(history, StatusSpans.Of(history)), CheckChart.Height);
 
+    /// <summary>A control chart: the errors of the last 60 checks with their 95 % intervals, center and limits, signals by shape, and when the instrument changed.</summary>
+    /// <param name="chart">The control chart.</param>
+    /// <exception cref="InvalidOperationException">It has no check.</exception>
+    public static InteractiveChart Chart(this ControlChart chart) => chart.Segments.All(segment => segment.Points.Count == 0)
+        ? throw new InvalidOperationException($"The control chart of {chart.Instrument} has no check, so there is nothing to draw.")
+        : Drawn.Of($"control chart of instrument {chart.Instrument}", ControlChartPicture.Model(chart, null), ControlChartPicture.Height);
+
     /// <summary>Ratios of two groups with their 95 % intervals, as they are and adjusted for hematocrit.</summary>
     /// <param name="summary">The summary of a cohort.</param>
     public static InteractiveChart Chart(this CohortSummary summary) => Drawn.Of($"{summary.Study} by {summary.By}: ratios of means", RatioChart.Model(summary), RatioChart.Height(summary));

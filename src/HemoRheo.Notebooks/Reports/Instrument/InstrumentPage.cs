@@ -18,7 +18,7 @@ internal static class InstrumentPage
     }
 
     private static Markup Trail(Edition edition, InstrumentHistory history) => Markup.Of($"""
-        <ul><li><a href="../index.html">Cohort overview</a></li>{edition.Results.Analyzed.Histories.Where(other => other.Instrument.Name != history.Instrument.Name).Select(other => Markup.Of($"<li>{edition.InstrumentLink(other.Instrument.Name, "../")}</li>"))}<li><a href="#over">Over time</a></li><li><a href="#checks">Checks</a></li><li><a href="#periods">Periods</a></li><li><a href="#touched">Samples touched</a></li><li><a href="#findings">Findings</a></li></ul>
+        <ul><li><a href="../index.html">Cohort overview</a></li>{edition.Results.Analyzed.Histories.Where(other => other.Instrument.Name != history.Instrument.Name).Select(other => Markup.Of($"<li>{edition.InstrumentLink(other.Instrument.Name, "../")}</li>"))}{(history.Checks.Count == 0 ? Markup.None : Markup.Of($"<li><a href=\"{edition.InstrumentPages[Edition.Week(history.Instrument.Name)]}\">Weekly page</a></li>"))}<li><a href="#over">Over time</a></li><li><a href="#checks">Checks</a></li><li><a href="#periods">Periods</a></li><li><a href="#touched">Samples touched</a></li><li><a href="#findings">Findings</a></li></ul>
         """);
 
     private static Markup Answers(Edition edition, InstrumentHistory history, Items<TouchedSample> touched)

@@ -33,10 +33,20 @@ public static class LoggedChecks
     /// <param name="log">The log as it was read.</param>
     /// <param name="baseline">How many checks the limits rest on, at least 20.</param>
     /// <exception cref="ArgumentOutOfRangeException">A baseline of fewer than 20 checks was asked for.</exception>
-    public static ControlChart ControlChart(this LogContents log, int baseline = HemoRheo.ControlChart.LeastBaseline) => HemoRheo.ControlChart.Of(
-        log.Instrument,
-        log.Checks.GroupBy(check => (check.Name, check.Filling, check.Fluid, check.Lot, DateOnly.FromDateTime(check.At.DateTime))).Select(filling => OfFilling([.. filling])),
-        log.Adjustments.Select(adjustment => adjustment.At),
+    public static ControlChart ControlChart(this LogContents log, int baseline = HemoRheo.ControlChart.LeastBaseline) =>
+        Chart(log.Instrument, log.Checks, log.Adjustments.Select(adjustment => adjustment.At), baseline);
+
+    /// <summary>The control chart of an instrument's course: one point a filling, started anew at every adjustment.</summary>
+    /// <param name="course">The course.</param>
+    /// <param name="baseline">How many checks the limits rest on, at least 20.</param>
+    /// <exception cref="ArgumentOutOfRangeException">A baseline of fewer than 20 checks was asked for.</exception>
+    public static ControlChart ControlChart(this InstrumentCourse course, int baseline = HemoRheo.ControlChart.LeastBaseline) =>
+        Chart(course.Instrument.Name, course.Checks, course.Instrument.Adjusted, baseline);
+
+    private static ControlChart Chart(string instrument, Items<LoggedCheck> checks, IEnumerable<DateTimeOffset> adjusted, int baseline) => HemoRheo.ControlChart.Of(
+        instrument,
+        checks.GroupBy(check => (check.Name, check.Filling, check.Fluid, check.Lot, DateOnly.FromDateTime(check.At.DateTime))).Select(filling => OfFilling([.. filling])),
+        adjusted,
         baseline);
 
     private static LoggedReading Reading(FlowPoint point, FlowCurve curve, Viscosity expected)

@@ -1,0 +1,34 @@
+namespace HemoRheo.Notebooks;
+
+/// <summary>What makes the weekly page one side of A4.</summary>
+internal static class WeeklyStyle
+{
+    /// <summary>The style sheet beside that of all pages; the page looks on the screen as on paper.</summary>
+    public const string Css = """
+        @page{size:A4 portrait;margin:10mm 12mm}
+        body{max-width:186mm;padding:0;margin:6mm auto;font-size:9pt;line-height:1.35}
+        h1{font-size:15pt;margin:0}
+        h2{font-size:10.5pt;margin:2.2mm 0 .8mm;padding-top:1mm;border-top-width:1px}
+        p{margin:.6mm 0;max-width:none}
+        .caution{padding:.6mm 2mm;margin:1mm 0;font-size:8pt}
+        .answers{grid-template-columns:1fr 1.35fr .8fr;gap:2.5mm;margin:1.5mm 0}
+        .answers>div{padding:1mm 2mm;border-top-width:2px}
+        .answers h3{font-size:8.5pt;margin:0;color:var(--quiet)}
+        .answers .short{font-size:13pt;font-weight:700;margin:.3mm 0}
+        .answers p{font-size:8.5pt}
+        figure{margin:.5mm 0}
+        figure img{width:100%;border:none}
+        figcaption{font-size:7.5pt;max-width:none;margin:0}
+        .wide{margin:.5mm 0;overflow:visible}
+        table{font-size:7.8pt;line-height:1.25;width:100%}
+        th,td{padding:.35mm 2mm .35mm 0}
+        ul.tasks{margin:0;padding:0;list-style:none}
+        ul.tasks li{margin:.4mm 0}
+        ul.tasks b{display:inline-block;min-width:44mm}
+        .digest{font-size:7.5pt;overflow-wrap:anywhere}
+        footer{display:none}
+        @media print{body{margin:0;font-size:9pt}table{font-size:7.8pt}th,td{padding-right:2mm}}
+        @media screen and (max-width:45rem){body{margin:1rem}.answers{grid-template-columns:1fr}}
+
+        """;
+}
