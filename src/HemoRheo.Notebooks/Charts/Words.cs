@@ -5,6 +5,9 @@ internal static class Words
 {
     public static string Of(InstrumentStatus status) => status.Words();
 
+    public static string Of(InstrumentStanding standing) =>
+        standing.Status == InstrumentStatus.InDoubt && standing.Findings.Any(finding => finding.Kind == CalibrationFindings.LastCheckUnsure) ? "the last check could not tell" : Of(standing.Status);
+
     public static string Of(CheckOutcome outcome) => outcome.Words();
 
     public static string Of(Outcome outcome) => outcome.Words();

@@ -75,6 +75,9 @@ internal static class Figures
     /// <summary>A number with some decimals.</summary>
     public static string Fixed(double number, int decimals) => number.ToString($"F{decimals}", CultureInfo.InvariantCulture);
 
+    /// <summary>A round number, as short as it can be.</summary>
+    public static string Digits(double number) => number.ToString("G3", CultureInfo.InvariantCulture);
+
     /// <summary>A local date.</summary>
     public static string Date(DateTimeOffset moment) => moment.ToString("yyyy-MM-dd", CultureInfo.InvariantCulture);
 

@@ -21,4 +21,17 @@ public static class InstrumentStandings
             Findings = history.Findings.Where(finding => finding.Kind == CalibrationFindings.ScatterUnknown).Concat(standing.Findings).ToItems(),
         };
     }
+
+    /// <summary>
+    /// The instrument's status at a moment for readings of one torque, by the same rule: a check counts there as its decade of torque does (<see cref="InstrumentCheck.BandAt"/>), and not at all where it has no reading in it.
+    /// </summary>
+    /// <param name="history">The instrument's history.</param>
+    /// <param name="moment">The moment; a check at this very moment lies before it.</param>
+    /// <param name="newtonMeters">The torque, N.m, above zero.</param>
+    /// <returns>The status there, and the period whose correction applies, which is that of the whole instrument.</returns>
+    public static InstrumentStanding At(this InstrumentHistory history, DateTimeOffset moment, double newtonMeters)
+    {
+        var checks = history.Checks.Select(check => (VouchingCheck.Of(check), check.BandAt(newtonMeters)?.Outcome));
+        return Vouching.At(history.Instrument, checks, moment, newtonMeters) with { Period = history.At(moment).Period };
+    }
 }

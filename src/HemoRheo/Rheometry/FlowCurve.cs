@@ -37,6 +37,9 @@ public sealed record FlowCurve(CurveLabel Label, Items<FlowPoint> Points, Items<
     /// <summary>Lowest and highest kept rate, 1/s; null when every point is set aside.</summary>
     public Interval? KeptRates => Points.Count == 0 ? null : new(Points.Min(point => point.Rate.ReciprocalSeconds), Points.Max(point => point.Rate.ReciprocalSeconds));
 
+    /// <summary>Torque of one of its points, N.m, as exported or from its stress; null where neither torque nor geometry is known.</summary>
+    internal double? TorqueOf(FlowPoint point) => point.Reading?.Torque ?? point.Stress.Pascals / StressPerTorque;
+
     /// <inheritdoc/>
     public override string ToString() => $"{Label.Sample}, loading {Label.Loading}: {Points.Count} points kept, {SetAside.Count} set aside";
 }

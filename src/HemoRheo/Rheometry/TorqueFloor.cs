@@ -23,7 +23,7 @@ internal static class TorqueFloor
         var unknown = 0;
         foreach (var point in curve.Points)
         {
-            var torque = point.Reading?.Torque ?? point.Stress.Pascals / curve.StressPerTorque;
+            var torque = curve.TorqueOf(point);
             if (torque is null)
             {
                 unknown++;

@@ -88,6 +88,7 @@ internal static class NativeValues
         {
             var place = where with { Loading = loading.Recording.Loading };
             if (loading.Standing.Period is null) yield return SampleFindings.NotCalibrated.At(place, SampleFindings.WhyNotCalibrated(loading.Standing));
+            foreach (var doubt in loading.Standing.Findings.Where(finding => finding.Kind == CalibrationFindings.TorquesInDoubt)) yield return doubt;
             if (loading.Curve.MeanTemperature is null) yield return SampleFindings.NoTemperature.At(place, "No kept reading carries a temperature.");
             var uncertainty = Math.Sqrt(measurand.From(fit)!.Columns(fit).Sum(column => column * column));
             if (uncertainty > FitValueSet.FarthestUncertainty)

@@ -26,14 +26,21 @@ internal static class StudyLoadings
             progress?.Report(new("fitting", fits.Count * curves.Length, study.Analysis.Laws.Count * curves.Length));
         }
 
+        var courses = histories.Values.ToDictionary(history => history.Instrument.Name, history => history.Course(readings));
         return readings.Blood.Select((recording, i) =>
         {
             var hasOther = recording.Readings.Any(reading => reading.Ramp == other);
             var standing = histories.TryGetValue(recording.Instrument, out var history)
-                ? history.At(recording.StartedAt)
+                ? At(history, courses[recording.Instrument], curves[i], recording.StartedAt)
                 : new InstrumentStanding(InstrumentStatus.Unknown, $"The study file declares no instrument {recording.Instrument}.", null, []);
             return new LoadingResult(recording, curves[i], hasOther ? Screened(recording, other) : null, fits.Select(all => all[i]).ToItems(), standing, []);
         }).ToArray();
+    }
+
+    private static InstrumentStanding At(InstrumentHistory history, InstrumentCourse course, FlowCurve curve, DateTimeOffset moment)
+    {
+        var standing = history.At(moment);
+        return standing with { Findings = standing.Findings.With(TorqueDoubts.Of(course, curve, moment)) };
     }
 
     /// <summary>The same loadings with fits that know how readings are correlated, and with their findings.</summary>

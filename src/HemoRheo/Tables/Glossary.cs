@@ -165,6 +165,10 @@ public static class Glossary
         new("checks", "How many checks."),
         new("status", "Instrument status: in order, in doubt, failed or unknown."),
         new("reason", "The reason, in one sentence."),
+        new("entry", "Number of the entry in the instrument's log, counted from 1."),
+        new("recorded at", "Date and time at which the entry was written, with offset, ISO 8601."),
+        new("recorded by", "Who wrote the entry."),
+        new("says", "What the entry says."),
 
         // Limits and verdicts.
         new("outcome", "Verdict: below, within, above or undecided; empty where the value was not judged."),

@@ -21,6 +21,6 @@ internal static class ControlChartView
         {ReviewWords.Of(review).Select(answer => Markup.Of($"<p><b>{answer.Question}</b> <b>{answer.Short}</b> {string.Join(' ', answer.Lines)}</p>\n"))}
         <ul>{ReviewTasks.Of(review).Select(task => Markup.Of($"<li><b>{task.Who}</b> {task.What}</li>"))}</ul>
         {(review.Course.Checks.Count == 0 ? Markup.None : ChartMarkup.Of(review.Chart.Chart()))}
-        {TableMarkup.Of(HemoRheo.Table.Of("sample", "loading", "started at", "instrument status", "reason").WithRows(review.InDoubt, doubt => [doubt.Sample, doubt.Loading, doubt.At, Words.Of(doubt.Status), doubt.Reason]), $"Samples in doubt: {review.InDoubt.Count} of {review.Samples}")}
+        {TableMarkup.Of(HemoRheo.Table.Of("sample", "loading", "started at", "status", "reason").WithRows(review.InDoubt, doubt => [doubt.Sample, doubt.Loading, doubt.At, Words.Of(doubt.Status), doubt.Reason]), $"Samples in doubt: {review.InDoubt.Count} of {review.Samples}")}
         """);
 }

@@ -8,7 +8,7 @@ internal static class ReviewTasks
     private const string Judging = "Whoever judges the samples";
 
     /// <summary>The tasks, the most urgent first.</summary>
-    public static Items<ReviewTask> Of(InstrumentReview review) => [.. OfStanding(review), .. OfChange(review), .. OfSamples(review), .. OfLog(review)];
+    public static Items<ReviewTask> Of(InstrumentReview review) => [.. OfStanding(review), .. OfTorques(review), .. OfChange(review), .. OfSamples(review), .. OfLog(review)];
 
     private static IEnumerable<ReviewTask> OfStanding(InstrumentReview review)
     {
@@ -30,6 +30,13 @@ internal static class ReviewTasks
                 yield return new(Measuring, "Check it before the next sample.", true);
                 break;
         }
+    }
+
+    private static IEnumerable<ReviewTask> OfTorques(InstrumentReview review)
+    {
+        var failed = review.ByTorque.Where(decade => decade.Standing.Status == InstrumentStatus.Failed).Select(decade => decade.Range).ToArray();
+        if (failed.Length == 0 || review.Standing.Status == InstrumentStatus.Failed) yield break;
+        yield return new(Measuring, $"Trust no readings at torques of {string.Join(" and ", failed)}: set the torque zero anew, run the instrument empty, and check again.", true);
     }
 
     private static IEnumerable<ReviewTask> OfChange(InstrumentReview review)

@@ -17,7 +17,7 @@ internal static class ReviewWords
             InstrumentStatus.Failed => "No.",
             _ => "Nobody knows.",
         };
-        return new("Is it right now?", word, new[] { review.Standing.Reason }.Concat(Last(review)).ToItems());
+        return new("Is it right now?", word, new[] { review.Standing.Reason }.Concat(Last(review)).Concat(AtTorques(review)).ToItems());
     }
 
     private static IEnumerable<string> Last(InstrumentReview review)
@@ -26,6 +26,11 @@ internal static class ReviewWords
         var last = review.Course.Checks[^1];
         yield return $"Its last check, on {Figures.Date(last.At)}, read {Off(last.Error.X)}; {Figures.Fixed(100 * last.Limit, 1)} % is allowed.";
     }
+
+    private static IEnumerable<string> AtTorques(InstrumentReview review) => review.ByTorque
+        .Where(decade => decade.Standing.Status != review.Standing.Status)
+        .GroupBy(decade => Words.Of(decade.Standing))
+        .Select(same => $"At torques of {string.Join(" and ", same.Select(decade => decade.Range))}: {same.Key}.");
 
     private static ReviewAnswer Change(InstrumentReview review)
     {

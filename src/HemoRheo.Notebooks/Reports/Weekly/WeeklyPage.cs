@@ -44,22 +44,29 @@ internal static class WeeklyPage
     {
         var last = review.Course.Checks.TakeLast(MostChecks).Reverse().ToArray();
         if (last.Length == 0) return Markup.None;
+        var decades = last.SelectMany(check => check.Bands).Select(band => band.Torque).Distinct().OrderBy(decade => decade.Lower).ToArray();
         var limit = Figures.Fixed(100 * review.Instrument.CheckLimit, 1);
         return Page.Section("checks", last.Length == review.Course.Checks.Count ? "All checks, the last first" : $"The last {last.Length} of {review.Course.Checks.Count} checks", Markup.Of($"""
             <div class="wide"><table>
-            <thead><tr><th scope="col">check</th><th scope="col">when</th><th scope="col">fluid, lot</th><th scope="col" class="n">reads wrong by, %</th><th scope="col" class="n">sure to ±, %</th><th scope="col" class="n">E<sub>n</sub></th><th scope="col" class="n">chance it is within ±{limit} %</th><th scope="col">outcome</th></tr></thead>
-            <tbody>{last.Select(Check)}</tbody></table></div>
+            <thead><tr><th scope="col">check</th><th scope="col">when</th><th scope="col">fluid, lot</th><th scope="col" class="n">reads wrong by, %</th><th scope="col" class="n">sure to ±, %</th><th scope="col" class="n">E<sub>n</sub></th><th scope="col" class="n">chance it is within ±{limit} %</th><th scope="col">outcome</th>{decades.Select(decade => Markup.Of($"<th scope=\"col\">at {Figures.Digits(1e6 * decade.Lower)} to {Figures.Digits(1e6 * decade.Upper)} µN·m</th>"))}</tr></thead>
+            <tbody>{last.Select(check => Check(check, decades))}</tbody></table></div>
             """));
     }
 
-    private static Markup Check(LoggedCheck check)
+    private static Markup Check(LoggedCheck check, Interval[] decades)
     {
-        var outcome = Markup.Of($"{Words.Of(check.Outcome)}");
         return Markup.Of($"""
-            <tr><th scope="row">{check.Name}</th><td class="w">{Figures.Date(check.At)}</td><td>{check.Fluid}, {check.Lot}</td><td class="n">{Figures.Signed(Percent(check.Error.X))}</td><td class="n">{Figures.Fixed(100 * check.Error.ExpandedUncertainty(NormalizedError.Coverage), 2)}</td><td class="n">{Figures.Signed(NormalizedError.Of(check.Error))}</td><td class="n">{Figures.Probability(check.ProbabilityWithin)}</td><td class="w">{(check.Outcome == CheckOutcome.Passes ? outcome : Markup.Of($"<span class=\"loud\">{outcome}</span>"))}</td></tr>
+            <tr><th scope="row">{check.Name}</th><td class="w">{Figures.Date(check.At)}</td><td>{check.Fluid}, {check.Lot}</td><td class="n">{Figures.Signed(Percent(check.Error.X))}</td><td class="n">{Figures.Fixed(100 * check.Error.ExpandedUncertainty(NormalizedError.Coverage), 2)}</td><td class="n">{Figures.Signed(NormalizedError.Of(check.Error))}</td><td class="n">{Figures.Probability(check.ProbabilityWithin)}</td><td class="w">{Outcome(check.Outcome)}</td>{decades.Select(decade => Markup.Of($"<td class=\"w\">{Outcome(check.BandAt(decade.Lower)?.Outcome)}</td>"))}</tr>
 
             """);
     }
+
+    private static Markup Outcome(CheckOutcome? outcome) => outcome switch
+    {
+        null => Markup.Of($"{Figures.Nothing}"),
+        CheckOutcome.Fails => Markup.Of($"<span class=\"loud\">{Words.Of(outcome.Value)}</span>"),
+        _ => Markup.Of($"{Words.Of(outcome.Value)}"),
+    };
 
     private static Markup Samples(InstrumentReview review)
     {

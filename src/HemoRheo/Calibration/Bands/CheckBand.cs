@@ -34,11 +34,11 @@ public sealed record CheckBand(
     public CheckNeed? Need => Outcome == CheckOutcome.CannotTell ? CheckNeeds.Of(Error, Readings, CheckJudgement.Limits(Limit), Level) : null;
 
     /// <summary>The decade in words, e.g. <c>1 to 10 uN.m</c>.</summary>
-    public string Range => Invariant($"{1e6 * Torque.Lower:G3} to {1e6 * Torque.Upper:G3} uN.m");
+    public string Range => TorqueDecade.Words(Torque);
 
     /// <summary>Whether a torque lies in it.</summary>
     /// <param name="newtonMeters">The torque, N.m.</param>
-    public bool Holds(double newtonMeters) => newtonMeters >= Torque.Lower && newtonMeters < Torque.Upper;
+    public bool Holds(double newtonMeters) => TorqueDecade.Holds(Torque, newtonMeters);
 
     /// <inheritdoc/>
     public override string ToString() => Invariant($"{Range}: {100 * (Math.Exp(Error.X) - 1):+0.00;-0.00} % from {Readings} readings, E_n {NormalizedError:0.00}, {Outcome.Words()}, wrongly accepted with a probability of {Acceptance.WrongAcceptance:G3}{(Need is { } need ? $". {need}" : "")}");

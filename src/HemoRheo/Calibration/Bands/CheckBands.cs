@@ -31,7 +31,7 @@ internal static class CheckBands
     private static double Percent(CheckBand band) => 100 * (Math.Exp(band.Error.X) - 1);
 
     private static int? DecadeOf(FlowCurve curve, FlowPoint point) =>
-        (point.Reading?.Torque ?? point.Stress.Pascals / curve.StressPerTorque) is { } torque and > 0 ? (int)Math.Floor(Math.Log10(torque)) : null;
+        curve.TorqueOf(point) is { } torque and > 0 ? (int)Math.Floor(Math.Log10(torque)) : null;
 
     // Where the sizes of errors are known up to a scale only, all decades share the scale that the whole check shows.
     private static ErrorModel? KnownErrors(FittedLaw fit)

@@ -30,6 +30,23 @@ internal static class Vouching
         return new(InstrumentStatus.InOrder, Invariant($"Passed {last}, which vouches until {until:yyyy-MM-dd}."), null, []);
     }
 
+    /// <summary>The standing at a moment for readings of one torque, named in the reason and in the findings.</summary>
+    /// <param name="instrument">The instrument.</param>
+    /// <param name="checks">Its checks in order of time, each with its outcome at this torque; null where it says nothing of it.</param>
+    /// <param name="moment">The moment.</param>
+    /// <param name="newtonMeters">The torque, N.m, above zero.</param>
+    internal static InstrumentStanding At(Instrument instrument, IEnumerable<(VouchingCheck Check, CheckOutcome? There)> checks, DateTimeOffset moment, double newtonMeters)
+    {
+        var range = TorqueDecade.Words(TorqueDecade.Of(newtonMeters));
+        var there = checks.Where(check => check.There is not null).Select(check => check.Check with { Outcome = check.There!.Value }).ToArray();
+        var standing = At(instrument, there, moment);
+        return standing with
+        {
+            Reason = $"{range}: {standing.Reason}",
+            Findings = standing.Findings.Select(finding => finding with { Message = $"{range}: {finding.Message}" }).ToItems(),
+        };
+    }
+
     /// <summary>The first adjustment after one moment and not after another; null where there is none.</summary>
     internal static DateTimeOffset? AdjustedSince(Instrument instrument, DateTimeOffset since, DateTimeOffset moment) =>
         instrument.AdjustedAfter(since) is { } adjusted && adjusted <= moment ? adjusted : null;

@@ -34,7 +34,18 @@ internal static class LogJsonReading
         json.Number("probability_within"),
         json.GetProperty("readings").EnumerateArray().Select(reading => new LoggedReading(reading.Number("rate_1/s"), reading.NumberOrNull("torque_N.m"), reading.Number("error_ln"))).ToItems(),
         json.TextOrNull("export"),
-        json.TextOrNull("export_sha256"));
+        json.TextOrNull("export_sha256"))
+    {
+        Bands = json.TryGetProperty("bands", out var bands) ? bands.EnumerateArray().Select(Band).ToItems() : [],
+    };
+
+    private static LoggedBand Band(JsonElement json) => new(
+        new(json.Number("from_N.m"), json.Number("to_N.m")),
+        json.GetProperty("readings").GetInt32(),
+        json.Number("error_ln"),
+        json.Number("standard_uncertainty"),
+        Outcomes[json.Text("outcome")],
+        json.Number("probability_within"));
 
     private static Contribution Contribution(JsonElement json) => new(
         new(Kinds[json.Text("source")], json.Text("of")),

@@ -61,6 +61,13 @@ internal static class LogJsonWriting
         json.WriteStartArray("readings");
         foreach (var reading in check.Readings) Reading(json, reading);
         json.WriteEndArray();
+        if (check.Bands.Count > 0)
+        {
+            json.WriteStartArray("bands");
+            foreach (var band in check.Bands) Band(json, band);
+            json.WriteEndArray();
+        }
+
         if (check.Export is not null) json.WriteString("export", check.Export);
         if (check.ExportDigest is not null) json.WriteString("export_sha256", check.ExportDigest);
     }
@@ -82,6 +89,19 @@ internal static class LogJsonWriting
         json.WriteNumber("rate_1/s", reading.Rate);
         if (reading.Torque is { } torque) json.WriteNumber("torque_N.m", torque);
         json.WriteNumber("error_ln", reading.Error);
+        json.WriteEndObject();
+    }
+
+    private static void Band(Utf8JsonWriter json, LoggedBand band)
+    {
+        json.WriteStartObject();
+        json.WriteNumber("from_N.m", band.Torque.Lower);
+        json.WriteNumber("to_N.m", band.Torque.Upper);
+        json.WriteNumber("readings", band.Readings);
+        json.WriteNumber("error_ln", band.Error);
+        json.WriteNumber("standard_uncertainty", band.Uncertainty);
+        json.WriteString("outcome", band.Outcome.Words());
+        json.WriteNumber("probability_within", band.ProbabilityWithin);
         json.WriteEndObject();
     }
 

@@ -35,6 +35,13 @@ public sealed record LoggedCheck(
     string? Export,
     string? ExportDigest) : LoggedEvent
 {
+    /// <summary>The check by decades of torque, ascending; none where torques are not known, or in entries of a program that did not judge them.</summary>
+    public Items<LoggedBand> Bands { get; init; } = Items<LoggedBand>.None;
+
+    /// <summary>The decade that holds a torque; null where the check says nothing of it.</summary>
+    /// <param name="newtonMeters">The torque, N.m.</param>
+    public LoggedBand? BandAt(double newtonMeters) => Bands.FirstOrDefault(band => TorqueDecade.Holds(band.Torque, newtonMeters));
+
     internal override string Kind => "check";
 
     internal override DateTimeOffset? Happened => At;

@@ -26,7 +26,10 @@ public static class LoggedChecks
             check.ProbabilityWithin,
             curve.Points.Select(point => Reading(point, curve, check.Expected)).ToItems(),
             export,
-            readings.Files.FirstOrDefault(file => file.Path == export)?.Digest);
+            readings.Files.FirstOrDefault(file => file.Path == export)?.Digest)
+        {
+            Bands = check.Bands.Select(Band).ToItems(),
+        };
     }
 
     /// <summary>The control chart of a log: one point a filling, started anew at every adjustment.</summary>
@@ -49,11 +52,11 @@ public static class LoggedChecks
         adjusted,
         baseline);
 
-    private static LoggedReading Reading(FlowPoint point, FlowCurve curve, Viscosity expected)
-    {
-        var torque = point.Reading?.Torque ?? point.Stress.Pascals / curve.StressPerTorque;
-        return new(point.Rate.ReciprocalSeconds, torque, Math.Log(point.ApparentViscosity.PascalSeconds / expected.PascalSeconds));
-    }
+    private static LoggedReading Reading(FlowPoint point, FlowCurve curve, Viscosity expected) =>
+        new(point.Rate.ReciprocalSeconds, curve.TorqueOf(point), Math.Log(point.ApparentViscosity.PascalSeconds / expected.PascalSeconds));
+
+    private static LoggedBand Band(CheckBand band) =>
+        new(band.Torque, band.Readings, band.Error.X, band.Error.StandardUncertainty, band.Outcome, band.ProbabilityWithin);
 
     private static ChartedCheck OfFilling(LoggedCheck[] readings)
     {

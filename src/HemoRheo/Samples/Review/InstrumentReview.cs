@@ -21,6 +21,9 @@ public sealed record InstrumentReview(
     LogVerification? Log,
     Items<LoggedCheck> NotInLog)
 {
+    /// <summary>Its standing then by decade of torque, ascending; none where the torques of its checks are not known.</summary>
+    public Items<TorqueStanding> ByTorque => Course.ByTorque(At);
+
     /// <summary>The instrument.</summary>
     public Instrument Instrument => Course.Instrument;
 

@@ -25,7 +25,7 @@ public static class InstrumentReviews
             course.At(at),
             chart,
             blood.Select(recording => recording.Sample).Distinct().Count(),
-            SamplesInDoubt.Of(course, chart, blood),
+            SamplesInDoubt.Of(readings, course, chart, blood),
             log?.Verification,
             log is null ? [] : own.Checks.Where(check => !log.Holds(check)).ToItems());
     }
