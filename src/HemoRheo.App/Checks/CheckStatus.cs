@@ -5,8 +5,6 @@ namespace HemoRheo.App;
 /// <summary>Tells an instrument's three answers: is it right, did it change, what does that touch; and who must do what.</summary>
 internal sealed class CheckStatus(TextWriter output, TimeProvider clock)
 {
-    private const int ToldSamples = 10;
-
     /// <summary>Tells them.</summary>
     /// <param name="request">Which instrument.</param>
     /// <param name="at">The moment; null for now.</param>
@@ -29,8 +27,7 @@ internal sealed class CheckStatus(TextWriter output, TimeProvider clock)
             foreach (var line in answer.Lines) Tell($"  {line}");
         }
 
-        foreach (var doubt in review.InDoubt.Take(ToldSamples)) Tell($"  {doubt}");
-        if (review.InDoubt.Count > ToldSamples) Tell($"  and {review.InDoubt.Count - ToldSamples} more");
+        foreach (var group in DoubtGroup.Of(review)) Tell($"  {Words.Of(group.Status)}: {group.Names}, measured {group.Days}. {group.Reason}");
         Tell("");
         Tell("Who must do what");
         foreach (var task in tasks) Tell($"  {task.Who}: {task.What}");

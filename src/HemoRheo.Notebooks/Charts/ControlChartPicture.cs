@@ -14,7 +14,7 @@ internal static class ControlChartPicture
     public const int Height = 380;
 
     /// <summary>Height of the picture on the weekly page, in pixels.</summary>
-    public const int LowHeight = 290;
+    public const int LowHeight = 265;
 
     /// <summary>Most checks that are drawn: the last ones.</summary>
     public const int Most = 60;

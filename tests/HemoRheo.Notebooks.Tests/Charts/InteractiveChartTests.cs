@@ -23,6 +23,7 @@ public sealed class InteractiveChartTests
         ["budget"] = () => FakeStudy.Result.Samples[0].BudgetChart(),
         ["ranges"] = () => FakeStudy.Result.Samples[0].RangeChart(),
         ["checks"] = () => FakeStudy.Result.Analyzed.Histories[0].Chart(),
+        ["control chart"] = () => FakeCourse.Review.Chart.Chart(),
         ["ratios"] = () => FakeCohort.Summary.Chart(),
     };
 

@@ -29,7 +29,7 @@ public sealed class CommandLineTests : IDisposable
         var run = await ConsoleRun.Of(folder.Path, option);
 
         Assert.Equal(0, run.Exit);
-        foreach (var word in new[] { "hemorheo new <folder>", "hemorheo synthesize <folder>", "--strict", "--output", "research use only", "0   done", "1   only with --strict", "2   could not run" })
+        foreach (var word in new[] { "hemorheo new <folder>", "hemorheo synthesize <folder>", "hemorheo check status <folder>", "--strict", "--output", "research use only", "0   done", "1   only with --strict", "2   could not run" })
         {
             Assert.Contains(word, run.Output, StringComparison.Ordinal);
         }

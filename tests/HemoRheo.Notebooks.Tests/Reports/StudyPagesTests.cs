@@ -15,11 +15,11 @@ public sealed partial class StudyPagesTests : IDisposable
     public void Dispose() => Directory.Delete(_folder, recursive: true);
 
     [Fact]
-    public void There_is_an_overview_a_page_a_sample_and_a_page_an_instrument()
+    public void There_is_an_overview_a_page_a_sample_a_page_an_instrument_and_a_weekly_page_of_what_was_checked()
     {
         Assert.True(File.Exists(Path.Combine(_folder, "index.html")));
         Assert.Equal(FakeStudy.Names.Length, Directory.GetFiles(Path.Combine(_folder, "samples")).Length);
-        Assert.Equal(2, Directory.GetFiles(Path.Combine(_folder, "instruments")).Length);
+        Assert.Equal(["R1.html", "R1_week.html", "R2__i.html"], Directory.GetFiles(Path.Combine(_folder, "instruments")).Select(Path.GetFileName).Order(StringComparer.Ordinal));
         Assert.True(File.Exists(Path.Combine(_folder, "run.json")));
         Assert.Equal(["run.json"], Directory.GetFiles(_folder).Select(Path.GetFileName).Where(name => name != "index.html"));
     }

@@ -40,7 +40,8 @@ internal static class ReviewWords
         var settled = current.Baseline is { Established: true };
         var (word, lines) = current switch
         {
-            { Points.Count: 0 } => ("Cannot be told.", new[] { $"There is no check{since}." }),
+            { Changes: null } when WentWrong(review) is { } wrong => ("Yes.", new[] { wrong }),
+            { Points.Count: 0 } => ("Cannot be told.", [$"There is no check{since}."]),
             { Changes: { } changes } => ("Yes.", Changed(current, changes)),
             _ when settled => ("No.", [$"{checks}, and none shows a change."]),
             _ => ("No sign of it so far.", [$"{checks}. A change is seen with certainty only once there are {ControlChart.LeastBaseline} checks to compare with."]),
@@ -48,6 +49,18 @@ internal static class ReviewWords
         var earlier = review.Chart.Segments.Where(segment => segment != current && segment.Changes is not null)
             .Select(segment => $"Before it was adjusted it had changed as well, most likely on {Figures.Date(segment.Changes!.Better.MostLikely)}.");
         return new("Has it drifted, and since when?", word, lines.Concat(earlier.TakeLast(1)).Concat(Stretches(review)).ToItems());
+    }
+
+    // A failed check dates the trouble where the chart does not.
+    private static string? WentWrong(InstrumentReview review)
+    {
+        if (review.Standing.Status != InstrumentStatus.Failed) return null;
+        var checks = review.Course.Checks;
+        var passed = checks.LastOrDefault(check => check.Outcome == CheckOutcome.Passes);
+        var failed = checks.First(check => check.Outcome == CheckOutcome.Fails && (passed is null || check.At > passed.At));
+        return passed is null
+            ? $"It has failed since {Figures.Date(failed.At)}, and no check passed before."
+            : $"It went wrong between {Figures.Date(passed.At)}, when it last passed, and {Figures.Date(failed.At)}, when it failed; its checks do not say when in between.";
     }
 
     private static string[] Changed(ChartSegment segment, ChartChanges changes)
@@ -58,7 +71,7 @@ internal static class ReviewWords
         return
         [
             better.Shape == ChangeShape.Step ? $"It jumped by {percent} %." : $"It drifts slowly, by {percent} % a month.",
-            $"Most likely since {Figures.Date(better.MostLikely)}; surely (95 %) between {Figures.Date(changes.Earliest)} and {Figures.Date(latest)}{(changes.Preliminary ? ", to be dated better by the next checks" : "")}.",
+            $"Most likely since {Figures.Date(better.MostLikely)}; with 95 % certainty between {Figures.Date(changes.Earliest)} and {Figures.Date(latest)}{(changes.Preliminary ? ", to be dated better by the next checks" : "")}.",
             $"First seen at {first.First}. Of 100 instruments that do not change, {Figures.Fixed(100 * first.FalseAlarm.Within52, 0)} give such a sign within 52 checks.",
         ];
     }

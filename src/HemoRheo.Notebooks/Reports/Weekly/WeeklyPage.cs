@@ -4,7 +4,7 @@ namespace HemoRheo.Notebooks;
 internal static class WeeklyPage
 {
     private const int MostChecks = 7;
-    private const int MostSamples = 6;
+    private const int MostGroups = 6;
 
     /// <summary>The page.</summary>
     /// <param name="review">The instrument at a moment.</param>
@@ -27,7 +27,7 @@ internal static class WeeklyPage
         """);
 
     private static Markup Tasks(InstrumentReview review) => Page.Section("tasks", "Who must do what", Markup.Of($"""
-        <ul class="tasks">{ReviewTasks.Of(review).Select(task => Markup.Of($"<li><b>{task.Who}</b> {task.What}</li>"))}</ul>
+        <ul class="tasks">{ReviewTasks.Of(review).Select(task => Markup.Of($"<li><b>{task.Who}</b><span>{task.What}</span></li>"))}</ul>
         """));
 
     private static Markup Chart(InstrumentReview review)
@@ -37,7 +37,7 @@ internal static class WeeklyPage
         return Page.Section("chart", "Its checks over time", Page.Figure(
             ControlChartPicture.Svg(review.Chart, review.Instrument.CheckLimit),
             $"Control chart of instrument {review.Instrument.Name}, its last {Figures.Count(count, "check")}: {string.Join("; ", review.Course.Checks.TakeLast(count).Select(check => $"{Figures.Date(check.At)} {Figures.Signed(Percent(check.Error.X))} %"))}.",
-            Markup.Of($"Each mark is a check with a fluid of known viscosity; its bar holds the true error in 95 of 100 cases. Between the thin lines an instrument that does not change stays by chance; beyond the thick lines it reads too wrong to be used.")));
+            Markup.Of($"Each mark is a check with a fluid of known viscosity; its bar holds the true error in 95 of 100 cases. An instrument that does not change stays between the dashed lines by chance (drawn from the sixth check on); beyond the thick lines it reads too wrong to be used.")));
     }
 
     private static Markup Checks(InstrumentReview review)
@@ -47,7 +47,7 @@ internal static class WeeklyPage
         var decades = last.SelectMany(check => check.Bands).Select(band => band.Torque).Distinct().OrderBy(decade => decade.Lower).ToArray();
         var limit = Figures.Fixed(100 * review.Instrument.CheckLimit, 1);
         return Page.Section("checks", last.Length == review.Course.Checks.Count ? "All checks, the last first" : $"The last {last.Length} of {review.Course.Checks.Count} checks", Markup.Of($"""
-            <div class="wide"><table>
+            <div class="wide"><table><caption>Checks with a calibration fluid</caption>
             <thead><tr><th scope="col">check</th><th scope="col">when</th><th scope="col">fluid, lot</th><th scope="col" class="n">reads wrong by, %</th><th scope="col" class="n">sure to ±, %</th><th scope="col" class="n">E<sub>n</sub></th><th scope="col" class="n">chance it is within ±{limit} %</th><th scope="col">outcome</th>{decades.Select(decade => Markup.Of($"<th scope=\"col\">at {Figures.Digits(1e6 * decade.Lower)} to {Figures.Digits(1e6 * decade.Upper)} µN·m</th>"))}</tr></thead>
             <tbody>{last.Select(check => Check(check, decades))}</tbody></table></div>
             """));
@@ -56,7 +56,7 @@ internal static class WeeklyPage
     private static Markup Check(LoggedCheck check, Interval[] decades)
     {
         return Markup.Of($"""
-            <tr><th scope="row">{check.Name}</th><td class="w">{Figures.Date(check.At)}</td><td>{check.Fluid}, {check.Lot}</td><td class="n">{Figures.Signed(Percent(check.Error.X))}</td><td class="n">{Figures.Fixed(100 * check.Error.ExpandedUncertainty(NormalizedError.Coverage), 2)}</td><td class="n">{Figures.Signed(NormalizedError.Of(check.Error))}</td><td class="n">{Figures.Probability(check.ProbabilityWithin)}</td><td class="w">{Outcome(check.Outcome)}</td>{decades.Select(decade => Markup.Of($"<td class=\"w\">{Outcome(check.BandAt(decade.Lower)?.Outcome)}</td>"))}</tr>
+            <tr><th scope="row">{check.Name}</th><td class="w">{Figures.Date(check.At)}</td><td class="w">{check.Fluid}, {check.Lot}</td><td class="n">{Figures.Signed(Percent(check.Error.X))}</td><td class="n">{Figures.Fixed(100 * check.Error.ExpandedUncertainty(NormalizedError.Coverage), 2)}</td><td class="n">{Figures.Signed(NormalizedError.Of(check.Error))}</td><td class="n">{Figures.Probability(check.ProbabilityWithin)}</td><td class="w">{Outcome(check.Outcome)}</td>{decades.Select(decade => Markup.Of($"<td class=\"w\">{Outcome(check.BandAt(decade.Lower)?.Outcome)}</td>"))}</tr>
 
             """);
     }
@@ -71,13 +71,13 @@ internal static class WeeklyPage
     private static Markup Samples(InstrumentReview review)
     {
         if (review.InDoubt.Count == 0) return Markup.None;
-        var shown = review.InDoubt.Take(MostSamples).ToArray();
-        var rest = review.InDoubt.Count - shown.Length;
+        var groups = DoubtGroup.Of(review);
+        var rest = groups.Skip(MostGroups).Sum(group => group.Samples.Count);
         return Page.Section("samples", $"Samples in doubt: {review.InDoubt.Count} of {review.Samples}", Markup.Of($"""
-            <div class="wide"><table>
-            <thead><tr><th scope="col">sample</th><th scope="col">measured</th><th scope="col">instrument</th><th scope="col">why</th></tr></thead>
-            <tbody>{shown.Select(one => Markup.Of($"<tr><th scope=\"row\">{one.Sample}</th><td class=\"w\">{Figures.Date(one.At)}</td><td class=\"w\">{Words.Of(one.Status)}</td><td>{one.Reason}</td></tr>\n"))}</tbody></table></div>
-            {(rest == 0 ? Markup.None : Markup.Of($"<p>And {rest} more, to {Figures.Date(review.InDoubt[^1].At)}.</p>"))}
+            <div class="wide"><table><caption>Samples in doubt by reason</caption>
+            <thead><tr><th scope="col" class="n">count</th><th scope="col">samples</th><th scope="col">measured</th><th scope="col">instrument</th><th scope="col">why</th></tr></thead>
+            <tbody>{groups.Take(MostGroups).Select(group => Markup.Of($"<tr><td class=\"n\">{group.Samples.Count}</td><th scope=\"row\">{group.Names}</th><td>{group.Days}</td><td class=\"w\">{Words.Of(group.Status)}</td><td>{group.Reason}</td></tr>\n"))}</tbody></table></div>
+            {(rest == 0 ? Markup.None : Markup.Of($"<p>And {rest} more for other reasons.</p>"))}
             """));
     }
 

@@ -23,8 +23,10 @@ internal static class WeeklyStyle
         table{font-size:7.8pt;line-height:1.25;width:100%}
         th,td{padding:.35mm 2mm .35mm 0}
         ul.tasks{margin:0;padding:0;list-style:none}
-        ul.tasks li{margin:.4mm 0}
-        ul.tasks b{display:inline-block;min-width:44mm}
+        ul.tasks li{display:grid;grid-template-columns:46mm 1fr;margin:.4mm 0}
+        thead .n{white-space:normal}
+        tbody th{white-space:nowrap}
+        caption{position:absolute;clip-path:inset(50%);white-space:nowrap}
         .digest{font-size:7.5pt;overflow-wrap:anywhere}
         footer{display:none}
         @media print{body{margin:0;font-size:9pt}table{font-size:7.8pt}th,td{padding-right:2mm}}
