@@ -14,7 +14,7 @@ internal static class ControlChartPicture
     public const int Height = 380;
 
     /// <summary>Height of the picture on the weekly page, in pixels.</summary>
-    public const int LowHeight = 265;
+    public const int LowHeight = 235;
 
     /// <summary>Most checks that are drawn: the last ones.</summary>
     public const int Most = 60;
@@ -29,7 +29,8 @@ internal static class ControlChartPicture
     {
         var drawn = Drawn(chart);
         var points = drawn.SelectMany(segment => segment.Points).ToArray();
-        var (from, until) = (points[0].Check.At.AddDays(-1.5), points[^1].Check.At.AddDays(1.5));
+        var aside = Math.Max(1.5, 0.02 * (points[^1].Check.At - points[0].Check.At).TotalDays);
+        var (from, until) = (points[0].Check.At.AddDays(-aside), points[^1].Check.At.AddDays(aside));
         var reach = 1.12 * points.SelectMany(Heights).Append(limit is { } allowed ? 100 * allowed : 0).Max();
 
         var model = Still.Model();

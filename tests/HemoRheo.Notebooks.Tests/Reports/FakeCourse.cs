@@ -21,7 +21,7 @@ internal static class FakeCourse
 
     private static LoggedCheck Check(int week)
     {
-        var error = Pattern[week % Pattern.Length] + Math.Max(0, week - 22) * 0.002;
+        var error = Pattern[week % Pattern.Length] + Math.Max(0, week - 22) * 0.0009;
         var value = new Value(error, [new(new(SourceKind.Day, $"R1/{week}"), 0.0035, "checks R1", 25), new(new(SourceKind.Certificate, "LOT"), 0.002)]);
         var low = week == 31 ? CheckOutcome.Fails : CheckOutcome.Passes;
         return new("R1 <i>", $"W-{week + 1}", 1, Start.AddDays(7 * week), "oil <5>", "=LOT", new(37), new(0.005 * Math.Exp(error)), new(0.005), value, 0.03, CheckOutcome.Passes, 0.98, [], null, null)

@@ -3,8 +3,8 @@ namespace HemoRheo.Notebooks;
 /// <summary>The weekly page of an instrument, one side of A4: is it right, did it drift, what does that touch; chart, last checks, samples in doubt, who must do what.</summary>
 internal static class WeeklyPage
 {
-    private const int MostChecks = 7;
-    private const int MostGroups = 6;
+    private const int MostChecks = 6;
+    private const int MostGroups = 4;
 
     /// <summary>The page.</summary>
     /// <param name="review">The instrument at a moment.</param>
@@ -22,12 +22,12 @@ internal static class WeeklyPage
         """);
 
     private static Markup Answer(ReviewAnswer answer) => Markup.Of($"""
-        <div><h3>{answer.Question}</h3><p class="short"><b>{answer.Short}</b></p>{answer.Lines.Select(line => Markup.Of($"<p>{line}</p>"))}</div>
+        <div><h3>{answer.Question}</h3><p class="short"><b>{answer.Short}</b></p>{answer.Lines.Select(line => Markup.Of($"<p>{Shown(line)}</p>"))}</div>
 
         """);
 
     private static Markup Tasks(InstrumentReview review) => Page.Section("tasks", "Who must do what", Markup.Of($"""
-        <ul class="tasks">{ReviewTasks.Of(review).Select(task => Markup.Of($"<li><b>{task.Who}</b><span>{task.What}</span></li>"))}</ul>
+        <ul class="tasks">{ReviewTasks.Of(review).GroupBy(task => task.Who).Select(own => Markup.Of($"<li><b>{own.Key}</b><span>{Shown(string.Join(' ', own.Select(task => task.What)))}</span></li>"))}</ul>
         """));
 
     private static Markup Chart(InstrumentReview review)
@@ -76,7 +76,7 @@ internal static class WeeklyPage
         return Page.Section("samples", $"Samples in doubt: {review.InDoubt.Count} of {review.Samples}", Markup.Of($"""
             <div class="wide"><table><caption>Samples in doubt by reason</caption>
             <thead><tr><th scope="col" class="n">count</th><th scope="col">samples</th><th scope="col">measured</th><th scope="col">instrument</th><th scope="col">why</th></tr></thead>
-            <tbody>{groups.Take(MostGroups).Select(group => Markup.Of($"<tr><td class=\"n\">{group.Samples.Count}</td><th scope=\"row\">{group.Names}</th><td>{group.Days}</td><td class=\"w\">{Words.Of(group.Status)}</td><td>{group.Reason}</td></tr>\n"))}</tbody></table></div>
+            <tbody>{groups.Take(MostGroups).Select(group => Markup.Of($"<tr><td class=\"n\">{group.Samples.Count}</td><th scope=\"row\">{group.Names}</th><td>{group.Days}</td><td class=\"w\">{Words.Of(group.Status)}</td><td>{Shown(group.Reason)}</td></tr>\n"))}</tbody></table></div>
             {(rest == 0 ? Markup.None : Markup.Of($"<p>And {rest} more for other reasons.</p>"))}
             """));
     }
@@ -84,6 +84,9 @@ internal static class WeeklyPage
     private static Markup Digest(InstrumentReview review) => Markup.Of($"""
         <p class="digest">{(review.Log is { } log ? $"By the instrument's log, {Figures.Count(log.Entries, "entry", "entries")}, {(log.Sound ? "all as they were written" : "changed after they were written")}; last digest {log.LastDigest}" : "By the study's own checks; no log was asked.")}</p>
         """);
+
+    // The library writes units in plain letters.
+    private static string Shown(string words) => words.Replace("uN.m", "µN·m", StringComparison.Ordinal);
 
     private static double Percent(double logError) => 100 * (Math.Exp(logError) - 1);
 }

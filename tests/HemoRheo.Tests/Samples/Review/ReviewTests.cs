@@ -29,14 +29,14 @@ public sealed class ReviewTests
     [Fact]
     public void A_change_that_the_chart_dates_puts_in_doubt_what_was_measured_since_though_every_check_passes()
     {
-        var checks = Enumerable.Range(0, 26).Select(week => Check(7 * week, (week % 2 == 0 ? 0.2 : -0.2) + (week < 21 ? 0 : 1.5))).ToArray();
+        var checks = Enumerable.Range(0, 26).Select(week => Check(7 * week, (week % 2 == 0 ? 0.1 : -0.1) + (week < 21 ? 0 : 1.1))).ToArray();
         var review = Reviewed(7 * 26, checks);
         Assert.All(review.Course.Checks, check => Assert.Equal(CheckOutcome.Passes, check.Outcome));
         var changes = review.Chart.Current.Changes!;
         Assert.NotEmpty(review.InDoubt);
         Assert.All(review.InDoubt, doubt => Assert.True(doubt.At >= changes.Earliest && doubt.Status == InstrumentStatus.InDoubt));
         Assert.Contains("S-148", review.InDoubt.Select(doubt => doubt.Sample));
-        Assert.DoesNotContain("S-134", review.InDoubt.Select(doubt => doubt.Sample));
+        Assert.DoesNotContain("S-120", review.InDoubt.Select(doubt => doubt.Sample));
         Assert.StartsWith("The control chart dates a change of the instrument to 2026-07-2", review.InDoubt[0].Reason, StringComparison.Ordinal);
     }
 
@@ -47,7 +47,7 @@ public sealed class ReviewTests
         var review = Review(9, [Check(0, 0.1), Check(1, 0.2), WrongAtLowTorque(7)], blood);
         var doubt = Assert.Single(review.InDoubt);
         Assert.Equal(("S-low", InstrumentStatus.InDoubt), (doubt.Sample, doubt.Status));
-        Assert.Matches("^[0-9] of 12 kept readings lie where the check failed: 0.1 to 1 uN.m: Failed at check 'C7' of 2026-03-09", doubt.Reason);
+        Assert.StartsWith("Kept readings lie where the check failed: 0.1 to 1 uN.m: Failed at check 'C7' of 2026-03-09", doubt.Reason, StringComparison.Ordinal);
         Assert.Equal(InstrumentStatus.InOrder, review.Standing.Status);
         Assert.Equal([InstrumentStatus.Failed, InstrumentStatus.InOrder, InstrumentStatus.InOrder], review.ByTorque.Select(decade => decade.Standing.Status));
     }
@@ -57,8 +57,8 @@ public sealed class ReviewTests
     {
         Recording[] blood = [Blood("S-01", 8, TestStudy.Rates)];
         Recording[] right = [Check(0, 0.1), Check(1, 0.2), Check(7, 0.15)];
-        var before = Assert.Single(Study.Evaluate(TestStudy.Readings(Study, right, blood, [TestStudy.Sample("S-01", Day(7.9))])).Samples);
-        var sample = Assert.Single(Study.Evaluate(TestStudy.Readings(Study, [right[0], right[1], WrongAtLowTorque(7)], blood, [TestStudy.Sample("S-01", Day(7.9))])).Samples);
+        var before = Assert.Single(Study.Evaluate(TestStudy.Readings(Study, right, blood, [TestStudy.Sample("S-01", Day(7.9))]), cancel: TestContext.Current.CancellationToken).Samples);
+        var sample = Assert.Single(Study.Evaluate(TestStudy.Readings(Study, [right[0], right[1], WrongAtLowTorque(7)], blood, [TestStudy.Sample("S-01", Day(7.9))]), cancel: TestContext.Current.CancellationToken).Samples);
         Assert.DoesNotContain("instrument-in-doubt-at-some-torques", before.Findings.Codes());
         Assert.Contains("instrument-in-doubt-at-some-torques", sample.Findings.Codes());
         Assert.All(sample.Values.Where(value => value.Basis == HematocritBasis.Native), value => Assert.Contains("instrument-in-doubt-at-some-torques", value.Findings.Codes()));
