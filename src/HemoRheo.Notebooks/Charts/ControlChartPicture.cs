@@ -45,7 +45,7 @@ internal static class ControlChartPicture
             MinorIntervalType = DateTimeIntervalType.Days,
             IntervalType = DateTimeIntervalType.Days,
         }));
-        model.Axes.Add(Still.Linear(AxisPosition.Left, "measured less certified, %", -reach, reach));
+        model.Axes.Add(Still.Linear(AxisPosition.Left, "error of the check, %", -reach, reach));
         model.Legends.Add(Still.Legend());
         foreach (var segment in drawn) Ground(model, segment, Place(from), Place(until), reach);
         if (limit is { } most) Limit(model, 100 * most, Place(from), Place(until));

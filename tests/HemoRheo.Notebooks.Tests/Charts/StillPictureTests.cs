@@ -23,7 +23,7 @@ public sealed class StillPictureTests
         ["comparison"] = (() => Still.Svg(ComparisonChart.Model(Curve.Compare(Errors, FlowLaw.Casson, FlowLaw.PowerLaw)), ComparisonChart.Height), ["shear rate, 1/s", "readings"]),
         ["budget"] = (() => BudgetChart.Svg(Native), ["size of the contribution, % of the value (one standard uncertainty)", "calibration (shared)", "together"]),
         ["checks"] = (() => CheckChart.Svg(FakeStudy.Result.Analyzed.Histories[0], StatusSpans.Of(FakeStudy.Result.Analyzed.Histories[0])), ["measured less certified, %", "date (as recorded)", "limit of a check", "fails", "cannot tell", "in doubt"]),
-        ["control chart"] = (() => ControlChartPicture.Svg(FakeCourse.Review.Chart, 0.03), ["measured less certified, %", "date of the check", "allowed", "center", "limits of chance", "weighted average", "slow drift", "it changed in here"]),
+        ["control chart"] = (() => ControlChartPicture.Svg(FakeCourse.Review.Chart, 0.03), ["error of the check, %", "date of the check", "allowed", "center", "limits of chance", "weighted average", "it changed in here"]),
         ["strip"] = (() => RangeStripChart.Svg([new("<b>row</b> & more", Sample.Values[0].Range, [.. FakeStudy.Result.Samples.Select(sample => sample.Values[0])], [])], "viscosity at 1 1/s, mPa·s", whiskers: true), ["viscosity at 1 1/s, mPa·s", "<b>row</b> & more", "within", "instrument not in order"]),
         ["ratios"] = (() => RatioChart.Svg(FakeCohort.Summary), ["ratio of means, residents over controls (bars: 95 % interval)", "viscosity at 10 1/s, native", "as it is", "adjusted for hematocrit", "no difference"]),
     };
