@@ -7,7 +7,7 @@ internal static class EstimateView
     {
         var interval = estimate.Interval();
         var quarter = Math.Abs(interval.Upper - interval.Lower) / 4;
-        var table = Table.Of("measurand", "value", "lower limit", "upper limit", "unit").With(
+        var table = Table.Of("measurand", "value", "lower end", "upper end", "unit").With(
             estimate.Extrapolated ? $"{estimate.Measurand.Name} (extrapolated)" : estimate.Measurand.Name,
             Cell.Rounded(estimate.Shown, quarter),
             Cell.Rounded(interval.Lower, quarter),

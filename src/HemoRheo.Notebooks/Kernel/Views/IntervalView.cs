@@ -3,7 +3,7 @@ namespace HemoRheo.Notebooks;
 /// <summary>Intervals from one fit: what they say in words, then the numbers.</summary>
 internal static class IntervalView
 {
-    public static Table Table(IEnumerable<FitInterval> intervals) => HemoRheo.Table.Of("measurand", "value", "lower limit", "upper limit", "unit", "method", "answer").WithRows(intervals, one =>
+    public static Table Table(IEnumerable<FitInterval> intervals) => HemoRheo.Table.Of("measurand", "value", "lower end", "upper end", "unit", "method", "answer").WithRows(intervals, one =>
     [
         one.Name, Number(one, one.Estimate), Number(one, one.Lower), Number(one, one.Upper), one.Shown.Symbol, Words.Of(one.Method), Words.Of(one.Kind),
     ]);
