@@ -8,13 +8,13 @@ namespace HemoRheo;
 /// </summary>
 internal static class CheckBudget
 {
-    internal static IEnumerable<Contribution> Of(Instrument instrument, Recording recording, CalibrationFluid fluid, Temperature temperature, FittedLaw fit)
+    internal static IEnumerable<Contribution> Of(Study study, Instrument instrument, Recording recording, CalibrationFluid fluid, Temperature temperature, FittedLaw fit)
     {
         foreach (var part in fluid.LnViscosityAt(temperature).Parts) yield return part.Times(-1);
         yield return new(new(SourceKind.Thermometer, instrument.Name), fluid.PerKelvinAt(temperature) * instrument.Thermometer);
-        if (fit.Curve.StressPerTorque is { } stressPerTorque && instrument.TorqueZero > 0)
+        if (fit.Curve.StressPerTorque is { } stressPerTorque && fit.Curve.Torque is { } torque)
         {
-            yield return new(new(SourceKind.TorqueZero, InstrumentDay.Key(instrument.Name, recording.Day)), fit.StressResponse[0] * stressPerTorque * instrument.TorqueZero);
+            foreach (var part in torque.ZeroParts(fit.Curve.Points.Select(point => fit.Curve.SpeedOf(point, study)))) yield return part.Times(fit.StressResponse[0] * stressPerTorque);
         }
 
         var filling = Invariant($"{recording.Sample}/{recording.Loading}");

@@ -8,7 +8,7 @@ namespace HemoRheo;
 internal sealed record CheckReading(InstrumentCheck? Check, Finding? Fault)
 {
     /// <summary>Fits one viscosity to the readings above the torque floor and in laminar flow, and holds it against the fluid's at their mean temperature.</summary>
-    internal static CheckReading Of(Study study, Instrument instrument, Recording recording)
+    internal static CheckReading Of(Study study, Instrument instrument, Items<BlankRun> blanks, Recording recording)
     {
         var where = new CurveLabel(recording.Sample, recording.Loading, study.Analysis.Ramp, recording).Where;
         if (study.Fluids.FirstOrDefault(known => known.Name == recording.Fluid) is not { } fluid)
@@ -23,7 +23,7 @@ internal sealed record CheckReading(InstrumentCheck? Check, Finding? Fault)
             return Without(CalibrationFindings.RecordingFaulty.At(where, $"Check '{recording.Sample}': {recording.Findings.First(finding => finding.Severity == Severity.Fault && finding.Where.Point is null).Message}"));
         }
 
-        var raw = recording.ToCurve(study, study.Analysis.Ramp);
+        var raw = recording.ToCurve(study, study.Analysis.Ramp, InstrumentTorques.Of(instrument, blanks, recording.StartedAt));
         var curve = raw.WithFindings(TorqueFloor.Judge(raw, study));
         if (Unusable(fluid, curve) is { } fault) return Without(fault);
         if (ExportedGeometry.Contradiction(study, recording) is { } other) return Without(other);
@@ -69,13 +69,14 @@ internal sealed record CheckReading(InstrumentCheck? Check, Finding? Fault)
     {
         var measured = new Viscosity(Math.Exp(fit.Scaled[0]));
         var expected = fluid.ViscosityAt(temperature);
-        var error = new Value(fit.Scaled[0] - Math.Log(expected.PascalSeconds), CheckBudget.Of(instrument, recording, fluid, temperature, fit).ToItems());
+        var error = new Value(fit.Scaled[0] - Math.Log(expected.PascalSeconds), CheckBudget.Of(study, instrument, recording, fluid, temperature, fit).ToItems());
         var name = recording.Loading == 1 ? recording.Sample : Invariant($"{recording.Sample}/{recording.Loading}");
         var findings = recording.Findings
             .Concat(fit.Curve.SetAside.SelectMany(aside => aside.Findings))
             .Concat(fit.Curve.Findings)
             .Concat(fit.Findings)
             .Concat(ReadingErrorModel.Findings(study, fit.Curve))
+            .Concat(InstrumentTorques.Findings(study, fit.Curve))
             .Concat(OwnFindings(instrument, recording, fit))
             .Concat(FluidFindings.Of(study, recording, fluid, temperature));
         return new InstrumentCheck(
@@ -85,7 +86,7 @@ internal sealed record CheckReading(InstrumentCheck? Check, Finding? Fault)
     private static IEnumerable<Finding> OwnFindings(Instrument instrument, Recording recording, FittedLaw fit)
     {
         var where = fit.Curve.Label.Where;
-        if (instrument.TorqueZero > 0 && fit.Curve.StressPerTorque is null)
+        if (fit.Curve.StressPerTorque is null && fit.Curve.Torque!.ZeroParts([null]).Any())
         {
             yield return CalibrationFindings.TorqueZeroUnknown.At(where, $"Check '{recording.Sample}' names no geometry.");
         }

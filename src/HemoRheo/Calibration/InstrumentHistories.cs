@@ -3,10 +3,11 @@ namespace HemoRheo;
 /// <summary>Makes an instrument's history of the recordings of its checks.</summary>
 internal static class InstrumentHistories
 {
-    internal static InstrumentHistory Of(Study study, Instrument instrument, IEnumerable<Recording> recordings)
+    internal static InstrumentHistory Of(Study study, Instrument instrument, IEnumerable<Recording> recordings, IEnumerable<Recording> empty)
     {
+        var (blanks, unusable) = InstrumentTorques.Read(study, instrument, empty);
         var fillings = CheckFilling.Of(recordings);
-        var read = fillings.Select(filling => CheckReading.Of(study, instrument, filling.Recording)).ToArray();
+        var read = fillings.Select(filling => CheckReading.Of(study, instrument, blanks, filling.Recording)).ToArray();
         var own = read.Select(reading => reading.Check).OfType<InstrumentCheck>().ToArray();
         var vote = CheckScatter.Of(instrument, CheckSpan.Of(instrument, own));
         var checks = own.Select(check => check.Settled(instrument, vote, study.Analysis.Level)).ToItems();
@@ -15,8 +16,10 @@ internal static class InstrumentHistories
         var findings = read.Select(reading => reading.Fault).OfType<Finding>()
             .Concat(fillings.Where(filling => filling.Recordings > 1).Select(ReadAgain))
             .Concat(own.GroupBy(check => check.At).Where(same => same.Select(check => check.Fit.Curve.Label.Sample).Distinct().Count() > 1).Select(AtOneTime))
-            .Concat(ScatterFindings(instrument, spans, scatter));
-        return new(instrument, checks, scatter is null ? [] : Periods(instrument, spans, scatter).ToItems(), findings.ToItems());
+            .Concat(ScatterFindings(instrument, spans, scatter))
+            .Concat(unusable)
+            .Concat(blanks.SelectMany(run => run.Findings));
+        return new(instrument, checks, scatter is null ? [] : Periods(instrument, spans, scatter).ToItems(), findings.ToItems()) { Blanks = blanks };
     }
 
     internal static InstrumentHistory OfUndeclared(Study study, string name, Items<Recording> recordings)

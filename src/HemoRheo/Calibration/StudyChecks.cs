@@ -4,7 +4,7 @@ namespace HemoRheo;
 public static class StudyChecks
 {
     /// <summary>
-    /// The history of every instrument: its checks with their outcome, and the periods that failed checks and adjustments part.
+    /// The history of every instrument: its blank runs, its checks with their outcome, and the periods that failed checks and adjustments part.
     /// A recording that gives no check is a finding of its instrument's history. An instrument that only checks name, not the study file, has a history of findings alone.
     /// </summary>
     /// <param name="study">The study.</param>
@@ -15,7 +15,7 @@ public static class StudyChecks
     /// </remarks>
     public static Items<InstrumentHistory> CheckInstruments(this Study study, StudyReadings readings)
     {
-        var declared = study.Instruments.Select(instrument => InstrumentHistories.Of(study, instrument, readings.Checks.Where(check => check.Instrument == instrument.Name)));
+        var declared = study.Instruments.Select(instrument => InstrumentHistories.Of(study, instrument, readings.Checks.Where(check => check.Instrument == instrument.Name), readings.Blanks));
         var undeclared = readings.Checks
             .Where(check => study.Instruments.All(instrument => instrument.Name != check.Instrument))
             .GroupBy(check => check.Instrument)

@@ -8,6 +8,9 @@ namespace HemoRheo;
 /// <param name="Findings">Findings about the whole curve.</param>
 public sealed record FlowCurve(CurveLabel Label, Items<FlowPoint> Points, Items<SetAside> SetAside, double? StressPerTorque, Items<Finding> Findings)
 {
+    /// <summary>How far its torques can be trusted; null where nobody asked, and what the study file declares then holds.</summary>
+    public TorqueStanding? Torque { get; init; }
+
     /// <summary>A curve from numbers.</summary>
     /// <param name="perSecond">Shear rates, 1/s, above zero.</param>
     /// <param name="pascals">Shear stresses, Pa, as many as rates.</param>

@@ -28,6 +28,10 @@ internal static class FlowCurveWords
     internal static Where PlaceOfStress(this FlowCurve curve, FlowPoint point) =>
         (point.Reading?.Where ?? curve.Label.Where) with { Sample = curve.Label.Sample, Loading = curve.Label.Loading, Point = point.Number };
 
+    /// <summary>Rotational speed of a point, rad/s: as read, or by the geometry; null where neither is known.</summary>
+    internal static double? SpeedOf(this FlowCurve curve, FlowPoint point, Study study) =>
+        point.Reading?.Speed ?? point.Rate.ReciprocalSeconds / study.Geometries.FirstOrDefault(known => known.Name == curve.Label.Recording?.Geometry)?.RatePerSpeed();
+
     /// <summary>A finding where rate or stress is not above zero and finite; null where both are.</summary>
     internal static Finding? NotPositive(this FlowCurve curve, FlowPoint point)
     {

@@ -12,14 +12,15 @@ public static class RecordingWords
     /// <param name="recording">The recording.</param>
     /// <param name="study">The study, which declares the geometry and the ramp that is analyzed.</param>
     /// <param name="ramp">The ramp. Readings whose ramp is not stated belong to the one the study analyzes.</param>
+    /// <param name="torque">How far its torques can be trusted; a zero that is corrected is taken from every torque. Left out: as the study file declares.</param>
     /// <returns>The curve, not screened. A number that a set-aside reading does not give is NaN in its point.</returns>
-    public static FlowCurve ToCurve(this Recording recording, Study study, Ramp ramp)
+    public static FlowCurve ToCurve(this Recording recording, Study study, Ramp ramp, TorqueStanding? torque = null)
     {
         var label = new CurveLabel(recording.Sample, recording.Loading, ramp, recording);
         var geometry = study.Geometries.FirstOrDefault(known => known.Name == recording.Geometry);
         var unknown = recording.Geometry is not null && geometry is null;
-        var points = recording.Readings.Where(reading => Belongs(reading.Ramp, ramp, study)).Select(reading => Point(reading, ramp, geometry)).ToItems();
-        var curve = new FlowCurve(label, points, [], geometry?.StressPerTorque(), []);
+        var points = recording.Readings.Where(reading => Belongs(reading.Ramp, ramp, study)).Select(reading => Point(reading, ramp, geometry, torque)).ToItems();
+        var curve = new FlowCurve(label, points, [], geometry?.StressPerTorque(), []) { Torque = torque };
         var ofCurve = OfCurve(curve, geometry, unknown, study).ToArray();
         var ofPoints = points.Select(point => OfPoint(curve, point, unknown)).OfType<Finding>();
         return curve.WithFindings(ofCurve.Concat(ofPoints));
@@ -28,14 +29,15 @@ public static class RecordingWords
     private static bool Belongs(Ramp stated, Ramp asked, Study study) =>
         stated == asked || (stated == Ramp.Unstated && asked == study.Analysis.Ramp);
 
-    private static FlowPoint Point(Reading reading, Ramp ramp, Geometry? geometry)
+    private static FlowPoint Point(Reading reading, Ramp ramp, Geometry? geometry, TorqueStanding? standing)
     {
         if (geometry is not null && reading.Speed is { } speed && reading.Torque is { } torque)
         {
-            return new(reading.Number, new(speed * geometry.RatePerSpeed()), new(torque * geometry.StressPerTorque()), ramp, reading);
+            return new(reading.Number, new(speed * geometry.RatePerSpeed()), new((torque - (standing?.Correction(speed) ?? 0)) * geometry.StressPerTorque()), ramp, reading);
         }
 
-        return new(reading.Number, new(reading.Rate ?? double.NaN), new(reading.Stress ?? double.NaN), ramp, reading);
+        var zero = geometry is not null && standing is not null ? standing.Correction(reading.Rate / geometry.RatePerSpeed()) * geometry.StressPerTorque() : 0;
+        return new(reading.Number, new(reading.Rate ?? double.NaN), new(reading.Stress - zero ?? double.NaN), ramp, reading);
     }
 
     private static IEnumerable<Finding> OfCurve(FlowCurve curve, Geometry? geometry, bool unknown, Study study)

@@ -57,9 +57,9 @@ public static class RheometryFindings
     public static FindingKind NoTorqueFloor { get; } = new(
         "torque-floor-not-declared",
         Severity.Note,
-        "No torque floor is declared for the instrument, so readings at too low a torque are not found.",
+        "No torque floor is declared for the instrument and no blank run tells it, so readings at too low a torque are not found.",
         "The study file leaves the floor out.",
-        "Find the floor with a fluid of known viscosity and write it in the study file.");
+        "Run the empty gap at the start of the day, or find the floor with a fluid of known viscosity and write it in the study file.");
 
     /// <summary>The torque of readings is not known.</summary>
     public static FindingKind TorqueNotKnown { get; } = new(

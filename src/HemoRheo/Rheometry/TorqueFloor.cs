@@ -9,31 +9,34 @@ internal static class TorqueFloor
     internal static IEnumerable<Finding> Judge(FlowCurve curve, Study study)
     {
         var instrument = study.Instruments.FirstOrDefault(known => known.Name == curve.Label.Recording?.Instrument);
-        if (instrument?.TorqueFloor is not { } floor)
+        var standing = curve.Torque ?? (instrument is null ? null : TorqueStanding.OfDeclared(instrument, ""));
+        if (instrument is null || standing is null || standing.Basis == TorqueBasis.None)
         {
             var whose = curve.Label.Recording is { } recording ? $"instrument '{recording.Instrument}'" : "a curve made from numbers";
             return [RheometryFindings.NoTorqueFloor.At(curve.Label.Where, $"No torque floor declared for {whose}.")];
         }
 
-        return Judge(curve, instrument, floor);
+        return Judge(curve, study, instrument, standing);
     }
 
-    private static IEnumerable<Finding> Judge(FlowCurve curve, Instrument instrument, double floor)
+    private static IEnumerable<Finding> Judge(FlowCurve curve, Study study, Instrument instrument, TorqueStanding standing)
     {
+        var by = standing.BlankRun is { } run ? $" by blank run '{run}'" : "";
         var unknown = 0;
         foreach (var point in curve.Points)
         {
-            var torque = curve.TorqueOf(point);
+            var speed = curve.SpeedOf(point, study);
+            var torque = point.Reading?.Torque - standing.Correction(speed) ?? point.Stress.Pascals / curve.StressPerTorque;
             if (torque is null)
             {
                 unknown++;
             }
-            else if (torque < floor)
+            else if (standing.Floor(speed) is { } floor && torque < floor)
             {
                 // Where both are exported the reading's column is that of the stress.
                 var where = point.Reading is { Torque: not null, Stress: not null } ? curve.PlaceOf(point) : curve.PlaceOfStress(point);
                 yield return RheometryFindings.TorqueBelowFloor.At(
-                    where, Invariant($"Reading {point.Number} has a torque of {1e6 * torque:G4} uN.m, below the floor of {1e6 * floor:G4} uN.m of '{instrument.Name}'."), torque, floor);
+                    where, Invariant($"Reading {point.Number} has a torque of {1e6 * torque:G4} uN.m, below the floor of {1e6 * floor:G4} uN.m of '{instrument.Name}'{by}."), torque, floor);
             }
         }
 

@@ -11,8 +11,12 @@ internal static class LoadingValue
     public static Value Of(Study study, LoadingResult loading, FittedLaw fit, FitValue value)
     {
         var terms = new List<(double, Value)> { (1, value.ToValue(fit)), (1, Shift(study, loading)) };
-        var response = value.StressResponse(fit) * (loading.Curve.StressPerTorque ?? 0) * TorqueZero(study, loading.Recording.Instrument);
-        if (response != 0) terms.Add((1, new(0, [new(new(SourceKind.TorqueZero, InstrumentDay.Key(loading.Recording.Instrument, loading.Recording.Day)), response)])));
+        var response = value.StressResponse(fit) * (loading.Curve.StressPerTorque ?? 0);
+        if (response != 0 && loading.Curve.Torque is { } torque)
+        {
+            terms.Add((1, new(0, torque.ZeroParts(loading.Curve.Points.Select(point => loading.Curve.SpeedOf(point, study))).Select(part => part.Times(response)).ToItems())));
+        }
+
         return Value.Combine(terms);
     }
 
@@ -45,8 +49,5 @@ internal static class LoadingValue
         0,
         [new(new(SourceKind.BloodBeta, ""), (read.DegreesCelsius - Temperature.Body.DegreesCelsius) * study.Blood.PerKelvinUncertainty)]);
 
-
     private static double Thermometer(Study study, string instrument) => study.Instruments.FirstOrDefault(known => known.Name == instrument)?.Thermometer ?? 0;
-
-    private static double TorqueZero(Study study, string instrument) => study.Instruments.FirstOrDefault(known => known.Name == instrument)?.TorqueZero ?? 0;
 }

@@ -87,6 +87,7 @@ internal static class NativeValues
         foreach (var (loading, fit) in used)
         {
             var place = where with { Loading = loading.Recording.Loading };
+            foreach (var unjudged in loading.Curve.Findings.Where(finding => finding.Kind == RheometryFindings.NoTorqueFloor)) yield return unjudged;
             if (loading.Standing.Period is null) yield return SampleFindings.NotCalibrated.At(place, SampleFindings.WhyNotCalibrated(loading.Standing));
             foreach (var doubt in loading.Standing.Findings.Where(finding => finding.Kind == CalibrationFindings.TorquesInDoubt)) yield return doubt;
             if (loading.Curve.MeanTemperature is null) yield return SampleFindings.NoTemperature.At(place, "No kept reading carries a temperature.");

@@ -14,7 +14,7 @@ internal static class StudyLoadings
     {
         var ramp = study.Analysis.Ramp;
         var other = ramp == Ramp.Down ? Ramp.Up : Ramp.Down;
-        FlowCurve Screened(Recording recording, Ramp which) => recording.ToCurve(study, which).Screened(study, records.GetValueOrDefault(recording.Sample));
+        FlowCurve Screened(Recording recording, Ramp which) => recording.ToCurve(study, which, histories.GetValueOrDefault(recording.Instrument)?.TorqueAt(recording.StartedAt)).Screened(study, records.GetValueOrDefault(recording.Sample));
         var curves = readings.Blood.Select(recording => Screened(recording, ramp)).ToArray();
         ErrorModel[] errors = [.. curves.Select(curve => ReadingErrorModel.Of(study, curve))];
 
@@ -50,6 +50,7 @@ internal static class StudyLoadings
         var findings = loading.Recording.Findings
             .Concat(loading.Curve.Findings)
             .Concat(ReadingErrorModel.Findings(study, loading.Curve))
+            .Concat(InstrumentTorques.Findings(study, loading.Curve))
             .Concat(loading.Curve.SetAside.SelectMany(aside => aside.Findings))
             .Concat(fits.Where(fit => fit.Law.Name == study.Analysis.DecideBy).SelectMany(fit => fit.Findings))
             .Concat(loading.Standing.Findings)

@@ -10,6 +10,8 @@ public static class Glossary
     private static readonly Unit Share = ShownUnits.LiterPerLiter;
     private static readonly Unit Grams = new(Quantity.Concentration, "g/L", "g/L", 1);
     private static readonly Unit Seconds = new(Quantity.Time, "s", "s", 1);
+    private static readonly Unit Days = new(Quantity.Time, "d", "d", 86400);
+    private static readonly Unit Torque = new(Quantity.Torque, "µN·m", "uN.m", 1e-6);
     private static readonly Unit Percent = new(Quantity.Fraction, "%", "%", 0.01);
 
     /// <summary>All columns, by subject.</summary>
@@ -163,6 +165,14 @@ public static class Glossary
         new("probability within", "Probability that the error lies within the limit."),
         new("period", "Number of the instrument's period between calibrations, counted from 1."),
         new("checks", "How many checks."),
+        new("torque rests on", "What the trust in torques rests on: blank run of the day, last blank run, declared floor, or nothing."),
+        new("blank run", "Name of the blank run that the torque zero and noise are taken from; empty where there is none."),
+        new("blank age", "Time from the blank run to the recording; below zero where the run was made later that day.", Days),
+        new("torque floor", "Torque below which readings are set aside, the largest over all speeds; empty where it is not known.", Torque),
+        new("torque zero", "Torque of the empty gap, the worst over all speeds; empty without a blank run.", Torque),
+        new("torque zero uncertainty", "Standard uncertainty of that.", Torque),
+        new("torque noise", "Standard deviation of one reading of the empty gap's torque.", Torque),
+        new("zero corrected", "Whether the torque zero is taken from every torque."),
         new("status", "Instrument status: in order, in doubt, failed or unknown."),
         new("reason", "The reason, in one sentence."),
         new("entry", "Number of the entry in the instrument's log, counted from 1."),

@@ -25,7 +25,7 @@ internal static class SampleCurve
     private static double? LowestStress(Edition edition, Items<LoadingResult> loadings)
     {
         var instrument = edition.Study.Instruments.FirstOrDefault(instrument => instrument.Name == loadings[0].Recording.Instrument);
-        return instrument?.TorqueFloor * loadings[0].Curve.StressPerTorque;
+        return (loadings[0].Curve.Torque is { } torque ? torque.Floor() : instrument?.TorqueFloor) * loadings[0].Curve.StressPerTorque;
     }
 
     private static Markup Residuals(Edition edition, Items<LoadingResult> loadings) =>

@@ -19,7 +19,7 @@ internal static class SampleLineage
             <li><b>fit</b> {(fit is null ? "none" : $"{Words.Of(fit.Convergence.Reason)} after {Figures.Count(fit.Convergence.Iterations, "iteration")} ({fit.Convergence.Message}); chi-square {(double.IsFinite(fit.Fit.ChiSquare) ? Figures.Fixed(fit.Fit.ChiSquare, 1) : Figures.Nothing)} for {fit.Fit.DegreesOfFreedom} degrees of freedom")}</li>
             <li><b>points</b> {Figures.Count(loading.Curve.Points.Count, "point")} kept, {loading.Curve.SetAside.Count} set aside, {Words.Of(loading.Curve.Label.Ramp)} ramp{(loading.OtherRamp is { } other ? $"; {Words.Of(other.Label.Ramp)} ramp for hysteresis ({Figures.Count(other.Points.Count, "point")})" : "")}</li>
             <li><b>file</b> {Files(edition, loading)}</li>
-            <li><b>instrument</b> {edition.InstrumentLink(loading.Recording.Instrument, "../")}{(loading.Recording.Geometry is { } geometry ? $", geometry {geometry}" : "")}: {Words.Of(loading.Standing.Status)}. {loading.Standing.Reason}{Period(loading.Standing.Period)}</li>
+            <li><b>instrument</b> {edition.InstrumentLink(loading.Recording.Instrument, "../")}{(loading.Recording.Geometry is { } geometry ? $", geometry {geometry}" : "")}: {Words.Of(loading.Standing.Status)}. {loading.Standing.Reason}{Period(loading.Standing.Period)}{Torque(loading.Curve.Torque)}</li>
             </ol>
             """);
     }
@@ -34,6 +34,10 @@ internal static class SampleLineage
         });
         return new(string.Join("; ", files));
     }
+
+    private static string Torque(TorqueStanding? torque) => torque is { BlankRun: { } run, Age: { } age }
+        ? $" Torques rest on the {torque.Basis.Words()}, {run}{(torque.Basis == TorqueBasis.EarlierBlank ? $", {Figures.Fixed(age.TotalDays, 1)} days old" : "")}: floor {Rounding.Digits(1e6 * torque.Floor()!.Value, 3)} µN·m, zero {(torque.Corrected ? "corrected" : "not corrected")}."
+        : "";
 
     private static string Period(InstrumentPeriod? period) => period is null
         ? " No correction applies."

@@ -8,6 +8,11 @@ internal static class LabTables
         Table.Of("check", "instrument", "started at", "fluid", "lot", "temperature", "measured", "expected", "relative error", "error lower", "error upper", "relative limit", "check outcome", "probability within", "period", "findings")
             .WithRows(edition.Results.Analyzed.Histories.SelectMany(history => history.Checks.Select(check => (history, check))), row => Check(row.history, row.check)));
 
+    /// <summary>One row a loading: what its torques rest on. None where the study has no blank run.</summary>
+    public static IEnumerable<StudyTable> Torques(Edition edition) => edition.Results.Analyzed.Histories.All(history => history.Blanks.Count == 0)
+        ? []
+        : [new("torques.csv", "One row a loading: the blank run or declared floor that its torques rest on.", edition.Results.Analyzed.TorqueTable())];
+
     /// <summary>One row a finding.</summary>
     public static StudyTable Findings(Edition edition) => new("findings.csv", "One row a finding, in the order of the pipeline.",
         Table.Of("severity", "code", "finding", "where", "sample", "loading", "point", "file", "line", "column", "observed", "limit", "usual cause", "what to do", "source")

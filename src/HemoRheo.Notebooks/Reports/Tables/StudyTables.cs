@@ -21,6 +21,7 @@ internal static class StudyTables
         GroupTables.Verdicts(edition),
         GroupTables.Ranges(edition),
         LabTables.Checks(edition),
+        .. LabTables.Torques(edition),
         LabTables.Findings(edition),
         LabTables.Files(edition),
     ];
