@@ -1,3 +1,5 @@
+using static System.FormattableString;
+
 namespace HemoRheo;
 
 /// <summary>How far an instrument's torques can be trusted at a moment, and what that rests on: a blank run of the day, else the last one, else what the study file declares, else nothing.</summary>
@@ -67,9 +69,12 @@ public sealed record TorqueStanding(
     }
 
     /// <inheritdoc/>
-    public override string ToString() => string.Create(
-        System.Globalization.CultureInfo.InvariantCulture,
-        $"{Basis.Words()}{(BlankRun is null ? "" : $" {BlankRun}")}{(Basis == TorqueBasis.EarlierBlank ? $", {Age!.Value.TotalDays:F1} d old" : "")}: floor {(Floor() is { } floor ? $"{1e6 * floor:G3} uN.m" : "not known")}");
+    public override string ToString()
+    {
+        var age = Basis == TorqueBasis.EarlierBlank && Age is { } time ? Invariant($", {time.TotalDays:F1} d old") : "";
+        var floor = Floor() is { } newtonMeters ? Invariant($"{1e6 * newtonMeters:G3} uN.m") : "not known";
+        return $"{Basis.Words()}{(BlankRun is null ? "" : $" {BlankRun}")}{age}: floor {floor}";
+    }
 
     private double ZeroSize(TorqueAtSpeed empty) => Corrected ? empty.Uncertainty : Math.Sqrt(empty.Zero * empty.Zero + empty.Uncertainty * empty.Uncertainty);
 }
