@@ -9,7 +9,7 @@ namespace HemoRheo;
 public sealed record FlowCurve(CurveLabel Label, Items<FlowPoint> Points, Items<SetAside> SetAside, double? StressPerTorque, Items<Finding> Findings)
 {
     /// <summary>How far its torques can be trusted; null where nobody asked, and what the study file declares then holds.</summary>
-    public TorqueStanding? Torque { get; init; }
+    public TorqueTrust? Torque { get; init; }
 
     /// <summary>A curve from numbers.</summary>
     /// <param name="perSecond">Shear rates, 1/s, above zero.</param>

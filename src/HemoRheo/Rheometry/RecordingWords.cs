@@ -14,7 +14,7 @@ public static class RecordingWords
     /// <param name="ramp">The ramp. Readings whose ramp is not stated belong to the one the study analyzes.</param>
     /// <param name="torque">How far its torques can be trusted; a zero that is corrected is taken from every torque. Left out: as the study file declares.</param>
     /// <returns>The curve, not screened. A number that a set-aside reading does not give is NaN in its point.</returns>
-    public static FlowCurve ToCurve(this Recording recording, Study study, Ramp ramp, TorqueStanding? torque = null)
+    public static FlowCurve ToCurve(this Recording recording, Study study, Ramp ramp, TorqueTrust? torque = null)
     {
         var label = new CurveLabel(recording.Sample, recording.Loading, ramp, recording);
         var geometry = study.Geometries.FirstOrDefault(known => known.Name == recording.Geometry);
@@ -29,7 +29,7 @@ public static class RecordingWords
     private static bool Belongs(Ramp stated, Ramp asked, Study study) =>
         stated == asked || (stated == Ramp.Unstated && asked == study.Analysis.Ramp);
 
-    private static FlowPoint Point(Reading reading, Ramp ramp, Geometry? geometry, TorqueStanding? standing)
+    private static FlowPoint Point(Reading reading, Ramp ramp, Geometry? geometry, TorqueTrust? standing)
     {
         if (geometry is not null && reading.Speed is { } speed && reading.Torque is { } torque)
         {

@@ -9,7 +9,7 @@ internal static class TorqueFloor
     internal static IEnumerable<Finding> Judge(FlowCurve curve, Study study)
     {
         var instrument = study.Instruments.FirstOrDefault(known => known.Name == curve.Label.Recording?.Instrument);
-        var standing = curve.Torque ?? (instrument is null ? null : TorqueStanding.OfDeclared(instrument, ""));
+        var standing = curve.Torque ?? (instrument is null ? null : TorqueTrust.OfDeclared(instrument, ""));
         if (instrument is null || standing is null || standing.Basis == TorqueBasis.None)
         {
             var whose = curve.Label.Recording is { } recording ? $"instrument '{recording.Instrument}'" : "a curve made from numbers";
@@ -19,7 +19,7 @@ internal static class TorqueFloor
         return Judge(curve, study, instrument, standing);
     }
 
-    private static IEnumerable<Finding> Judge(FlowCurve curve, Study study, Instrument instrument, TorqueStanding standing)
+    private static IEnumerable<Finding> Judge(FlowCurve curve, Study study, Instrument instrument, TorqueTrust standing)
     {
         var by = standing.BlankRun is { } run ? $" by blank run '{run}'" : "";
         var unknown = 0;

@@ -9,7 +9,7 @@ public static class StudyTorques
         .Of("sample", "loading", "instrument", "started at", "torque rests on", "blank run", "blank age", "torque floor", "torque zero", "torque zero uncertainty", "torque noise", "zero corrected")
         .WithRows(analyzed.Samples.SelectMany(sample => sample.Loadings), loading => Row(loading.Recording, loading.Curve.Torque));
 
-    private static Cell[] Row(Recording recording, TorqueStanding? torque)
+    private static Cell[] Row(Recording recording, TorqueTrust? torque)
     {
         var empty = torque?.At(null);
         return

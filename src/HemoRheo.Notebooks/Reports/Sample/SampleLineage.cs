@@ -35,7 +35,7 @@ internal static class SampleLineage
         return new(string.Join("; ", files));
     }
 
-    private static string Torque(TorqueStanding? torque) => torque is { BlankRun: { } run, Age: { } age }
+    private static string Torque(TorqueTrust? torque) => torque is { BlankRun: { } run, Age: { } age }
         ? $" Torques rest on the {torque.Basis.Words()}, {run}{(torque.Basis == TorqueBasis.EarlierBlank ? $", {Figures.Fixed(age.TotalDays, 1)} days old" : "")}: floor {Rounding.Digits(1e6 * torque.Floor()!.Value, 3)} µN·m, zero {(torque.Corrected ? "corrected" : "not corrected")}."
         : "";
 

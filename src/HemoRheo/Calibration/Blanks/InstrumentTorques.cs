@@ -11,7 +11,7 @@ public static class InstrumentTorques
     /// </summary>
     /// <param name="history">The instrument's history.</param>
     /// <param name="moment">The moment.</param>
-    public static TorqueStanding TorqueAt(this InstrumentHistory history, DateTimeOffset moment) => Of(history.Instrument, history.Blanks, moment);
+    public static TorqueTrust TorqueAt(this InstrumentHistory history, DateTimeOffset moment) => Of(history.Instrument, history.Blanks, moment);
 
     /// <summary>The blank runs of an instrument by time, and findings for recordings that give none.</summary>
     internal static (Items<BlankRun> Runs, Items<Finding> Faults) Read(Study study, Instrument instrument, IEnumerable<Recording> recordings)
@@ -20,10 +20,10 @@ public static class InstrumentTorques
         return (read.Select(reading => reading.Run).OfType<BlankRun>().ToItems(), read.Select(reading => reading.Fault).OfType<Finding>().ToItems());
     }
 
-    internal static TorqueStanding Of(Instrument instrument, Items<BlankRun> runs, DateTimeOffset moment)
+    internal static TorqueTrust Of(Instrument instrument, Items<BlankRun> runs, DateTimeOffset moment)
     {
         var date = DateOnly.FromDateTime(moment.DateTime);
-        var declared = TorqueStanding.OfDeclared(instrument, InstrumentDay.Key(instrument.Name, date));
+        var declared = TorqueTrust.OfDeclared(instrument, InstrumentDay.Key(instrument.Name, date));
         var valid = runs.Where(run => !(instrument.AdjustedAfter(run.At < moment ? run.At : moment) is { } adjusted && adjusted <= (run.At < moment ? moment : run.At))).ToArray();
         var ofDay = valid.LastOrDefault(run => run.Day == date && run.At <= moment) ?? valid.FirstOrDefault(run => run.Day == date);
         if ((ofDay ?? valid.LastOrDefault(run => run.At <= moment)) is not { } run) return declared;

@@ -96,7 +96,7 @@ public sealed class PrecedenceTests
 
     private static Recording Quiet(string name, DateTimeOffset at) => Run(name, at, About(0, 3e-9));
 
-    private static TorqueStanding At(Study study, DateTimeOffset moment, params Recording[] blanks) => History(study, blanks).TorqueAt(moment);
+    private static TorqueTrust At(Study study, DateTimeOffset moment, params Recording[] blanks) => History(study, blanks).TorqueAt(moment);
 
     private static AnalyzedStudy Evaluated(Study study, Items<Recording> blanks)
     {

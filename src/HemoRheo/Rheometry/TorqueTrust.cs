@@ -12,7 +12,7 @@ namespace HemoRheo;
 /// <param name="DeclaredZero">Standard uncertainty of the torque zero that the study file declares, N.m, where no run of the day tells it; else 0.</param>
 /// <param name="Day">The instrument's day, as sources name it.</param>
 /// <param name="BlankDay">The same of the blank run; empty where there is none.</param>
-public sealed record TorqueStanding(
+public sealed record TorqueTrust(
     TorqueBasis Basis,
     string? BlankRun,
     TimeSpan? Age,
@@ -27,7 +27,7 @@ public sealed record TorqueStanding(
     public const double FloorWidth = 3;
 
     /// <summary>What the study file declares.</summary>
-    internal static TorqueStanding OfDeclared(Instrument instrument, string day) =>
+    internal static TorqueTrust OfDeclared(Instrument instrument, string day) =>
         new(instrument.TorqueFloor is null ? TorqueBasis.None : TorqueBasis.Declared, null, null, [], false, instrument.TorqueFloor, instrument.TorqueZero, day, "");
 
     /// <summary>
