@@ -5,7 +5,7 @@ namespace HemoRheo.Benchmarks.Speed;
 
 /// <summary>Fits a second on one thread.</summary>
 /// <remarks>
-/// The laws that describe such blood: one of two viscosities is not told by these rates, and a fit that looks for what is not there takes a thousand times longer.
+/// The laws that describe such blood: one of two viscosities is not told by these rates, and a fit that looks for what is not there takes about a hundred times longer.
 /// Method: 4,000 invented curves of 12 points (300 to 0.7 1/s, noise 1 % and 0.3 mPa, Quemada truth, fixed seed), fitted in one thread from their own first guess to full convergence.
 /// After two seconds of warming up, seven rounds are timed by the processor time of the process, so that other programs do not count, and the best one is reported.
 /// "solver" is the lanes alone (guess, iterations, covariance, response, residuals); "fits" adds the records a user gets, with parameters, lack of fit and findings; "alone" fits curve by curve.
