@@ -52,6 +52,6 @@ internal static class HardRun
         var own = OtherStarts.Distance(law, data, new([.. fit.Scaled], [], [], [], fit.Fit.ChiSquare, fit.Convergence, null));
         var lower = own - lowest > Lower * (1 + own);
         if (lower) yield return $"law {law.Name}: usable, yet another start is lower";
-        if (lower && number < Block) yield return string.Create(CultureInfo.InvariantCulture, $"lower: {number} {law.Name}: {own:G8} and {lowest:G8}");
+        if (lower) yield return string.Create(CultureInfo.InvariantCulture, $"lower: {number} {law.Name}: {own:G8} and {lowest:G8}");
     }
 }

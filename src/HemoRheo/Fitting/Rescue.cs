@@ -12,10 +12,11 @@ internal static class Rescue
     /// <summary>The numbers of a curve, from its lane where they stand.</summary>
     public static CurveSolution Settled(FlowLaw law, CurveData curve, double[] start, LaneOutcome outcome)
     {
-        if (!outcome.Good) return Of(law, curve, start, outcome);
-        var solution = outcome.Solution;
+        var solution = outcome.Good ? outcome.Solution : Of(law, curve, start, outcome);
         var degrees = Math.Max(1, curve.Rates.Length - start.Length);
-        return solution.ChiSquare <= OfAnotherShape * degrees ? solution : OtherStarts.Nearest(law, curve, [solution, .. OtherStarts.Reached(law, curve, start)])!;
+        var asked = solution.Other is not null || start.Length == 1 || !solution.End.Converged;
+        var given = asked || solution.ChiSquare <= OfAnotherShape * degrees ? solution : OtherStarts.Nearest(law, curve, [solution, .. OtherStarts.Reached(law, curve, start)])!;
+        return !given.End.Converged || given.Inverse.All(double.IsFinite) ? given : given.Ended(new(StopReason.Singular, given.End.Iterations, "the sum of squares does not change with a parameter"));
     }
 
     public static CurveSolution Of(FlowLaw law, CurveData curve, double[] start, LaneOutcome outcome)

@@ -150,7 +150,8 @@ internal sealed class LaneSolver
         var next = Lane.Select(_finishing, _relative * Lane.Max(shrinking, _lastShrinking), _relative);
         var size = Lane.Min(_relative, next);
         var small = size < new Lane(StepLimit);
-        var flat = _distance < GradientLimit * Lane.Sqrt(1 + _here.ChiSquare);
+        var distance = _distance / Lane.Sqrt(1 + _here.ChiSquare);
+        var flat = distance < new Lane(GradientLimit);
         var stalled = _finishing & _relative < new Lane(1e-8) & _relative > 0.5 * _last;
         var done = _accept & (small | flat | stalled | atWall);
         _last = Lane.Select(_accept, _relative, _last);
@@ -161,7 +162,7 @@ internal sealed class LaneSolver
         {
             if (!done.TrueAt(lane)) continue;
             _ends[lane] = small.TrueAt(lane) ? new(StopReason.SmallStep, iteration, size[lane], atWall.TrueAt(lane))
-                : flat.TrueAt(lane) ? new(StopReason.SmallGradient, iteration, _distance[lane], atWall.TrueAt(lane))
+                : flat.TrueAt(lane) ? new(StopReason.SmallGradient, iteration, distance[lane], atWall.TrueAt(lane))
                 : atWall.TrueAt(lane) ? new(StopReason.IterationLimit, iteration, _relative[lane], true)
                 : new(StopReason.SmallDecrease, iteration, _relative[lane]);
         }

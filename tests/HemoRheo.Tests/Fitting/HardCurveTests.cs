@@ -19,4 +19,17 @@ public class HardCurveTests
         Assert.Empty(faults);
         Assert.InRange(usable, 300, 900);
     }
+
+    /// <summary>Four of a million: Cross's law ran to an exponent of hundreds, where its covariance overflows.</summary>
+    [Theory]
+    [InlineData(274219)]
+    [InlineData(333475)]
+    [InlineData(417967)]
+    [InlineData(858346)]
+    public void A_fit_whose_covariance_overflows_says_so(int number)
+    {
+        var fit = HardCurves.Of(number).Fit(FlowLaw.Cross, WeightedFits.Errors);
+        Assert.False(fit.Usable);
+        Assert.Contains(fit.Findings, finding => finding.Code == "not-identifiable");
+    }
 }
