@@ -14,7 +14,11 @@ public abstract record Measurand(string Name, string Symbol, Unit Shown, bool Lo
     public static Measurand CassonViscosity { get; } = new LawNumber("Casson viscosity", "η_c", ShownUnits.MillipascalSecond, "Casson", 1);
 
     /// <summary>Apparent viscosity at a shear rate.</summary>
-    public static Measurand Viscosity(ShearRate at) => new ViscosityAtRate(at);
+    /// <param name="at">Shear rate, finite and above zero.</param>
+    /// <exception cref="ArgumentOutOfRangeException">The rate is not finite and above zero.</exception>
+    public static Measurand Viscosity(ShearRate at) => at.ReciprocalSeconds > 0 && double.IsFinite(at.ReciprocalSeconds)
+        ? new ViscosityAtRate(at)
+        : throw new ArgumentOutOfRangeException(nameof(at), $"A viscosity is asked for at a finite shear rate above zero; this one is {at}.");
 
     /// <summary>Viscosity at a shear rate relative to the plasma of the same sample.</summary>
     public static Measurand RelativeViscosity(ShearRate at) => new RelativeViscosityAtRate(at);

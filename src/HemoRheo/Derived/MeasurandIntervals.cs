@@ -12,7 +12,7 @@ public static class MeasurandIntervals
     /// <exception cref="ArgumentException">The measurand does not come from this law.</exception>
     /// <exception cref="ArgumentOutOfRangeException">The level is not between 0 and 1, or there are too few replicates.</exception>
     public static FitInterval Interval(this FittedLaw fit, Measurand measurand, double level = 0.95, IntervalMethod method = IntervalMethod.ProfileLikelihood, BootstrapDraws? draws = null) =>
-        Intervals.Of(fit, FunctionOf(fit, measurand), level, method, draws);
+        Beyond(fit, measurand, Intervals.Of(fit, FunctionOf(fit, measurand), level, method, draws));
 
     /// <summary>The profile of a measurand, and the interval in it.</summary>
     /// <param name="fit">The fit.</param>
@@ -20,7 +20,15 @@ public static class MeasurandIntervals
     /// <param name="level">Coverage, between 0 and 1.</param>
     /// <exception cref="ArgumentException">The measurand does not come from this law.</exception>
     /// <exception cref="ArgumentOutOfRangeException">The level is not between 0 and 1.</exception>
-    public static Profile Profile(this FittedLaw fit, Measurand measurand, double level = 0.95) => Intervals.ProfileOf(fit, FunctionOf(fit, measurand), level);
+    public static Profile Profile(this FittedLaw fit, Measurand measurand, double level = 0.95)
+    {
+        var profile = Intervals.ProfileOf(fit, FunctionOf(fit, measurand), level);
+        return profile with { Interval = Beyond(fit, measurand, profile.Interval) };
+    }
+
+    private static FitInterval Beyond(FittedLaw fit, Measurand measurand, FitInterval interval) => measurand is not LawNumber && measurand.ReachesBeyond(fit.Curve)
+        ? interval with { Findings = interval.Findings.With([FittingFindings.IntervalExtrapolated.At(fit.Curve.Label.Where, $"Right only if the form of {fit.Law.Name} is: {measurand.Name} lies outside the kept shear rates.")]) }
+        : interval;
 
     /// <summary>A measurand as a function of the parameters of a fit's law.</summary>
     internal static FitFunction FunctionOf(FittedLaw fit, Measurand measurand)

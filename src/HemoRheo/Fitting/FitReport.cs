@@ -78,6 +78,11 @@ internal static class FitReport
             yield return FittingFindings.NotConverged.At(where, $"{law.Name}: {fit.Convergence.Message}.");
         }
 
+        if (fit.Curve.Label.Recording is null && 2 * Math.Max(fit.Curve.Points.Count(PlausibleViscosity.IsBelow), fit.Curve.Points.Count(PlausibleViscosity.IsAbove)) > fit.Curve.Points.Count)
+        {
+            yield return FittingFindings.NotLikeBlood.At(where, string.Create(CultureInfo.InvariantCulture, $"At {fit.Curve.Points[0].Rate} the viscosity is {fit.Curve.Points[0].ApparentViscosity.MillipascalSeconds:G4} mPa.s."));
+        }
+
         for (var k = 0; k < fit.Parameters.Count; k++)
         {
             if (fit.Parameters[k].AtBound) yield return FittingFindings.Boundary.At(where, BoundaryWords(law, k));

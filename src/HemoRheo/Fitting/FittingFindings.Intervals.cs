@@ -21,6 +21,15 @@ public static partial class FittingFindings
         "Use profile likelihood, or a law with fewer parameters.",
         "limit 1 % by choice: fewer move a 95 % limit by less than its own sampling error");
 
+    /// <summary>An interval of a quantity outside the kept shear rates.</summary>
+    public static FindingKind IntervalExtrapolated { get; } = new(
+        "interval-extrapolated",
+        Severity.Warning,
+        "The quantity lies outside the kept shear rates, so the form of the law gives it: the interval holds only if that form is right there.",
+        "The rate asked for is not among those measured.",
+        "Measure at that rate; report no value there, or as extrapolated.",
+        "arithmetic");
+
     /// <summary>A yield stress far below the stresses that were read.</summary>
     public static FindingKind YieldStressByForm { get; } = new(
         "yield-stress-by-form",

@@ -48,6 +48,15 @@ public static partial class FittingFindings
         "Report the simpler law; do not interpret the parameter that is held.",
         "arithmetic");
 
+    /// <summary>Numbers typed in by hand lie outside what blood can show.</summary>
+    public static FindingKind NotLikeBlood { get; } = new(
+        "numbers-not-like-blood",
+        Severity.Warning,
+        "Most points of a curve made from numbers have viscosities that neither blood nor plasma can show.",
+        "Millipascals given as pascals, revolutions per minute as a shear rate, or another liquid.",
+        "Check the units: rates in 1/s, stresses in Pa. Nothing was rescaled.",
+        "common practice, no source: 0.5 mPa.s to 50 mPa.s and a yield stress of 1 Pa");
+
     /// <summary>The sizes of the errors cannot be estimated: no degrees of freedom.</summary>
     public static FindingKind NoScale { get; } = new(
         "no-error-scale",

@@ -3,7 +3,9 @@ namespace HemoRheo;
 /// <summary>A curve solved from starts beside its own, four at a time.</summary>
 internal static class OtherStarts
 {
-    private const double Away = 1.5;
+    private static readonly double[] Away = [-1.5, 1.5];
+
+    private static readonly double[] NearAndFar = [-3, -1.5, -0.7, 0.7, 1.5, 3];
 
     /// <summary>Relative difference of two distances that is none.</summary>
     public const double SameDistance = 1e-6;
@@ -16,13 +18,26 @@ internal static class OtherStarts
     /// <param name="start">Its own start: the others lie away from it, one parameter at a time.</param>
     public static IEnumerable<CurveSolution> Reached(FlowLaw law, CurveData curve, double[] start)
     {
-        foreach (var group in Beside(start).Chunk(Lane.Count))
+        foreach (var group in Beside(start, law.MayHaveManyMinima ? NearAndFar : Away).Chunk(Lane.Count))
         {
-            foreach (var outcome in LaneGroup.Outcomes(law, [.. group.Select(_ => curve)], group))
+            foreach (var outcome in Outcomes(law, curve, group))
             {
                 if (outcome.Good) yield return outcome.Solution;
                 else if (outcome.AtWall && Rescue.AtBoundary(law, curve, outcome.Solution.Scaled) is { End.Converged: true } bound) yield return bound;
             }
+        }
+    }
+
+    /// <summary>Where starts end; none for a user's law that throws on the way, since its own start did not.</summary>
+    private static LaneOutcome[] Outcomes(FlowLaw law, CurveData curve, double[][] starts)
+    {
+        try
+        {
+            return LaneGroup.Outcomes(law, [.. starts.Select(_ => curve)], starts);
+        }
+        catch (Exception) when (law.MayHaveManyMinima)
+        {
+            return [];
         }
     }
 
@@ -69,11 +84,11 @@ internal static class OtherStarts
         return true;
     }
 
-    private static IEnumerable<double[]> Beside(double[] start)
+    private static IEnumerable<double[]> Beside(double[] start, double[] shifts)
     {
         for (var k = 0; k < start.Length; k++)
         {
-            foreach (var shift in (double[])[-Away, Away])
+            foreach (var shift in shifts)
             {
                 var other = start.ToArray();
                 other[k] += shift;

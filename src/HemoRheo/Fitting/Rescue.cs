@@ -14,8 +14,9 @@ internal static class Rescue
     {
         var solution = outcome.Good ? outcome.Solution : Of(law, curve, start, outcome);
         var degrees = Math.Max(1, curve.Rates.Length - start.Length);
-        var asked = solution.Other is not null || start.Length == 1 || !solution.End.Converged;
-        var given = asked || solution.ChiSquare <= OfAnotherShape * degrees ? solution : OtherStarts.Nearest(law, curve, [solution, .. OtherStarts.Reached(law, curve, start)])!;
+        var asked = solution.Other is not null || (start.Length == 1 && !law.MayHaveManyMinima) || !solution.End.Converged;
+        var alone = !law.MayHaveManyMinima && solution.ChiSquare <= OfAnotherShape * degrees;
+        var given = asked || alone ? solution : OtherStarts.Nearest(law, curve, [solution, .. OtherStarts.Reached(law, curve, start)])!;
         return !given.End.Converged || given.Inverse.All(double.IsFinite) ? given : given.Ended(new(StopReason.Singular, given.End.Iterations, "the sum of squares does not change with a parameter"));
     }
 

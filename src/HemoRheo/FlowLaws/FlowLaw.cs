@@ -40,6 +40,9 @@ public abstract record FlowLaw(string Name, Citation Source, Items<LawParameter>
     /// <summary>A limiting case of this law that a fit may end in; null where there is none.</summary>
     internal abstract LawBoundary? Boundary { get; }
 
+    /// <summary>Whether its shape is not known beforehand, so that a fit looks for other minima even where it converged.</summary>
+    internal virtual bool MayHaveManyMinima => false;
+
     /// <summary>A built-in law by its name.</summary>
     /// <param name="name">Its name; upper and lower case are the same.</param>
     /// <exception cref="ArgumentException">No built-in law has this name.</exception>

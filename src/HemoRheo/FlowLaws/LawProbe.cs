@@ -47,8 +47,10 @@ internal static class LawProbe
     {
         if (parameters.Length is 0 or > LaneDual.Slopes) throw new ArgumentException($"'{name}' has {parameters.Length} parameters; a flow law has one to five.", nameof(parameters));
         if (parameters.Select(parameter => parameter.Name).Distinct().Count() < parameters.Length) throw new ArgumentException($"Two parameters of '{name}' have the same name.", nameof(parameters));
+        if (FlowLaw.All.Any(law => law.Name.Equals(name, StringComparison.OrdinalIgnoreCase))) throw new ArgumentException($"'{name}' is the name of a built-in law; give yours a name of its own.", nameof(name));
         foreach (var parameter in parameters)
         {
+            if (double.IsNegativeInfinity(parameter.Lower) && double.IsFinite(parameter.Upper)) throw new ArgumentException($"Parameter '{parameter.Name}' of '{name}' has an upper bound and no lower one; give both, or fit its negative with a lower bound.", nameof(parameters));
             if (parameter.Start is not { } start) throw new ArgumentException($"Parameter '{parameter.Name}' of '{name}' has no start; write Start: and a believable number in {parameter.Unit}.", nameof(parameters));
             if (!(start > parameter.Lower && start < parameter.Upper)) throw new ArgumentException(string.Create(CultureInfo.InvariantCulture, $"Parameter '{parameter.Name}' of '{name}' starts at {start}, which is not between its bounds {parameter.Lower} and {parameter.Upper}."), nameof(parameters));
         }

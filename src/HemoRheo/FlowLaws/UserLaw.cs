@@ -6,6 +6,8 @@ internal abstract record UserLaw(string Name, Items<LawParameter> Parameters)
 {
     internal override LawBoundary? Boundary => null;
 
+    internal override bool MayHaveManyMinima => true;
+
     internal override NamedValues Values(IReadOnlyList<double> estimates) => new(Parameters, estimates.ToItems());
 
     internal override void FirstGuess(ReadOnlySpan<double> perSecond, ReadOnlySpan<double> pascals, Span<double> guess)

@@ -18,6 +18,8 @@ public sealed record FlowCurve(CurveLabel Label, Items<FlowPoint> Points, Items<
     /// <exception cref="ArgumentException">The lists differ in length or are empty.</exception>
     public static FlowCurve Of(IReadOnlyList<double> perSecond, IReadOnlyList<double> pascals, string name = "curve")
     {
+        ArgumentNullException.ThrowIfNull(perSecond);
+        ArgumentNullException.ThrowIfNull(pascals);
         if (perSecond.Count != pascals.Count || perSecond.Count == 0)
         {
             throw new ArgumentException($"A curve needs as many stresses as rates, and at least one: there are {perSecond.Count} rates and {pascals.Count} stresses.", nameof(pascals));

@@ -24,6 +24,9 @@ internal static class TextTable
         return text.ToString();
     }
 
+    /// <summary>A text in lines of so many signs at most, broken between words.</summary>
+    public static string Wrap(string text, int width) => string.Join('\n', Wrapped(text, width));
+
     private static bool IsNumeric(Table table, int column) =>
         table.Rows.Any(row => row[column].Number is not null) && table.Rows.All(row => row[column].Number is not null || row[column].IsEmpty);
 

@@ -94,7 +94,7 @@ internal static class LawSimulations
                 {
                     var found = Drawn(curves, law, numbers, rates, 0.01, name).Select(curve => curve.FlowBehavior(Errors(0.01, known))).ToArray();
                     var classes = new[] { FlowClass.Newtonian, FlowClass.ShearThinning, FlowClass.ShearThickening, FlowClass.Undecided }.Select(one => Share(found, it => it.Class == one));
-                    var answers = new[] { YieldStressAnswer.Present, YieldStressAnswer.Absent, YieldStressAnswer.Undecided }.Select(one => Share(found, it => it.YieldStress == one));
+                    var answers = new[] { YieldStressAnswer.Present, YieldStressAnswer.NoSign, YieldStressAnswer.Undecided }.Select(one => Share(found, it => it.YieldStress == one));
                     yield return $"{name}: {string.Join(" / ", classes)}; {string.Join(" / ", answers)}";
                 }
             }

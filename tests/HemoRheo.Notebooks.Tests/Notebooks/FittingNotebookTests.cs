@@ -6,7 +6,7 @@ public sealed class FittingNotebookTests(FittingNotebook notebook) : KeptNoteboo
     [Fact]
     public void Rates_that_reach_low_contradict_a_yield_stress()
     {
-        Assert.Contains("shear-thinning, without a yield stress", Showing("curve.FlowBehavior", "text/html"), StringComparison.Ordinal);
+        Assert.Contains("shear-thinning, no sign of a yield stress at these rates", Showing("curve.FlowBehavior", "text/html"), StringComparison.Ordinal);
         Assert.Contains("Contradicted: Newtonian", Showing("// the whole curve", "text/html"), StringComparison.Ordinal);
     }
 

@@ -82,4 +82,13 @@ public class BadDataTests
         Assert.Equal(Severity.Fault, finding.Severity);
         Assert.Empty(fit.Parameters);
     }
+
+    [Fact]
+    public void Millipascals_given_as_pascals_are_fitted_and_said_not_to_be_like_blood()
+    {
+        double[] rates = [100, 30, 10, 3, 1];
+        double[] pascals = [.. rates.Select(rate => FlowLaw.Casson.Stress(new(rate), 0.004, 0.0034).Pascals)];
+        Assert.DoesNotContain(FlowCurve.Of(rates, pascals).Fit(FlowLaw.Casson).Findings, finding => finding.Kind == FittingFindings.NotLikeBlood);
+        Assert.Contains(FlowCurve.Of(rates, [.. pascals.Select(stress => 1000 * stress)]).Fit(FlowLaw.Casson).Findings, finding => finding.Kind == FittingFindings.NotLikeBlood);
+    }
 }

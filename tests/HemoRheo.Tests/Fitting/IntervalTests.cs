@@ -140,4 +140,20 @@ public class IntervalTests
     }
 
     private static FlowCurve Noisy(string name, FlowLaw law, params double[] truth) => Simulated.Noisy(RandomStream.Of(20261201, name, 1), law, 0.01, 0.0003, truth);
+
+    [Fact]
+    public void An_interval_outside_the_kept_rates_says_that_the_form_of_the_law_gives_it()
+    {
+        var outside = Blood.Interval(Measurand.Viscosity(new ShearRate(0.001)));
+        Assert.Contains(outside.Findings, finding => finding.Kind == FittingFindings.IntervalExtrapolated);
+        Assert.Contains("lies outside the kept shear rates", outside.ToString(), StringComparison.Ordinal);
+        Assert.Contains(Blood.Profile(Measurand.ShearThinningIndex(new(0.001), new(100))).Interval.Findings, finding => finding.Kind == FittingFindings.IntervalExtrapolated);
+        Assert.Empty(Blood.Interval(Measurand.Viscosity(new ShearRate(100))).Findings);
+    }
+
+    [Theory]
+    [InlineData(0)]
+    [InlineData(-1)]
+    [InlineData(double.NaN)]
+    public void A_viscosity_at_no_rate_is_refused(double rate) => Assert.Throws<ArgumentOutOfRangeException>(() => Blood.ApparentViscosity(new(rate)));
 }

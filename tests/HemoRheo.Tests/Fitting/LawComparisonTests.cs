@@ -125,4 +125,20 @@ public class LawComparisonTests
         Assert.InRange(probabilities.Average(p => p <= 0.05 ? 1.0 : 0), 0.035, 0.065);
         Assert.InRange(probabilities.Average(p => p <= 0.5 ? 1.0 : 0), 0.466, 0.534);
     }
+
+    [Fact]
+    public void A_law_that_was_only_too_short_to_compare_is_not_said_not_to_describe_the_curve()
+    {
+        var three = FlowCurve.Of([100, 10, 1], [0.43, 0.062, 0.0148]).Compare(ErrorModel.Known(0.02, ShearStress.FromMillipascals(0.5)), FlowLaw.Newtonian, FlowLaw.Casson);
+        Assert.StartsWith("None of the laws that could be compared describes the curve.", three.Verdict, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void Residuals_that_are_rounding_decide_nothing()
+    {
+        double[] rates = [100, 50, 20, 10, 5, 2, 1];
+        var exact = FlowCurve.Of(rates, [.. rates.Select(rate => 0.005 + 0.0034 * rate)]).Compare(FlowLaw.Bingham, FlowLaw.HerschelBulkley);
+        Assert.Null(exact.Preferred);
+        Assert.Empty(exact.Contradicted);
+    }
 }

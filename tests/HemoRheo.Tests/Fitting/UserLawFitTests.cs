@@ -73,4 +73,31 @@ public class UserLawFitTests
             return p[0] * rate;
         }
     }
+
+    /// <summary>A law with many minima, from a start beside the wrong one: the truth is found, or the fit says that another start decides.</summary>
+    [Fact]
+    public void A_law_with_many_minima_is_tried_from_near_and_far_starts()
+    {
+        var wave = FlowLaw.Custom(
+            "wave",
+            (rate, p) => p[0] * rate * (1 + p[1] * LaneDual.Sin(p[2] * LaneDual.Log(rate))),
+            new LawParameter("viscosity", "η", "Pa.s", Start: 0.004),
+            new LawParameter("size", "a", "1", -1, 1, 0.05),
+            new LawParameter("frequency", "w", "1", 0, 20, 1.5));
+        double[] rates = [300, 200, 130, 80, 50, 30, 20, 12, 8, 5, 3, 2, 1.2, 0.8, 0.5];
+        var fit = FlowCurve.Of(rates, [.. rates.Select(rate => 0.004 * rate * (1 + 0.1 * Math.Sin(3.5 * Math.Log(rate))))]).Fit(wave);
+        Assert.Equal(3.5, fit.Values["frequency"], 1e-6);
+    }
+
+    [Fact]
+    public void A_parameter_with_an_upper_bound_alone_is_refused() => Assert.Contains(
+        "an upper bound and no lower one",
+        Assert.Throws<ArgumentException>(() => FlowLaw.Custom("mine", (rate, p) => p[0] * rate, new LawParameter("viscosity", "η", "Pa.s", double.NegativeInfinity, 0.003, 0.002))).Message,
+        StringComparison.Ordinal);
+
+    [Fact]
+    public void The_name_of_a_built_in_law_is_refused() => Assert.Contains(
+        "the name of a built-in law",
+        Assert.Throws<ArgumentException>(() => FlowLaw.Custom("casson", (rate, p) => p[0] * rate, new LawParameter("viscosity", "η", "Pa.s", Start: 0.003))).Message,
+        StringComparison.Ordinal);
 }

@@ -27,7 +27,7 @@ public sealed record FlowBehavior(FlowClass Class, YieldStressAnswer YieldStress
     private string YieldWords => YieldStress switch
     {
         YieldStressAnswer.Present => "with a yield stress",
-        YieldStressAnswer.Absent => "without a yield stress",
+        YieldStressAnswer.NoSign => "no sign of a yield stress at these rates",
         _ => "yield stress not decided by these rates",
     };
 }

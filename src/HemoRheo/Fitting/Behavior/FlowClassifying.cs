@@ -3,6 +3,9 @@ namespace HemoRheo;
 /// <summary>The flow-behavior class of a curve, asked as a sentence: <c>curve.FlowBehavior(errors)</c>.</summary>
 public static class FlowClassifying
 {
+    /// <summary>Slope of log stress over log rate at the lower rates above which stress still falls steadily, by choice: with half of the lowest stress a yield stress, Casson's law has a slope of 0.3 there.</summary>
+    private const double SteadyFall = 0.5;
+
     /// <summary>
     /// The class of a curve by intervals: shear-thinning or shear-thickening where the interval of the slope of log stress over log rate lies on one side of 1 and no half of the rates contradicts it;
     /// Newtonian only where the slopes of both halves are shown to be near 1 (two one-sided tests); else undecided.
@@ -28,10 +31,15 @@ public static class FlowClassifying
         var (flowClass, evidence) = slopes.Judge();
         var (answer, why) = flowClass switch
         {
-            FlowClass.Newtonian => (YieldStressAnswer.Absent, []),
+            FlowClass.Newtonian => (YieldStressAnswer.NoSign, []),
             FlowClass.ShearThinning => YieldStressEvidence.Judge(curve, model),
             _ => (YieldStressAnswer.Undecided, ["A yield stress is asked only of a curve that thins."]),
         };
+        if (flowClass == FlowClass.ShearThinning && answer == YieldStressAnswer.NoSign && !(slopes.OfLow?.Lower > SteadyFall))
+        {
+            (answer, why) = (YieldStressAnswer.Undecided, ["At the lowest rates the stress falls too slowly to leave out a yield stress, whatever the laws compared say."]);
+        }
+
         return new(flowClass, answer, slopes.Rates, slopes.OfWhole, slopes.OfLow, slopes.OfHigh, evidence.Concat(why).ToItems());
     }
 }

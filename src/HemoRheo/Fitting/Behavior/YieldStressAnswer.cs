@@ -9,6 +9,6 @@ public enum YieldStressAnswer
     /// <summary>A law with a yield stress describes the curve, laws without one are clearly worse, and the low rates reach near enough.</summary>
     Present,
 
-    /// <summary>The curve is Newtonian, or every law with a yield stress is clearly worse than one without.</summary>
-    Absent,
+    /// <summary>These rates show none: the curve is Newtonian, or every law with a yield stress is clearly worse than one without and stress still falls steadily at the lowest rates. A yield stress far below the lowest stress is not excluded.</summary>
+    NoSign,
 }

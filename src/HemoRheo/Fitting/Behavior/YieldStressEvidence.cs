@@ -20,7 +20,7 @@ internal static class YieldStressEvidence
         var smooth = without.Where(law => !law.Fit.Fit.Contradicts).MinBy(law => law.Criterion);
         if (smooth is not null && with.Count > 0 && with.All(law => law.Criterion - smooth.Criterion > LawComparison.LargestAlike))
         {
-            return (YieldStressAnswer.Absent, [Invariant($"{smooth.Law}, which has no yield stress, is more than {LawComparison.LargestAlike} units of AICc below every law with one.")]);
+            return (YieldStressAnswer.NoSign, [Invariant($"{smooth.Law}, which has no yield stress, is more than {LawComparison.LargestAlike} units of AICc below every law with one.")]);
         }
 
         if (yielding is null) return (YieldStressAnswer.Undecided, ["No law with a yield stress describes the curve."]);

@@ -3,6 +3,9 @@ namespace HemoRheo;
 /// <summary>Laws compared, said as a sentence: <c>curve.Compare(FlowLaw.Casson, FlowLaw.Quemada)</c>.</summary>
 public static class LawComparing
 {
+    /// <summary>Mean squared residual, in variances of the error model, that is rounding and no error.</summary>
+    private const double RoundingAlone = 1e-20;
+
     /// <summary>Fits flow laws to the kept points of a curve with the default error model, known up to a scale, and compares them.</summary>
     /// <param name="curve">The curve.</param>
     /// <param name="laws">Two laws or more, each once.</param>
@@ -20,6 +23,7 @@ public static class LawComparing
         ArgumentNullException.ThrowIfNull(curve);
         ArgumentNullException.ThrowIfNull(errors);
         ArgumentNullException.ThrowIfNull(laws);
+        foreach (var law in laws) ArgumentNullException.ThrowIfNull(law);
         if (laws.Length < 2) throw new ArgumentException($"A comparison needs two laws or more; there {(laws.Length == 1 ? $"is one, {laws[0]}" : "is none")}.", nameof(laws));
         if (laws.GroupBy(law => law.Name).FirstOrDefault(same => same.Count() > 1) is { } twice) throw new ArgumentException($"{twice.Key} stands twice among the laws to compare; give each once, and laws of your own names of their own.", nameof(laws));
         return Of([.. laws.Select(law => Fits.OfAll([curve], law, errors)[0])]);
@@ -44,7 +48,7 @@ public static class LawComparing
         var pattern = ResidualPattern.Of(fit);
         var criterion = Likelihood.CorrectedCriterion(minusTwice, counted, fit.Residuals.Count);
         var why = criterion is null ? $"{fit.Residuals.Count} points are too few for AICc with {counted} parameters"
-            : !double.IsFinite(minusTwice) ? "it goes through every point, so the errors have no size"
+            : !double.IsFinite(minusTwice) || (!fit.Errors.ScaleKnown && fit.Fit.ChiSquare < RoundingAlone * fit.Residuals.Count) ? "it goes through every point, so the errors have no size"
             : null;
         return new(fit, counted, double.IsFinite(minusTwice) ? minusTwice : null, why is null ? criterion : null, null, null, pattern, why, null);
     }

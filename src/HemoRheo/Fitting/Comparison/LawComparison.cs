@@ -43,14 +43,14 @@ public sealed record LawComparison(Items<ComparedLaw> Laws, Items<NestedTest> Ne
         .WithRows(Nested, test => [test.Simple.Name, test.General.Name, test.Where, TwoPlaces(test.Statistic), test.DegreesOfFreedom, Small(test.Probability), Method(test)]);
 
     /// <inheritdoc/>
-    public override string ToString() => $"{ToTable()}\n{Verdict}";
+    public override string ToString() => $"{ToTable()}\n{TextTable.Wrap(Verdict, 100)}";
 
     private IEnumerable<string> Sentences()
     {
         var possible = Possible;
         var compared = Laws.Count(law => law.Difference is not null);
         if (compared == 0) yield return "No law could be compared.";
-        else if (possible.Count == 0) yield return "None of these laws describes the curve.";
+        else if (possible.Count == 0) yield return compared < Laws.Count(law => law.Fit.Usable) ? "None of the laws that could be compared describes the curve." : "None of these laws describes the curve.";
         else if (compared == 1) yield return $"Only {possible[0].Law} could be compared.";
         else if (possible.Count == 1) yield return $"{possible[0].Law} is preferred.";
         else yield return $"These data cannot tell {Listed(possible.Select(law => law.Law.Name))} apart; {possible[0].Law} has the fewest parameters.";

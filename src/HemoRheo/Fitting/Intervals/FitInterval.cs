@@ -49,7 +49,7 @@ public sealed record FitInterval(
         _ => $"{Name}: no answer ({How}): {WhyNone}",
     };
 
-    private string ByForm => Findings.FirstOrDefault(finding => finding.Kind == FittingFindings.YieldStressByForm) is { } finding ? $". {finding.Message.TrimEnd('.')}" : "";
+    private string ByForm => Findings.FirstOrDefault(finding => finding.Kind == FittingFindings.YieldStressByForm || finding.Kind == FittingFindings.IntervalExtrapolated) is { } finding ? $". {finding.Message.TrimEnd('.')}" : "";
 
     private string How => string.Create(CultureInfo.InvariantCulture, $"{100 * Level:G6} %, {MethodWord}");
 

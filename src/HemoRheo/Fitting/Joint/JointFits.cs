@@ -113,6 +113,7 @@ public static class JointFits
     {
         ArgumentNullException.ThrowIfNull(curves);
         ArgumentNullException.ThrowIfNull(errors);
+        foreach (var curve in curves) ArgumentNullException.ThrowIfNull(curve);
         if (curves.Count < 2) throw new ArgumentException($"A joint fit needs at least two curves; there {(curves.Count == 1 ? "is 1. One curve alone is fitted by curve.Fit(law)" : "are none")}.", nameof(curves));
         if (errors.Count != curves.Count) throw new ArgumentException($"There are {curves.Count} curves and {errors.Count} error models; each curve needs one.", nameof(errors));
         if (errors.Any(one => one.ScaleKnown != errors[0].ScaleKnown)) throw new ArgumentException("Some error models have known sizes and others are known up to scale; curves fitted together need one kind.", nameof(errors));

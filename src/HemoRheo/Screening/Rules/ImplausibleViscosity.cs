@@ -8,9 +8,6 @@ namespace HemoRheo;
 /// </summary>
 internal sealed class ImplausibleViscosity : IScreeningRule
 {
-    private const double Lowest = 0.0005;
-    private const double Highest = 0.05;
-    private const double LargestYieldStress = 1;
     private const int FewestPoints = 3;
 
     public Items<FindingKind> Kinds { get; } = [ScreeningFindings.ImplausibleViscosity];
@@ -18,19 +15,15 @@ internal sealed class ImplausibleViscosity : IScreeningRule
     public IEnumerable<Finding> Judge(FlowCurve curve, Study study, SampleRecord? sample)
     {
         if (curve.Label.Recording is { Kind: not RecordingKind.Blood } || curve.Points.Count < FewestPoints) yield break;
-        FlowPoint[] low = [.. curve.Points.Where(point => ViscosityOf(point) < Lowest)];
-        FlowPoint[] high = [.. curve.Points.Where(point => ViscosityOf(point) > HighestAt(point))];
-        if (2 * low.Length > curve.Points.Count) yield return Found(curve, low, "below 0.5 mPa.s", Lowest);
-        if (2 * high.Length > curve.Points.Count) yield return Found(curve, high, "above 50 mPa.s and a yield stress of 1 Pa", HighestAt(high[0]));
+        FlowPoint[] low = [.. curve.Points.Where(PlausibleViscosity.IsBelow)];
+        FlowPoint[] high = [.. curve.Points.Where(PlausibleViscosity.IsAbove)];
+        if (2 * low.Length > curve.Points.Count) yield return Found(curve, low, "below 0.5 mPa.s", PlausibleViscosity.Lowest);
+        if (2 * high.Length > curve.Points.Count) yield return Found(curve, high, "above 50 mPa.s and a yield stress of 1 Pa", PlausibleViscosity.HighestAt(high[0]));
     }
 
     private static Finding Found(FlowCurve curve, FlowPoint[] points, string side, double limit) => ScreeningFindings.ImplausibleViscosity.At(
         curve.Label.Where,
-        Invariant($"{points.Length} of {curve.Points.Count} kept points lie {side}, which blood or plasma cannot show: {ViscosityOf(points[0]):G3} Pa.s at {points[0].Rate}."),
-        ViscosityOf(points[0]),
+        Invariant($"{points.Length} of {curve.Points.Count} kept points lie {side}, which blood or plasma cannot show: {points[0].ApparentViscosity.PascalSeconds:G3} Pa.s at {points[0].Rate}."),
+        points[0].ApparentViscosity.PascalSeconds,
         limit);
-
-    private static double HighestAt(FlowPoint point) => Highest + LargestYieldStress / point.Rate.ReciprocalSeconds;
-
-    private static double ViscosityOf(FlowPoint point) => point.Stress.Pascals / point.Rate.ReciprocalSeconds;
 }
