@@ -18,7 +18,7 @@ internal static class PooledComparing
         var wanted = Enumerable.Range(0, fits[0].Fits.Length).Where(i => Criterion(fits[0].Fits[i]) is not null).ToArray();
         var compared = fits.Where(law => wanted.Length > 0 && wanted.Count(i => Criterion(law.Fits[i]) is not null) >= EnoughCurves * wanted.Length).ToArray();
         var curves = wanted.Where(i => compared.All(law => Criterion(law.Fits[i]) is not null)).ToArray();
-        if (compared.Length < 2 || curves.Length == 0) return new(fits.Select(law => new PooledLaw(law.Law.Name, LawStanding.NotCompared)).ToItems(), $"The laws could not be compared: a law takes part that has usable fits of {100 * EnoughCurves:G2} % of the {wanted.Length} curves of {fits[0].Law}; {string.Join(", ", fits.Skip(1).Select(law => FormattableString.Invariant($"{law.Law} has {wanted.Count(i => Criterion(law.Fits[i]) is not null)}")))}.");
+        if (compared.Length < 2 || curves.Length == 0) return new(fits.Select(law => new PooledLaw(law.Law.Name, LawStanding.NotCompared)).ToItems(), FormattableString.Invariant($"The laws could not be compared: a law takes part that has usable fits of {100 * EnoughCurves:G2} % of the {wanted.Length} curves of {fits[0].Law}; {string.Join(", ", fits.Skip(1).Select(law => FormattableString.Invariant($"{law.Law} has {wanted.Count(i => Criterion(law.Fits[i]) is not null)}")))}."));
 
         var criteria = compared.ToDictionary(law => law.Law, law => curves.Select(i => Criterion(law.Fits[i])!.Value).ToArray());
         var fitting = compared.Where(law => evidence[law.Law.Name].Fits).Select(law => law.Law).ToArray();
