@@ -1,6 +1,6 @@
 using HemoRheo.Benchmarks;
-using HemoRheo.Benchmarks.Laws;
 using HemoRheo.Benchmarks.FittedIntervals;
+using HemoRheo.Benchmarks.Laws;
 using HemoRheo.Benchmarks.Pooled;
 using HemoRheo.Benchmarks.Speed;
 
