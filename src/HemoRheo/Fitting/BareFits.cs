@@ -3,7 +3,7 @@ namespace HemoRheo;
 /// <summary>Fits of one law to many curves from given starts, without records: numbers into arrays of the caller. Nothing is allocated once a thread is warm, except for curves that their lane does not settle.</summary>
 internal static class BareFits
 {
-    /// <summary>Fits every curve; each has the bits of a fit alone from the same start.</summary>
+    /// <summary>Fits every curve; each has the bits of a fit alone from the same start, but that a fit at its bound, or of another shape, is not tried from other starts.</summary>
     /// <param name="law">The law.</param>
     /// <param name="curves">The curves, without faults; standard deviations are given for all of them or for none.</param>
     /// <param name="starts">Starts on the fitting scale, curve after curve.</param>

@@ -41,24 +41,26 @@ internal static class OtherStarts
         }
     }
 
-    /// <summary>The minimum nearest to the readings, beside the next one that differs from it; null where there is no minimum.</summary>
+    /// <summary>The minimum nearest to the readings, the first of equal ones, beside the next that differs from it; null where there is no minimum.</summary>
     public static CurveSolution? Nearest(FlowLaw law, CurveData curve, IReadOnlyList<CurveSolution> minima)
     {
         double[] distances = [.. minima.Select(minimum => Distance(law, curve, minimum))];
-        int[] order = [.. Enumerable.Range(0, distances.Length).OrderBy(i => distances[i])];
-        if (order.Length == 0) return null;
-        var (given, distance) = (minima[order[0]], distances[order[0]]);
-        foreach (var i in order.Skip(1))
+        if (distances.Length == 0) return null;
+        var smallest = distances.Min();
+        var first = Array.FindIndex(distances, distance => IsSame(distance, smallest));
+        var (given, own) = (minima[first], distances[first]);
+        foreach (var i in Enumerable.Range(0, distances.Length).OrderBy(i => distances[i]))
         {
-            var equal = distances[i] - distance <= SameDistance * (1 + distance);
-            if (equal && SameEstimates(given, minima[i])) continue;
-            return given.Beside(new(distances[i], distance, equal));
+            var equal = IsSame(distances[i], smallest);
+            if (!equal || !SameEstimates(given, minima[i])) return given.Beside(new(distances[i], own, equal));
         }
 
         return given;
     }
 
-    /// <summary>Sum of squares, its variances between reading and law; see <see cref="OtherMinimum"/>.</summary>
+    private static bool IsSame(double distance, double smallest) => distance == smallest || distance - smallest <= SameDistance * (1 + smallest);
+
+    /// <summary>Sum of squares, its variances between reading and law, infinite where it overflows; see <see cref="OtherMinimum"/>.</summary>
     public static double Distance(FlowLaw law, CurveData curve, CurveSolution solution)
     {
         var slopes = new double[solution.Scaled.Length];
@@ -70,7 +72,7 @@ internal static class OtherStarts
             sum += residual * residual / curve.VarianceOf(i, Math.Sqrt(curve.Stresses[i]) * Math.Sqrt(stress));
         }
 
-        return sum;
+        return double.IsNaN(sum) ? double.PositiveInfinity : sum;
     }
 
     private static bool SameEstimates(CurveSolution one, CurveSolution other)

@@ -6,7 +6,7 @@ internal static class Rescue
     /// <summary>The general path is for hard models; a flow law on its fitting scale that has not arrived by then runs off.</summary>
     private const int IterationLimit = 200;
 
-    /// <summary>Sum of squares a degree of freedom above which a curve is not of the law's shape; only there has a fit that its lane settled been seen to end in the higher of two minima.</summary>
+    /// <summary>Sum of squares a degree of freedom above which a curve is not of the law's shape. There, and at a bound, fits have been seen to end in the higher of two minima; elsewhere not in a million hard curves.</summary>
     private const double OfAnotherShape = 100;
 
     /// <summary>The numbers of a curve, from its lane where they stand.</summary>
@@ -15,7 +15,7 @@ internal static class Rescue
         var solution = outcome.Good ? outcome.Solution : Of(law, curve, start, outcome);
         var degrees = Math.Max(1, curve.Rates.Length - start.Length);
         var asked = solution.Other is not null || (start.Length == 1 && !law.MayHaveManyMinima) || !solution.End.Converged;
-        var alone = !law.MayHaveManyMinima && solution.ChiSquare <= OfAnotherShape * degrees;
+        var alone = !law.MayHaveManyMinima && solution.Held is null && solution.ChiSquare <= OfAnotherShape * degrees;
         var given = asked || alone ? solution : OtherStarts.Nearest(law, curve, [solution, .. OtherStarts.Reached(law, curve, start)])!;
         return !given.End.Converged || given.Inverse.All(double.IsFinite) ? given : given.Ended(new(StopReason.Singular, given.End.Iterations, "the sum of squares does not change with a parameter"));
     }
@@ -29,9 +29,8 @@ internal static class Rescue
 
         var first = General(law, curve, start);
         if (IsBeyondWall(law, curve, first) && AtBoundary(law, curve, first.Scaled) is { End.Converged: true } bound) first = bound;
-        List<CurveSolution> minima = [.. OtherStarts.Reached(law, curve, start)];
-        if (first.End.Converged) minima.Add(first);
-        if (OtherStarts.Nearest(law, curve, minima) is not { } nearest) return first;
+        CurveSolution[] own = first.End.Converged ? [first] : [];
+        if (OtherStarts.Nearest(law, curve, [.. own, .. OtherStarts.Reached(law, curve, start)]) is not { } nearest) return first;
 
         // A minimum farther from the readings than a fit that found none is no answer.
         return OtherStarts.Distance(law, curve, first) < OtherStarts.Distance(law, curve, nearest) * (1 - OtherStarts.SameDistance) ? first : nearest;
