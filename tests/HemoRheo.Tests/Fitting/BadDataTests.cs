@@ -91,4 +91,30 @@ public class BadDataTests
         Assert.DoesNotContain(FlowCurve.Of(rates, pascals).Fit(FlowLaw.Casson).Findings, finding => finding.Kind == FittingFindings.NotLikeBlood);
         Assert.Contains(FlowCurve.Of(rates, [.. pascals.Select(stress => 1000 * stress)]).Fit(FlowLaw.Casson).Findings, finding => finding.Kind == FittingFindings.NotLikeBlood);
     }
+
+    [Theory]
+    [InlineData(0, 0)]
+    [InlineData(double.PositiveInfinity, 0)]
+    [InlineData(0.01, double.PositiveInfinity)]
+    [InlineData(double.NaN, 0.001)]
+    public void Weights_that_are_zero_or_infinite_are_refused(double relative, double floor) => Assert.Contains(
+        "needs a relative part and a floor",
+        Assert.Throws<ArgumentException>(() => FlowCurve.Of([100, 10, 1], [0.43, 0.06, 0.014]).Fit(FlowLaw.Casson, ErrorModel.Known(relative, ShearStress.FromPascals(floor)))).Message,
+        StringComparison.Ordinal);
+
+    /// <summary>A point given twice counts twice: the same estimates, errors smaller by the root of two.</summary>
+    [Fact]
+    public void Points_given_twice_count_twice()
+    {
+        double[] rates = [100, 30, 10, 3, 1];
+        double[] pascals = [0.43, 0.153, 0.062, 0.0262, 0.0148];
+        var errors = ErrorModel.Known(0.02, ShearStress.FromMillipascals(0.3));
+        var once = FlowCurve.Of(rates, pascals).Fit(FlowLaw.Casson, errors);
+        var twice = FlowCurve.Of([.. rates, .. rates], [.. pascals, .. pascals]).Fit(FlowLaw.Casson, errors);
+        for (var k = 0; k < 2; k++)
+        {
+            Assert.Equal(once.Parameters[k].Estimate, twice.Parameters[k].Estimate, 1e-9 * once.Parameters[k].Estimate);
+            Assert.Equal(once.Parameters[k].StandardError!.Value, Math.Sqrt(2) * twice.Parameters[k].StandardError!.Value, 1e-6 * once.Parameters[k].StandardError!.Value);
+        }
+    }
 }
